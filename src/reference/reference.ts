@@ -1,0 +1,224 @@
+import type { Additive, AlkaliSupply, Fat, FattyAcid, Liquid } from '../chemistry/materials.ts';
+import type { Grams } from '../chemistry/quantity.ts';
+
+/** How a value is known. `from memory` is said wherever the value is shown. */
+export type How = 'measured' | 'standard' | 'handbook' | 'supplier' | 'common practice' | 'from memory';
+
+/** One publication or other origin of values, from `data/sources.yaml`. */
+export interface Source {
+  readonly id: string;
+  readonly title: string;
+  readonly author: string | null;
+  readonly edition: string | null;
+  readonly year: number | null;
+  /** What sort of evidence; its place in `ORDER_OF_CHOICE` ranks it. */
+  readonly kind: SourceKind;
+  readonly address: string | null;
+  readonly readOn: string | null;
+}
+
+/** The declared order of choice: an earlier kind is used before a later one. */
+export const ORDER_OF_CHOICE = [
+  'standard',
+  'pharmacopoeia',
+  'regulation',
+  'handbook',
+  'paper',
+  'supplier',
+  'practice',
+] as const;
+export type SourceKind = (typeof ORDER_OF_CHOICE)[number];
+
+/** One value of one source. Either `value` or at least one of `min` and `max`. */
+export interface ValueRecord {
+  readonly value: number | null;
+  readonly min: number | null;
+  readonly max: number | null;
+  readonly unit: string;
+  readonly source: string;
+  /** The place in the source: "Table 2, coconut oil". */
+  readonly at: string;
+  readonly how: How;
+  /** `mean` of `samples` measured samples; `range` of a standard or of samples; `typical` otherwise. */
+  readonly statistic: 'range' | 'mean' | 'typical';
+  readonly samples: number | null;
+  /** Temperature the value belongs to, where it matters. [degC] */
+  readonly temperature: number | null;
+  readonly note: string | null;
+}
+
+export interface CompositionRecord {
+  readonly source: string;
+  readonly at: string;
+  readonly how: How;
+  /** Percent of total fatty acids; `min` null means not stated (reckoned as 0). */
+  readonly acids: readonly { readonly acid: string; readonly min: number | null; readonly max: number }[];
+  readonly note: string | null;
+}
+
+export interface FatRecord {
+  readonly id: string;
+  readonly file: string;
+  readonly name: string;
+  readonly inci: string;
+  readonly kind: Fat['kind'];
+  readonly origin: 'plant' | 'animal';
+  /** Of the oil palm: what "palm-free" looks at. */
+  readonly palm: boolean;
+  /** Allergen source words for label and cautions: `tree nuts`, `peanut`, `soy`, `sesame`, `milk`, `wheat`. */
+  readonly allergens: readonly string[];
+  readonly saponificationValues: readonly ValueRecord[];
+  readonly acidValues: readonly ValueRecord[];
+  readonly iodineValues: readonly ValueRecord[];
+  readonly relativeDensities: readonly ValueRecord[];
+  readonly unsaponifiableMatter: readonly ValueRecord[];
+  readonly compositions: readonly CompositionRecord[];
+  readonly notes: readonly string[];
+  /** The records that won by the order of choice, to be named wherever the number is used. */
+  readonly chosen: {
+    readonly saponificationValue: ValueRecord | null;
+    /** A documented mean of samples that lowers the value used below the middle of the range. */
+    readonly loweredBy: ValueRecord | null;
+    readonly iodineValue: ValueRecord | null;
+    readonly composition: CompositionRecord | null;
+    readonly unsaponifiable: ValueRecord | null;
+    readonly density: ValueRecord | null;
+  };
+  /** What the core computes with; `null` where no saponification value with a range is known. */
+  readonly core: Fat | null;
+}
+
+export interface AcidRecord {
+  readonly acid: FattyAcid;
+  readonly name: string;
+  readonly systematicName: string;
+  readonly formula: string;
+  readonly iodineFactor: ValueRecord | null;
+  readonly meltingPoint: ValueRecord | null;
+}
+
+export interface AlkaliRecord {
+  readonly id: 'sodium-hydroxide' | 'potassium-hydroxide';
+  readonly name: string;
+  readonly inci: string;
+  readonly formula: string;
+  readonly cation: 'Na' | 'K';
+  readonly assays: readonly ValueRecord[];
+  /** Without a lot: reckoned at the top of the trade range. */
+  readonly trade: AlkaliSupply;
+  readonly notes: readonly string[];
+}
+
+export interface AdditiveRecord {
+  readonly id: string;
+  readonly name: string;
+  readonly inci: string;
+  readonly kind: 'acid' | 'salt' | 'sugar' | 'clay' | 'mineral' | 'colour' | 'fragrance' | 'botanical' | 'antioxidant' | 'chelator' | 'solvent' | 'other';
+  readonly origin: 'plant' | 'animal' | 'mineral' | 'synthetic';
+  readonly allergens: readonly string[];
+  readonly values: readonly (ValueRecord & { readonly name: string })[];
+  readonly notes: readonly string[];
+  readonly core: Additive;
+}
+
+export interface LiquidRecord {
+  readonly id: string;
+  readonly name: string;
+  readonly inci: string;
+  readonly origin: 'plant' | 'animal' | 'mineral';
+  readonly allergens: readonly string[];
+  /** The fat's id, where it carries any. */
+  readonly fat: string | null;
+  /** `water`, `fat`, `sugar`, `acid`, in g per 100 g. */
+  readonly values: readonly (ValueRecord & { readonly name: string })[];
+  readonly notes: readonly string[];
+  readonly core: Liquid;
+}
+
+export interface Scale {
+  readonly id: string;
+  readonly name: string;
+  readonly step: Grams;
+  /** Largest error of one weighing, half-width. */
+  readonly error: Grams;
+  /** Largest weight it takes. */
+  readonly capacity: Grams;
+}
+
+/** A size the shop pours. Exactly one of the four ways to state it. */
+export interface BatchSize {
+  readonly id: string;
+  readonly label: string;
+  readonly size:
+    | { readonly by: 'fats'; readonly mass: Grams }
+    | { readonly by: 'batter'; readonly mass: Grams }
+    | { readonly by: 'bars'; readonly count: number; readonly wetMass: Grams }
+    | { readonly by: 'mould'; readonly millilitres: number };
+  /** Batter that stays in pots and moulds, as a fraction of what is made. */
+  readonly losses: number;
+  /** Scale ids; a weight within the fine scale's capacity is weighed there. */
+  readonly scale: string;
+  readonly fineScale: string | null;
+  readonly kinds: readonly ('bar' | 'paste' | 'liquid')[];
+}
+
+export interface Shop {
+  readonly name: string;
+  readonly invented: boolean;
+  readonly batches: readonly BatchSize[];
+  readonly scales: readonly Scale[];
+  /** Lye water and fats start from here. [degC] */
+  readonly startTemperature: number;
+  /** Water left in a released bar, percent by mass. */
+  readonly releaseMoisture: number;
+  /** How far rounding may move the superfat before a size is too small for the scale. [percentage points] */
+  readonly largestSuperfatShift: number;
+  readonly emergency: readonly { readonly label: string; readonly value: string }[];
+  readonly rules: readonly string[];
+  readonly releaseLimits: readonly ReleaseLimit[];
+}
+
+/** Which end of which interval must stay at or above which floor, for which formulas. The last match wins. */
+export interface ReleaseLimit {
+  readonly kind: 'bar' | 'paste' | 'liquid' | 'any';
+  readonly process: 'cold' | 'hot' | 'any';
+  readonly end: 'expanded' | 'worst-case';
+  /** Percent superfat. */
+  readonly floor: number;
+}
+
+export interface FatLot {
+  readonly fat: string;
+  readonly lot: string;
+  readonly saponificationValue: number;
+  readonly uncertainty: number;
+  readonly method: string;
+  readonly status: 'quarantine' | 'released' | 'rejected';
+  readonly opened: string | null;
+  readonly retestBy: string;
+}
+
+export interface AlkaliLot {
+  readonly alkali: string;
+  readonly lot: string;
+  readonly form: 'solid' | 'solution';
+  /** Percent hydroxide by mass, and the half-width of its k = 2 interval. */
+  readonly assay: number;
+  readonly uncertainty: number;
+  readonly carbonate: number;
+  readonly status: 'quarantine' | 'released' | 'rejected';
+  readonly opened: string | null;
+  readonly retestBy: string;
+}
+
+/** Everything under `data/`, read, checked and turned into what the core takes. */
+export interface Reference {
+  readonly acids: ReadonlyMap<string, AcidRecord>;
+  readonly fats: ReadonlyMap<string, FatRecord>;
+  readonly alkalis: ReadonlyMap<string, AlkaliRecord>;
+  readonly additives: ReadonlyMap<string, AdditiveRecord>;
+  readonly liquids: ReadonlyMap<string, LiquidRecord>;
+  readonly sources: ReadonlyMap<string, Source>;
+  readonly shop: Shop;
+  readonly lots: { readonly fats: readonly FatLot[]; readonly alkalis: readonly AlkaliLot[] };
+}
