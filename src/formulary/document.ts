@@ -19,8 +19,20 @@ export interface FormulaDocument {
   readonly water: number;
   /** Part of `water` that is kept out of the lye and joins later. */
   readonly heldBack: number;
-  readonly liquids: readonly { readonly id: string; readonly at: string; readonly mass: number; readonly water: number; readonly fat: number; readonly sugar: number }[];
-  readonly additives: readonly { readonly id: string; readonly at: string; readonly mass: number; readonly percentOfFats: number }[];
+  readonly liquids: readonly {
+    readonly id: string;
+    readonly at: string;
+    readonly mass: number;
+    readonly water: number;
+    readonly fat: number;
+    readonly sugar: number;
+  }[];
+  readonly additives: readonly {
+    readonly id: string;
+    readonly at: string;
+    readonly mass: number;
+    readonly percentOfFats: number;
+  }[];
   readonly lye: {
     /** Percent: alkali as weighed / (that + all water), by the design's definition. */
     readonly concentration: number;
@@ -51,21 +63,37 @@ export interface FormulaDocument {
   readonly yield: Yield;
   readonly batches: readonly BatchDocument[];
   readonly cautions: readonly CautionDocument[];
-  readonly breaches: readonly { readonly path: string; readonly rule: string; readonly numbers: Readonly<Record<string, number>> }[];
+  readonly breaches: readonly {
+    readonly path: string;
+    readonly rule: string;
+    readonly numbers: Readonly<Record<string, number>>;
+  }[];
 }
 
 export interface FatLine {
   readonly id: string;
   readonly mass: number;
   readonly share: number;
-  readonly saponificationValue: { readonly value: number; readonly low: number; readonly high: number; readonly source: string; readonly lot?: string };
+  readonly saponificationValue: {
+    readonly value: number;
+    readonly low: number;
+    readonly high: number;
+    readonly source: string;
+    readonly lot?: string;
+  };
 }
 
 export interface AlkaliLine {
   readonly id: string;
   readonly moles: number;
   readonly pureMass: number;
-  readonly assay: { readonly value: number; readonly low: number; readonly high: number; readonly source?: string; readonly lot?: string };
+  readonly assay: {
+    readonly value: number;
+    readonly low: number;
+    readonly high: number;
+    readonly source?: string;
+    readonly lot?: string;
+  };
   readonly form: 'solid' | 'solution';
   readonly weighedMass: number;
 }
@@ -129,7 +157,10 @@ export interface BatchDocument {
   } | null;
   readonly bars: number | null;
   /** Why there are no weights: the breach. The arrays above are then empty. */
-  readonly refused: { readonly rule: string; readonly numbers: Readonly<Record<string, number>> } | null;
+  readonly refused: {
+    readonly rule: string;
+    readonly numbers: Readonly<Record<string, number>>;
+  } | null;
 }
 
 export interface WeighedLine {

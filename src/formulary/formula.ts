@@ -14,7 +14,11 @@ export interface Formula {
   readonly fats: readonly { readonly fat: string; readonly share: number }[];
   readonly afterCookFats: readonly { readonly fat: string; readonly percentOfFats: number }[];
   /** Percent of each alkali; `basis` matters only where both are there. */
-  readonly alkali: { readonly sodium: number; readonly potassium: number; readonly basis: 'moles' | 'mass' };
+  readonly alkali: {
+    readonly sodium: number;
+    readonly potassium: number;
+    readonly basis: 'moles' | 'mass';
+  };
   /** Percent. */
   readonly superfat: number;
   readonly water: {
@@ -23,11 +27,23 @@ export interface Formula {
     /** Percent of the water to add. */
     readonly holdBack: number;
   };
-  readonly liquids: readonly { readonly liquid: string; readonly replacesWater: number; readonly at: Stage }[];
-  readonly additives: readonly { readonly additive: string; readonly percentOfFats: number; readonly at: Stage }[];
+  readonly liquids: readonly {
+    readonly liquid: string;
+    readonly replacesWater: number;
+    readonly at: Stage;
+  }[];
+  readonly additives: readonly {
+    readonly additive: string;
+    readonly percentOfFats: number;
+    readonly at: Stage;
+  }[];
   readonly targets: {
     /** `fats`, `lye`, `combine`, `unmould`, `cure`, `cook`: what the file says, parsed with its unit. */
-    readonly [name: string]: { readonly min: number; readonly max: number; readonly unit: 'C' | 'h' | 'd' | 'min' };
+    readonly [name: string]: {
+      readonly min: number;
+      readonly max: number;
+      readonly unit: 'C' | 'h' | 'd' | 'min';
+    };
   };
   readonly release: {
     readonly freeAlkali: number | null;
@@ -37,7 +53,11 @@ export interface Formula {
   /** Batch ids; `null` takes all of the shop's that suit the kind. */
   readonly batches: readonly string[] | null;
   readonly tags: readonly string[];
-  readonly changes: readonly { readonly revision: number; readonly on: string; readonly note: string }[];
+  readonly changes: readonly {
+    readonly revision: number;
+    readonly on: string;
+    readonly note: string;
+  }[];
   readonly approval: {
     readonly by: string;
     readonly on: string;

@@ -2,7 +2,13 @@ import type { Additive, AlkaliSupply, Fat, FattyAcid, Liquid } from '../chemistr
 import type { Grams } from '../chemistry/quantity.ts';
 
 /** How a value is known. `from memory` is said wherever the value is shown. */
-export type How = 'measured' | 'standard' | 'handbook' | 'supplier' | 'common practice' | 'from memory';
+export type How =
+  | 'measured'
+  | 'standard'
+  | 'handbook'
+  | 'supplier'
+  | 'common practice'
+  | 'from memory';
 
 /** One publication or other origin of values, from `data/sources.yaml`. */
 export interface Source {
@@ -52,7 +58,11 @@ export interface CompositionRecord {
   readonly at: string;
   readonly how: How;
   /** Percent of total fatty acids; `min` null means not stated (reckoned as 0). */
-  readonly acids: readonly { readonly acid: string; readonly min: number | null; readonly max: number }[];
+  readonly acids: readonly {
+    readonly acid: string;
+    readonly min: number | null;
+    readonly max: number;
+  }[];
   readonly note: string | null;
 }
 
@@ -113,7 +123,19 @@ export interface AdditiveRecord {
   readonly id: string;
   readonly name: string;
   readonly inci: string;
-  readonly kind: 'acid' | 'salt' | 'sugar' | 'clay' | 'mineral' | 'colour' | 'fragrance' | 'botanical' | 'antioxidant' | 'chelator' | 'solvent' | 'other';
+  readonly kind:
+    | 'acid'
+    | 'salt'
+    | 'sugar'
+    | 'clay'
+    | 'mineral'
+    | 'colour'
+    | 'fragrance'
+    | 'botanical'
+    | 'antioxidant'
+    | 'chelator'
+    | 'solvent'
+    | 'other';
   readonly origin: 'plant' | 'animal' | 'mineral' | 'synthetic';
   readonly allergens: readonly string[];
   readonly values: readonly (ValueRecord & { readonly name: string })[];
