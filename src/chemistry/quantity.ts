@@ -31,6 +31,11 @@ export interface Range<Q extends number> {
   readonly value: Q;
   readonly low: Q;
   readonly high: Q;
+  /**
+   * What the interval is: every value in it equally likely (a published or trade range, the default), or
+   * the expanded uncertainty, k = 2, of a measured value.
+   */
+  readonly spread?: 'rectangular' | 'expanded';
 }
 
 /** Out of a model's range: names the rule that was left and the numbers that show it. */
