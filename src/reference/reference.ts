@@ -1,4 +1,14 @@
-import type { Additive, AlkaliSupply, Fat, FattyAcid, Liquid } from '../chemistry/materials.ts';
+import type { Constants } from '../chemistry/constants.ts';
+import type { Curve } from '../chemistry/interpolate.ts';
+import type { LyeHeatTables } from '../chemistry/lye-heat.ts';
+import type {
+  Additive,
+  AlkaliSupply,
+  Cation,
+  Fat,
+  FattyAcid,
+  Liquid,
+} from '../chemistry/materials.ts';
 import type { Grams } from '../chemistry/quantity.ts';
 
 /** How a value is known. `from memory` is said wherever the value is shown. */
@@ -235,6 +245,14 @@ export interface AlkaliLot {
 
 /** Everything under `data/`, read, checked and turned into what the core takes. */
 export interface Reference {
+  /** Derived from `elements.yaml` by `constantsFrom`. */
+  readonly constants: Constants;
+  /** From `data/tables/`, ready for the models. */
+  readonly tables: {
+    readonly lyeHeat: Readonly<Record<Cation, LyeHeatTables>>;
+    /** Density at 20 degC [g/mL] by mass percent of hydroxide. */
+    readonly lyeDensity: Readonly<Record<Cation, Curve>>;
+  };
   readonly acids: ReadonlyMap<string, AcidRecord>;
   readonly fats: ReadonlyMap<string, FatRecord>;
   readonly alkalis: ReadonlyMap<string, AlkaliRecord>;
