@@ -39,7 +39,11 @@ export interface FormulaDocument {
     /** Percent: the same with held-back water and liquids that join later left out. */
     readonly asMade: number;
     readonly peakTemperature: number | null;
-    readonly peakTemperatureSpread?: readonly [number, number];
+    /** Coolest and hottest data set. */
+    readonly peakTemperatureSpread: readonly [number, number] | null;
+    readonly boilingPoint: number | null;
+    /** Percent hydroxide in hydroxide and water, in the pot. */
+    readonly pureAsMade: number;
   };
   readonly equivalents: {
     /** mol per 1000 g of fats. */
@@ -59,6 +63,8 @@ export interface FormulaDocument {
     /** Contributions to the expanded interval, largest first; half-widths at k = 2 in percentage points. */
     readonly budget: readonly { readonly id: string; readonly halfWidth: number }[];
   };
+  /** The shop's release limit for this kind and process, and whether formula and batches keep it. */
+  readonly release: ReleaseCheck;
   readonly profile: Profile | null;
   readonly yield: Yield;
   readonly batches: readonly BatchDocument[];
@@ -68,6 +74,18 @@ export interface FormulaDocument {
     readonly rule: string;
     readonly numbers: Readonly<Record<string, number>>;
   }[];
+}
+
+export interface ReleaseCheck {
+  readonly end: 'expanded' | 'worst-case';
+  /** Percent superfat. */
+  readonly floor: number;
+  /** The lowest such end over the formula and its batches, and where it was found. */
+  readonly lowest: number;
+  readonly batch: string | null;
+  readonly met: boolean;
+  /** Permission to publish below the limit (ISO 9000 sense). */
+  readonly concession: { readonly reason: string; readonly by: string; readonly on: string } | null;
 }
 
 export interface FatLine {
@@ -138,7 +156,7 @@ export interface Yield {
 export interface BatchDocument {
   readonly id: string;
   readonly label: string;
-  readonly digest: string;
+  readonly digest: string | null;
   /** g between two marks of the scale, per line below as `step`. */
   readonly fats: readonly WeighedLine[];
   readonly afterCookFats: readonly WeighedLine[];
@@ -148,6 +166,8 @@ export interface BatchDocument {
   readonly weighedHeldBack: number | null;
   readonly liquids: readonly (WeighedLine & { readonly at: string })[];
   readonly additives: readonly (WeighedLine & { readonly at: string })[];
+  /** Mass of the fats that the alkali is reckoned on, as weighed. */
+  readonly massOfFats: number | null;
   /** Mass of all that is weighed. */
   readonly total: number | null;
   readonly superfat: {

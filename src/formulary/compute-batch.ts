@@ -1,0 +1,125 @@
+import { massIn } from '../chemistry/balance.ts';
+import { massOfFatsFor } from '../chemistry/batch-size.ts';
+import type { Charge } from '../chemistry/charge.ts';
+import { superfatMargin } from '../chemistry/margin.ts';
+import { type Breach, type Grams, grams, type Outcome, refused } from '../chemistry/quantity.ts';
+import { reckon } from '../chemistry/reckon.ts';
+import { type WeighedCharge, weigh } from '../chemistry/weigh.ts';
+import type { BatchSize, Reference, Scale } from '../reference/reference.ts';
+import type { BatchDocument } from './document.ts';
+import { percentRange } from './percent-range.ts';
+
+/** One batch size of a formula: rounded weights with their margin, or the reason why there are none. */
+export function computeBatch(
+  charge: Charge,
+  batch: BatchSize,
+  reference: Reference,
+): BatchDocument {
+  const weighed = weighBatch(charge, batch, reference);
+  if (!weighed.ok) return refusedBatch(batch, weighed.breach);
+  const { charge: rounded, steps, superfat, weighing } = weighed.value;
+  const margin = superfatMargin(rounded, reference.constants, weighing);
+  return {
+    id: batch.id,
+    label: batch.label,
+    digest: null,
+    fats: rounded.fats.map(({ fat, mass }, i) => line(fat.id, mass, steps.fats[i])),
+    afterCookFats: rounded.afterCookFats.map(({ fat, mass }, i) =>
+      line(fat.id, mass, steps.afterCookFats[i]),
+    ),
+    alkali: rounded.alkali.map(({ supply, weighedMass }, i) =>
+      line(supply.id, weighedMass, steps.alkali[i]),
+    ),
+    weighedWater: rounded.water,
+    waterStep: steps.water,
+    weighedHeldBack: rounded.heldBack,
+    liquids: rounded.liquids.map(({ liquid, mass, at }, i) => ({
+      ...line(liquid.id, mass, steps.liquids[i]),
+      at,
+    })),
+    additives: rounded.additives.map(({ additive, mass, at }, i) => ({
+      ...line(additive.id, mass, steps.additives[i]),
+      at,
+    })),
+    massOfFats: rounded.fats.reduce((sum, { mass }) => sum + mass, 0),
+    total: massIn(rounded),
+    superfat: {
+      weighed: superfat * 100,
+      expanded: percentRange(margin.expanded),
+      worstCase: percentRange(margin.worstCase),
+    },
+    bars: batch.size.by === 'bars' ? batch.size.count : null,
+    refused: null,
+  };
+}
+
+const line = (id: string, weighedMass: number, step = 0) => ({ id, weighedMass, step });
+
+/** The core's answer for one batch size, before it is put into words. */
+export function weighBatch(
+  charge: Charge,
+  batch: BatchSize,
+  reference: Reference,
+): Outcome<WeighedCharge> {
+  const fats = massOfFatsFor(batch.size, charge, batch.losses, reference.tables.lyeDensity);
+  if (!fats.ok) return fats;
+  const scaled = reckon(charge.formulation, fats.value, reference.constants);
+  if (!scaled.ok) return scaled;
+  const scales = batchScales(batch, reference.shop.scales);
+  if (!scales.ok) return scales;
+  const { main, fine } = scales.value;
+  const heaviest = heaviestWeighing(scaled.value);
+  if (heaviest > main.capacity) {
+    return refused('weight-above-scale-capacity', { mass: heaviest, capacity: main.capacity });
+  }
+  return weigh(
+    scaled.value,
+    (mass) => (fine && mass <= fine.capacity ? fine : main),
+    reference.shop.largestSuperfatShift / 100,
+    reference.constants,
+  );
+}
+
+function batchScales(
+  batch: BatchSize,
+  scales: readonly Scale[],
+): Outcome<{ readonly main: Scale; readonly fine: Scale | null }> {
+  const main = scales.find(({ id }) => id === batch.scale);
+  if (!main) return refused('scale-not-known');
+  return {
+    ok: true,
+    value: { main, fine: scales.find(({ id }) => id === batch.fineScale) ?? null },
+  };
+}
+
+function heaviestWeighing(charge: Charge): Grams {
+  return grams(
+    Math.max(
+      charge.water,
+      ...charge.fats.map(({ mass }) => mass),
+      ...charge.alkali.map(({ weighedMass }) => weighedMass),
+      ...charge.liquids.map(({ mass }) => mass),
+    ),
+  );
+}
+
+function refusedBatch(batch: BatchSize, breach: Breach): BatchDocument {
+  return {
+    id: batch.id,
+    label: batch.label,
+    digest: null,
+    fats: [],
+    afterCookFats: [],
+    alkali: [],
+    weighedWater: null,
+    waterStep: 0,
+    weighedHeldBack: null,
+    liquids: [],
+    additives: [],
+    massOfFats: null,
+    total: null,
+    superfat: null,
+    bars: null,
+    refused: breach,
+  };
+}

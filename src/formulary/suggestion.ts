@@ -1,0 +1,42 @@
+import { distance } from 'fastest-levenshtein';
+
+/** Ids, each with the name people know it by. A map of records is one. */
+export type Candidates = Iterable<readonly [string, { readonly name: string }]>;
+
+/** Words that have no other name. */
+export const words = (list: readonly string[]): Candidates =>
+  list.map((word) => [word, { name: word }] as const);
+
+/**
+ * `did you mean "coconut"?`, or `otherwise` where nothing is near. An id in other letters, a name in place
+ * of an id, and a slip of a few letters are recognised.
+ */
+export function suggestion(found: string, candidates: Candidates, otherwise: string): string {
+  const nearest = nearestId(found, candidates);
+  return nearest === null ? otherwise : `did you mean "${nearest}"?`;
+}
+
+function nearestId(found: string, candidates: Candidates): string | null {
+  const wanted = plain(found);
+  if (wanted === '') return null;
+  let nearest: string | null = null;
+  // a third of the letters may differ: more than that is another word
+  let limit = Math.max(1, Math.floor(wanted.length / 3)) + 1;
+  for (const [id, { name }] of candidates) {
+    for (const form of [plain(id), plain(name), plain(name).replace(/-(oil|butter|fat)\b.*/, '')]) {
+      const difference = distance(wanted, form);
+      if (difference < limit) {
+        nearest = id;
+        limit = difference;
+      }
+    }
+  }
+  return nearest;
+}
+
+function plain(text: string): string {
+  return text
+    .toLowerCase()
+    .replaceAll(/[^\p{L}\p{N}]+/gu, '-')
+    .replaceAll(/^-|-$/g, '');
+}
