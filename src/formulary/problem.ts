@@ -1,14 +1,2 @@
-/** Something wrong in a file, as data. The text is made at the edge, from `src/words`. */
-export interface Problem {
-  /** Permanent id, `formula/unknown-fat`; every id has an entry in `src/words/problems.ts`. */
-  readonly rule: string;
-  readonly severity: 'error' | 'warning';
-  /** Path as the user would type it, relative to the folder the command ran in where possible. */
-  readonly file: string;
-  /** 1-based; 1:1 where the whole file is meant. */
-  readonly line: number;
-  readonly column: number;
-  readonly found: string;
-  readonly expected: string;
-  readonly advice: string;
-}
+/** Defined where the first reader of files needs it; named here for all that come after. */
+export type { Problem } from '../reference/problem.ts';
