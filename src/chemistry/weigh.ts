@@ -1,6 +1,7 @@
 import type { Charge } from './charge.ts';
 import type { Constants } from './constants.ts';
 import type { WeighingError } from './margin.ts';
+import type { Stage } from './materials.ts';
 import { type Grams, given, grams, type Outcome, refused } from './quantity.ts';
 import { isBeforeSaponification } from './saponification.ts';
 import { AS_USED, equivalentsOf, superfatFrom } from './superfat.ts';
@@ -45,11 +46,16 @@ export function weigh(
   const nearest = (mass: Grams) => round(mass, scaleFor(mass), Math.round);
   const fats = charge.fats.map((line) => ({ line, ...nearest(line.mass) }));
   const afterCookFats = charge.afterCookFats.map((line) => ({ line, ...nearest(line.mass) }));
-  const liquids = charge.liquids.map((line) => ({ line, ...nearest(line.mass) }));
-  const additives = charge.additives.map((line) => {
-    const isAcid = line.additive.acidity > 0 && isBeforeSaponification(line.at);
-    return { line, ...round(line.mass, scaleFor(line.mass), isAcid ? ceilOfSteps : Math.round) };
-  });
+  const acidsUp = (acidity: number, at: Stage) =>
+    acidity > 0 && isBeforeSaponification(at) ? ceilOfSteps : Math.round;
+  const liquids = charge.liquids.map((line) => ({
+    line,
+    ...round(line.mass, scaleFor(line.mass), acidsUp(line.liquid.acidity, line.at)),
+  }));
+  const additives = charge.additives.map((line) => ({
+    line,
+    ...round(line.mass, scaleFor(line.mass), acidsUp(line.additive.acidity, line.at)),
+  }));
   const alkali = charge.alkali.map((line) => ({
     line,
     ...round(line.weighedMass, scaleFor(line.weighedMass), floorOfSteps),
@@ -65,12 +71,12 @@ export function weigh(
 
   const rounded = (): Charge => ({
     ...charge,
-    fats: fats.map(({ line, mass }) => ({ ...line, mass: mass() })),
-    afterCookFats: afterCookFats.map(({ line, mass }) => ({ ...line, mass: mass() })),
-    liquids: liquids.map(({ line, mass }) => ({ ...line, mass: mass() })),
-    additives: additives.map(({ line, mass }) => ({ ...line, mass: mass() })),
+    fats: fats.map((entry) => ({ ...entry.line, mass: massOf(entry) })),
+    afterCookFats: afterCookFats.map((entry) => ({ ...entry.line, mass: massOf(entry) })),
+    liquids: liquids.map((entry) => ({ ...entry.line, mass: massOf(entry) })),
+    additives: additives.map((entry) => ({ ...entry.line, mass: massOf(entry) })),
     alkali: alkali.map((entry) => {
-      const weighedMass = entry.mass();
+      const weighedMass = massOf(entry);
       const pureMass = grams(weighedMass * entry.line.supply.assay.value);
       return {
         ...entry.line,
@@ -79,8 +85,8 @@ export function weigh(
         moles: (pureMass / constants.hydroxide[entry.line.supply.cation]) as never,
       };
     }),
-    water: grams(inLye.mass() + heldBack.mass()),
-    heldBack: heldBack.mass(),
+    water: grams(massOf(inLye) + massOf(heldBack)),
+    heldBack: massOf(heldBack),
   });
 
   const written = charge.formulation.superfat;
@@ -128,7 +134,6 @@ interface Rounded {
   /** Half a step of reading plus the scale's own error. [g] */
   readonly doubt: number;
   steps: number;
-  mass(): Grams;
 }
 
 function round(exact: Grams, scale: ScaleReading, how: (steps: number) => number): Rounded {
@@ -137,16 +142,11 @@ function round(exact: Grams, scale: ScaleReading, how: (steps: number) => number
     step: scale.step,
     doubt: scale.step / 2 + scale.error,
     steps: how(exact / scale.step),
-    mass() {
-      return massOfSteps(this.steps, scale.step);
-    },
   };
 }
 
 /** 3 x 0.1 is 0.30000000000000004 in binary; the sheet says 0.3 and so does the mass. */
-function massOfSteps(steps: number, step: number): Grams {
-  return grams(Number((steps * step).toPrecision(12)));
-}
+const massOf = ({ steps, step }: Rounded): Grams => grams(Number((steps * step).toPrecision(12)));
 
 // a mass that is a whole number of steps but for the last bit must not lose or gain one
 const floorOfSteps = (steps: number) => Math.floor(steps + 1e-9);
