@@ -1,10 +1,6 @@
+import type { Place, ReadYaml } from '../reference/yaml.ts';
 import type { FormulaRule } from '../words/en/problems-formula.ts';
 import type { Problem } from './problem.ts';
-
-export interface Place {
-  readonly line: number;
-  readonly column: number;
-}
 
 /** Where a value stands in the frontmatter: `['fats', 0, 'share']`. */
 export type Path = readonly (string | number)[];
@@ -23,15 +19,25 @@ export interface Report {
   at(place: Place, rule: FormulaRule, parts: ProblemParts): void;
   /** At a value of the frontmatter; where it is absent, at the nearest that holds it. */
   in(path: Path, rule: FormulaRule, parts: ProblemParts): void;
+  /** At a key of the frontmatter. */
+  inKey(path: Path, rule: FormulaRule, parts: ProblemParts): void;
 }
 
-/** A report for `file`; `placeOf` finds the frontmatter's values. */
-export function reportOn(file: string, placeOf: (path: Path) => Place): Report {
+/** A report for `file`, whose frontmatter knows its places. */
+export function reportOn(
+  file: string,
+  { placeOf, placeOfKey }: Pick<ReadYaml, 'placeOf' | 'placeOfKey'>,
+): Report {
   const problems: Problem[] = [];
   const at: Report['at'] = (place, rule, parts) => {
     problems.push(formulaProblem(file, place, rule, parts));
   };
-  return { problems, at, in: (path, rule, parts) => at(placeOf(path), rule, parts) };
+  return {
+    problems,
+    at,
+    in: (path, rule, parts) => at(placeOf(path), rule, parts),
+    inKey: (path, rule, parts) => at(placeOfKey(path), rule, parts),
+  };
 }
 
 /** One problem by itself. The type of `rule` is what keeps every id in the catalogue. */

@@ -16,7 +16,8 @@ export function suggestion(found: string, candidates: Candidates, otherwise: str
   return nearest === null ? otherwise : `did you mean "${nearest}"?`;
 }
 
-function nearestId(found: string, candidates: Candidates): string | null {
+/** The id that a slip was meant to be, or `null`. */
+export function nearestId(found: string, candidates: Candidates): string | null {
   const wanted = plain(found);
   if (wanted === '') return null;
   let nearest: string | null = null;

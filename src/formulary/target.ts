@@ -1,0 +1,41 @@
+import type { Formula } from './formula.ts';
+
+export type Target = Formula['targets'][string];
+
+/** What a target is of, the units it may have, and its sane range in the first of them. */
+export const TARGETS = {
+  fats: { of: 'temperature', low: -5, high: 120 },
+  lye: { of: 'temperature', low: -5, high: 120 },
+  combine: { of: 'temperature', low: -5, high: 120 },
+  cook: { of: 'time', low: 5 / 60, high: 48 },
+  unmould: { of: 'time', low: 0.25, high: 24 * 21 },
+  cure: { of: 'time', low: 0, high: 24 * 1100 },
+} as const;
+export type TargetName = keyof typeof TARGETS;
+
+const HOURS = { h: 1, d: 24, min: 1 / 60 } as const;
+const FORM = /^(-?\d+(?:\.\d+)?)(?: ?[-–] ?(-?\d+(?:\.\d+)?))? ?(°?C|h|d|min)$/;
+
+/** `38 C`, `35-40 C`, `24 h`, `42 d`, `90 min`; `null` for anything else. */
+export function parseTarget(text: string): Target | null {
+  const match = FORM.exec(text.trim());
+  if (!match) return null;
+  const [, first, second, unit] = match;
+  return {
+    min: Number(first),
+    max: Number(second ?? first),
+    unit: (unit === '°C' ? 'C' : unit) as Target['unit'],
+  };
+}
+
+/** Whether the unit is one for this target. */
+export function suits(name: TargetName, { unit }: Target): boolean {
+  return (TARGETS[name].of === 'temperature') === (unit === 'C');
+}
+
+/** Whether the target lies in its sane range, its lower end first. */
+export function isSane(name: TargetName, { min, max, unit }: Target): boolean {
+  const { low, high } = TARGETS[name];
+  const factor = unit === 'C' ? 1 : HOURS[unit];
+  return min <= max && min * factor >= low && max * factor <= high;
+}

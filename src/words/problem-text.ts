@@ -1,0 +1,45 @@
+/** What a problem has to say of itself; the shape of `Problem` without an import from further right. */
+interface ProblemWords {
+  readonly rule: string;
+  readonly severity: 'error' | 'warning';
+  readonly file: string;
+  readonly line: number;
+  readonly column: number;
+  readonly found: string;
+  readonly expected: string;
+  readonly advice: string;
+}
+
+/**
+ * One line for one problem:
+ * `formulas/x.md:6:12  Found fat "cocnut", expected an id from data/fats; did you mean "coconut"?  [rule]`
+ */
+export function problemText(problem: ProblemWords): string {
+  const { file, line, column, found, expected, advice, rule, severity } = problem;
+  const parts = [`Found ${found}`];
+  if (expected !== '') parts.push(`, expected ${expected}`);
+  if (advice !== '') parts.push(`; ${advice}`);
+  const sentence = parts.join('');
+  const end = /[.?!]$/.test(sentence) ? '' : '.';
+  const warning = severity === 'warning' ? 'Warning: ' : '';
+  return `${file}:${line}:${column}  ${warning}${sentence}${end}  [${rule}]`;
+}
+
+/** `3 errors and 1 warning in 2 files`, or `no problems`. */
+export function problemSummary(problems: readonly ProblemWords[]): string {
+  const errors = problems.filter(({ severity }) => severity === 'error').length;
+  const warnings = problems.length - errors;
+  const files = new Set(problems.map(({ file }) => file)).size;
+  const counts = [
+    ...(errors > 0 ? [counted(errors, 'error')] : []),
+    ...(warnings > 0 ? [counted(warnings, 'warning')] : []),
+  ];
+  return counts.length === 0
+    ? 'no problems'
+    : `${counts.join(' and ')} in ${counted(files, 'file')}`;
+}
+
+/** `1 file`, `2 files`. */
+export function counted(count: number, noun: string): string {
+  return `${count} ${noun}${count === 1 ? '' : 's'}`;
+}
