@@ -64,6 +64,7 @@ export function assembleFormula(
         }
       : null,
     concession: front.concession ?? null,
+    withdrawn: front.withdrawn ?? null,
     ...text,
   };
 }

@@ -65,6 +65,8 @@ export interface Formula {
     readonly fingerprint: string;
   } | null;
   readonly concession: { readonly reason: string; readonly by: string; readonly on: string } | null;
+  /** Taken out of use: the handbook says so and gives no weights. */
+  readonly withdrawn: { readonly on: string; readonly reason: string; readonly by: string } | null;
   /** The Markdown after the frontmatter, as mdast with positions in the file; directives are `textDirective` nodes. */
   readonly method: Root;
   readonly methodText: string;

@@ -9,15 +9,19 @@ import type { Problem } from './problem.ts';
 import { type FormulaRead, readFormula } from './read-formula.ts';
 import { formulaProblem, type ProblemParts } from './report.ts';
 
+export interface FormulasRead {
+  readonly formulas: readonly Formula[];
+  readonly problems: readonly Problem[];
+  /** All codes as written, also of formulas that are not sound. */
+  readonly codes: readonly string[];
+}
+
 /**
  * Reads every Markdown file directly in `folder` and holds the files against each other. Problems name the
  * files by `folder` and name, so give `folder` as its user would type it. `known` null: the data cannot be
  * read, and ids are not looked up. Never throws for bad input.
  */
-export function readFormulas(
-  folder: string,
-  known: Known | null,
-): { readonly formulas: readonly Formula[]; readonly problems: readonly Problem[] } {
+export function readFormulas(folder: string, known: Known | null): FormulasRead {
   const names = listFolder(folder);
   if (names === null) return refusedFolder(folder, 'formulary/missing-folder', 'no such folder');
   const formulaNames = names.filter((name) => /\.md$/i.test(name));
@@ -35,6 +39,7 @@ export function readFormulas(
   return {
     formulas: reads.flatMap(({ read }) => read.formula ?? []),
     problems: [...reads.flatMap(({ read }) => read.problems), ...checkAcross(reads)],
+    codes: reads.flatMap(({ read }) => read.code?.text ?? []),
   };
 }
 
@@ -51,13 +56,13 @@ function listFolder(folder: string): readonly string[] | null {
   }
 }
 
-function refusedFolder(folder: string, rule: FormulaRule, found: string) {
+function refusedFolder(folder: string, rule: FormulaRule, found: string): FormulasRead {
   const { problems } = refused(folder, rule, {
     found,
     expected: 'a folder with one Markdown file for each formula',
     advice: 'name the folder with --formulas, or begin with npm run new',
   });
-  return { formulas: [], problems };
+  return { formulas: [], problems, codes: [] };
 }
 
 function refused(

@@ -191,12 +191,12 @@ export const frontmatterSchema = z.strictObject({
       on: date,
       'review-by': date,
       fingerprint: demanding(z.string(), (text) =>
-        /^[0-9a-z]{4}(-[0-9a-z]{4}){2}$/.test(text)
+        /^([0-9a-hjkmnp-tv-z]{4}-){3}[0-9a-hjkmnp-tv-z]$/.test(text)
           ? null
           : {
               rule: 'formula/fingerprint-form',
               found: `fingerprint "${text}"`,
-              expected: 'three groups of four letters and digits, as 4f2a-91c0-7be3',
+              expected: 'three groups of four letters and digits and one more, as 4f2a-91c0-7be4-k',
               advice: 'let the approval be written by the command, not by hand',
             },
       ),
@@ -204,6 +204,9 @@ export const frontmatterSchema = z.strictObject({
     .optional(),
   concession: z
     .strictObject({ reason: line('reason', 300), by: line('by', 120), on: date })
+    .optional(),
+  withdrawn: z
+    .strictObject({ on: date, reason: line('reason', 300), by: line('by', 120) })
     .optional(),
 });
 

@@ -2,6 +2,7 @@ import type { Place } from '../../reference/yaml.ts';
 import type { Problem } from '../problem.ts';
 import type { FormulaRead } from '../read-formula.ts';
 import { formulaProblem } from '../report.ts';
+import { sameCode } from '../same-code.ts';
 import { suggestion, words } from '../suggestion.ts';
 
 /** What can only be seen with all files at hand: one code is one formula, and links find theirs. */
@@ -42,6 +43,3 @@ export function checkAcross(
   }
   return problems;
 }
-
-/** `qy-14` and `QY-014` look like one code on a shelf, and are one file name on some disks. */
-const sameCode = (code: string) => code.toUpperCase().replace(/-0+(?=\d)/, '-');

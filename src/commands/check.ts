@@ -1,0 +1,30 @@
+import { loadFormulary } from '../formulary/load.ts';
+import { counted, problemSummary, problemText } from '../words/problem-text.ts';
+import { FOLDERS, readArguments } from './arguments.ts';
+
+/** Finds all problems of formulas and data, without building anything. Status 1 where there is an error. */
+export function main(args: readonly string[]): number {
+  const read = readArguments(args, {
+    command: 'check',
+    about: 'Finds all problems of the formulas and the data.',
+    options: FOLDERS,
+  });
+  if (!read.ok) {
+    console.error(read.text);
+    return read.status;
+  }
+  const start = performance.now();
+  const { formulas = 'formulas', data = 'data' } = read.given;
+  const loaded = loadFormulary({ formulas, data });
+  for (const problem of loaded.problems) console.error(problemText(problem));
+  const counts = loaded.ok
+    ? [
+        counted(loaded.formulary.formulas.length, 'formula'),
+        counted(loaded.formulary.reference.fats.size, 'fat'),
+        problemSummary(loaded.problems),
+      ]
+    : [problemSummary(loaded.problems)];
+  const seconds = ((performance.now() - start) / 1000).toFixed(1);
+  console.log(`${counts.join(', ')} (${seconds} s)`);
+  return loaded.ok ? 0 : 1;
+}
