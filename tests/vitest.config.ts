@@ -1,10 +1,22 @@
 import { defineConfig } from 'vitest/config';
 
+/** Tests that look at the built site, in a browser or as files, share one build of the demo. */
+const SITE = ['tests/browser/**/*.test.ts', 'tests/built/**/*.test.ts'];
+
 export default defineConfig({
   test: {
-    include: ['tests/**/*.test.ts'],
     testTimeout: 30_000,
     hookTimeout: 180_000,
-    reporters: ['default'],
+    reporters: ['default', ['json', { outputFile: '.cache/test-results.json' }]],
+    projects: [
+      {
+        extends: true,
+        test: { name: 'unit', include: ['tests/**/*.test.ts'], exclude: SITE },
+      },
+      {
+        extends: true,
+        test: { name: 'site', include: SITE, globalSetup: ['tests/support/build-once.ts'] },
+      },
+    ],
   },
 });
