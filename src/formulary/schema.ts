@@ -1,6 +1,7 @@
 import { z } from 'zod';
-import { date, demanding, filled, line, within } from './schema-values.ts';
-import { isSane, parseTarget, suits, TARGETS, type TargetName } from './target.ts';
+import { recordSchemas, revision } from './schema-record.ts';
+import { releaseSchema, targetsSchema } from './schema-targets.ts';
+import { demanding, filled, line, within } from './schema-values.ts';
 
 const STAGES = ['lye', 'fats', 'trace', 'after-cook', 'dilution'] as const;
 const percentOfFats = within('formula/percent-range', 'percent-of-fats', {
@@ -8,30 +9,6 @@ const percentOfFats = within('formula/percent-range', 'percent-of-fats', {
   high: 100,
   above: true,
 });
-
-const target = (name: TargetName) =>
-  demanding(z.string(), (text) => {
-    const { of, low, high } = TARGETS[name];
-    const unit = of === 'temperature' ? 'C' : 'h';
-    const parsed = parseTarget(text);
-    if (!parsed || !suits(name, parsed)) {
-      return {
-        rule: 'formula/target-form',
-        found: `${name} "${text}"`,
-        expected:
-          of === 'temperature'
-            ? 'degrees Celsius as 38 C or 35-40 C'
-            : 'a time as 90 min, 24 h, 24-36 h or 42 d',
-      };
-    }
-    return isSane(name, parsed)
-      ? null
-      : {
-          rule: 'formula/target-range',
-          found: `${name} ${text}`,
-          expected: `${Math.round(low * 100) / 100} to ${high} ${unit}, the lower end first`,
-        };
-  }).optional();
 
 /**
  * The frontmatter, key by key. Strict: a key that is not here is an error. Ids are looked up elsewhere,
@@ -51,15 +28,7 @@ export const frontmatterSchema = z.strictObject({
   name: line('name', 80),
   kind: z.enum(['bar', 'paste', 'liquid']),
   process: z.enum(['cold', 'hot']),
-  revision: demanding(z.number(), (value) =>
-    Number.isInteger(value) && value >= 1 && value <= 9999
-      ? null
-      : {
-          rule: 'formula/revision-range',
-          found: `revision ${value}`,
-          expected: 'a whole number from 1 to 9999',
-        },
-  ),
+  revision,
   summary: line('summary', 300).optional(),
   fats: filled(
     'fats',
@@ -97,15 +66,19 @@ export const frontmatterSchema = z.strictObject({
     'a negative superfat leaves free alkali, a large one is a slip',
   ),
   water: z.strictObject({
-    'lye-concentration': within('formula/water-range', 'lye-concentration', {
-      low: 15,
-      high: 50,
-    }).optional(),
+    'lye-concentration': within(
+      'formula/water-range',
+      'lye-concentration',
+      { low: 15, high: 50 },
+      'it is a percentage: 32 for 32 %',
+    ).optional(),
     'per-alkali': within('formula/water-range', 'per-alkali', { low: 1, high: 6 }).optional(),
-    'percent-of-fats': within('formula/water-range', 'percent-of-fats', {
-      low: 10,
-      high: 80,
-    }).optional(),
+    'percent-of-fats': within(
+      'formula/water-range',
+      'percent-of-fats',
+      { low: 10, high: 80 },
+      'it is a percentage: 33 for 33 %',
+    ).optional(),
     'hold-back': within('formula/hold-back-range', 'hold-back', { low: 0, high: 80 }).optional(),
   }),
   liquids: z
@@ -131,37 +104,8 @@ export const frontmatterSchema = z.strictObject({
       }),
     )
     .optional(),
-  targets: z
-    .strictObject({
-      fats: target('fats'),
-      lye: target('lye'),
-      combine: target('combine'),
-      cook: target('cook'),
-      unmould: target('unmould'),
-      cure: target('cure'),
-    })
-    .optional(),
-  release: z
-    .strictObject({
-      'free-alkali': within('formula/release-range', 'free-alkali', {
-        low: 0,
-        high: 1,
-      }).optional(),
-      ph: demanding(z.array(z.number()), (ends) =>
-        ends.length === 2 &&
-        7 <= (ends[0] ?? 0) &&
-        (ends[0] ?? 0) < (ends[1] ?? 0) &&
-        (ends[1] ?? 0) <= 12
-          ? null
-          : {
-              rule: 'formula/release-range',
-              found: `ph [${ends.join(', ')}]`,
-              expected: 'a lower and an upper end from 7 to 12, as [9, 10.5]',
-            },
-      ).optional(),
-      moisture: within('formula/release-range', 'moisture', { low: 0, high: 60 }).optional(),
-    })
-    .optional(),
+  targets: targetsSchema,
+  release: releaseSchema,
   batches: filled('batches', z.string()).optional(),
   tags: z
     .array(
@@ -176,38 +120,7 @@ export const frontmatterSchema = z.strictObject({
       ),
     )
     .optional(),
-  changes: z
-    .array(
-      z.strictObject({
-        revision: z.number(),
-        on: date,
-        note: line('note', 300),
-      }),
-    )
-    .optional(),
-  approval: z
-    .strictObject({
-      by: line('by', 120),
-      on: date,
-      'review-by': date,
-      fingerprint: demanding(z.string(), (text) =>
-        /^([0-9a-hjkmnp-tv-z]{4}-){3}[0-9a-hjkmnp-tv-z]$/.test(text)
-          ? null
-          : {
-              rule: 'formula/fingerprint-form',
-              found: `fingerprint "${text}"`,
-              expected: 'three groups of four letters and digits and one more, as 4f2a-91c0-7be4-k',
-              advice: 'let the approval be written by the command, not by hand',
-            },
-      ),
-    })
-    .optional(),
-  concession: z
-    .strictObject({ reason: line('reason', 300), by: line('by', 120), on: date })
-    .optional(),
-  withdrawn: z
-    .strictObject({ on: date, reason: line('reason', 300), by: line('by', 120) })
-    .optional(),
+  ...recordSchemas,
 });
 
 export type Frontmatter = z.output<typeof frontmatterSchema>;

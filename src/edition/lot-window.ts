@@ -1,0 +1,55 @@
+import type { Formula } from '../formulary/formula.ts';
+import type { Problem } from '../reference/problem.ts';
+import type { AlkaliLot, FatLot, Reference } from '../reference/reference.ts';
+import { editionProblem } from './edition-problem.ts';
+import { materialsUsed } from './materials-used.ts';
+
+/**
+ * Released lots whose measured value lies outside the range that formulas were approved for: the published
+ * range of a fat, the trade range of a solid alkali. A lot that no formula uses is left alone. A stock
+ * solution has no trade range; its strength is the shop's own, and the core holds it against the lye.
+ */
+export function lotWindowProblems(
+  formulas: readonly Formula[],
+  reference: Reference,
+  file: string,
+): readonly Problem[] {
+  const usersOf = (id: string) =>
+    formulas.filter((formula) => materialsUsed(formula, reference).has(id));
+  return [
+    ...reference.lots.fats.filter(isReleased).flatMap((lot) => {
+      const window = reference.fats.get(lot.fat)?.core?.saponificationValue;
+      const users = usersOf(lot.fat);
+      if (!window || users.length === 0 || isWithin(lot.saponificationValue, window)) return [];
+      const found = `lot ${lot.lot} of ${lot.fat} with a saponification value of ${lot.saponificationValue}`;
+      return [outside(file, found, `${window.low} to ${window.high}`, users)];
+    }),
+    ...reference.lots.alkalis.filter(isReleased).flatMap((lot) => {
+      const assay = reference.alkalis.get(lot.alkali)?.trade.assay;
+      const users = usersOf(lot.alkali);
+      if (!assay || lot.form === 'solution' || users.length === 0) return [];
+      const window = { low: assay.low * 100, high: assay.high * 100 };
+      if (isWithin(lot.assay, window)) return [];
+      const found = `lot ${lot.lot} of ${lot.alkali} with an assay of ${lot.assay} %`;
+      return [outside(file, found, `${plain(window.low)} to ${plain(window.high)} %`, users)];
+    }),
+  ];
+}
+
+const isReleased = ({ status }: FatLot | AlkaliLot) => status === 'released';
+
+/** Percents come from fractions; the last bit of that is no reason to refuse a lot. */
+const SLACK = 1e-9;
+
+const isWithin = (value: number, { low, high }: { readonly low: number; readonly high: number }) =>
+  value >= low - SLACK && value <= high + SLACK;
+
+const plain = (value: number) => String(Number(value.toPrecision(9)));
+
+function outside(file: string, found: string, window: string, users: readonly Formula[]): Problem {
+  return editionProblem({ file }, 'edition/lot-outside-window', {
+    found,
+    expected: `${window}, which is what ${users.map(({ code }) => code).join(', ')} ${users.length === 1 ? 'was' : 'were'} approved for`,
+    advice: 'have the lot measured again, or set its status to quarantine',
+  });
+}

@@ -1,0 +1,36 @@
+/** Every rule about approvals, editions and publishing, with its title. An id is permanent once published. */
+export const EDITION_PROBLEMS = {
+  'edition/not-approved': { title: 'A formula without an approval' },
+  'edition/changed-since-approval': { title: 'A formula that is not what was approved' },
+  'edition/review-date-passed': { title: 'An approval whose review date has passed' },
+  'edition/approved-later': { title: 'An approval dated after the day the edition is for' },
+  'edition/lot-outside-window': { title: 'A released lot outside the range that was approved' },
+  'edition/same-revision': { title: 'A published revision that now says something else' },
+  'edition/revision-went-back': { title: 'A revision below one that was published' },
+  'edition/formula-vanished': { title: 'A published formula that is no longer there' },
+  'edition/back-without-approval': { title: 'A formula back in use on an approval from before' },
+  'edition/as-of-date': { title: 'An as-of date that does not exist' },
+  'edition/ledger-unreadable': { title: 'The ledger cannot be read' },
+  'edition/ledger-line': { title: 'A line of the ledger that cannot be understood' },
+  'edition/ledger-of-another-shop': { title: "Another shop's entry in the ledger" },
+  'edition/not-an-edition': { title: 'No edition where one should be' },
+  'edition/edition-unreadable': { title: 'An edition.json that cannot be understood' },
+  'edition/edition-of-another-shop': { title: "Another shop's edition" },
+  'edition/unknown-code': { title: 'A code that no formula has' },
+  'edition/code-twice': { title: 'A code that two files have' },
+  'edition/formula-with-errors': {
+    title: 'A formula that cannot be approved because it has errors',
+  },
+  'edition/formula-withdrawn': { title: 'A withdrawn formula that should be approved' },
+  'edition/approver-name': { title: 'An approval by nobody' },
+  'edition/approval-date': { title: 'A date of approval or review that cannot be' },
+  'edition/file-changed': { title: 'A file that changed while it was being approved' },
+  'edition/approval-place': { title: 'Frontmatter that the approval cannot be written into' },
+  'edition/cannot-write': { title: 'Something that cannot be written' },
+  'edition/checksums': { title: 'A list of checksums that cannot be used' },
+  'edition/not-whole': { title: 'An edition that is not as it was built' },
+  'edition/proof': { title: 'A proof edition where an approved one is due' },
+  'edition/target': { title: 'A place where an edition cannot be published' },
+} as const satisfies Record<string, { readonly title: string }>;
+
+export type EditionRule = keyof typeof EDITION_PROBLEMS;
