@@ -33,6 +33,7 @@ export function computeBatch(
     weighedWater: rounded.water,
     waterStep: steps.water,
     weighedHeldBack: rounded.heldBack,
+    heldBackStep: steps.heldBack,
     liquids: rounded.liquids.map(({ liquid, mass, at }, i) => ({
       ...line(liquid.id, mass, steps.liquids[i]),
       at,
@@ -114,6 +115,7 @@ function refusedBatch(batch: BatchSize, breach: Breach): BatchDocument {
     weighedWater: null,
     waterStep: 0,
     weighedHeldBack: null,
+    heldBackStep: 0,
     liquids: [],
     additives: [],
     massOfFats: null,

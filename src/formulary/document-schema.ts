@@ -40,6 +40,7 @@ const batch = z
     weighedWater: number.nullable(),
     waterStep: number,
     weighedHeldBack: number.nullable(),
+    heldBackStep: number,
     liquids: list(weighedAt),
     additives: list(weighedAt),
     massOfFats: number.nullable(),

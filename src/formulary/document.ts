@@ -163,7 +163,9 @@ export interface BatchDocument {
   readonly alkali: readonly WeighedLine[];
   readonly weighedWater: number | null;
   readonly waterStep: number;
+  /** Part of `weighedWater`; weighed on its own, so with a step of its own. */
   readonly weighedHeldBack: number | null;
+  readonly heldBackStep: number;
   readonly liquids: readonly (WeighedLine & { readonly at: string })[];
   readonly additives: readonly (WeighedLine & { readonly at: string })[];
   /** Mass of the fats that the alkali is reckoned on, as weighed. */
