@@ -1,0 +1,16 @@
+import { defineConfig } from 'astro/config';
+import { relativeLinks } from './src/site/integrations/relative-links.ts';
+
+// Run through `npm run build` and `npm run dev`: they load the formulary that the pages are made from.
+export default defineConfig({
+  srcDir: './src/site',
+  publicDir: './src/site/public',
+  outDir: './dist',
+  // true keeps the spaces between words, which the default takes out
+  compressHTML: true,
+  // links name files, so that the handbook also opens from a folder
+  build: { format: 'preserve', assets: 'assets', inlineStylesheets: 'never' },
+  devToolbar: { enabled: false },
+  integrations: [relativeLinks()],
+  vite: { build: { assetsInlineLimit: 0 } },
+});

@@ -1,0 +1,66 @@
+import type { BatchDocument, WeighedLine } from '../formulary/document.ts';
+import type { Formula } from '../formulary/formula.ts';
+import { words } from '../words/catalogue.ts';
+import { decimalsOf, weight } from '../words/numbers.ts';
+import { targetText } from './targets.ts';
+
+/**
+ * What a directive in a method prints: `:weight[olive]`, `:alkali[sodium]`, `:water`, `:lye`,
+ * `:held-back`, `:temperature[lye]`, `:time[cure]`. Amounts are those of `batch`; without a batch, or
+ * where it was refused, they print as words, never as a number. `null` for a directive that names nothing
+ * of this formula.
+ */
+export function amountText(
+  name: string,
+  label: string,
+  formula: Formula,
+  batch: BatchDocument | null,
+): string | null {
+  if (name === 'temperature' || name === 'time') {
+    const target = formula.targets[label];
+    return target ? targetText(target) : null;
+  }
+  const weights = batch && !batch.refused ? batch : null;
+  if (!weights) return words.formulaPage.noAmount;
+  switch (name) {
+    case 'weight':
+      return lineText(
+        [weights.fats, weights.afterCookFats, weights.additives, weights.liquids],
+        label,
+      );
+    case 'alkali':
+      return lineText([weights.alkali], `${label}-hydroxide`);
+    case 'water':
+      return massText(
+        (weights.weighedWater ?? 0) - (weights.weighedHeldBack ?? 0),
+        weights.waterStep,
+      );
+    case 'held-back':
+      return massText(weights.weighedHeldBack ?? 0, weights.heldBackStep);
+    case 'lye':
+      return massText(...lyeMass(weights));
+    default:
+      return null;
+  }
+}
+
+function lineText(lists: readonly (readonly WeighedLine[])[], id: string): string | null {
+  const line = lists.flat().find((each) => each.id === id);
+  return line ? massText(line.weighedMass, line.step) : null;
+}
+
+/** Everything in the lye pot, to the finest step used there. */
+function lyeMass(batch: BatchDocument): [number, number] {
+  const lines = [
+    ...batch.alkali,
+    ...[...batch.liquids, ...batch.additives].filter(({ at }) => at === 'lye'),
+  ];
+  const water = (batch.weighedWater ?? 0) - (batch.weighedHeldBack ?? 0);
+  const mass = lines.reduce((sum, { weighedMass }) => sum + weighedMass, water);
+  const finest = [batch.waterStep, ...lines.map(({ step }) => step)].sort(
+    (a, b) => decimalsOf(b) - decimalsOf(a) || a - b,
+  )[0];
+  return [mass, finest ?? batch.waterStep];
+}
+
+const massText = (mass: number, step: number) => `${weight(mass, step)}\u00a0${words.frame.grams}`;

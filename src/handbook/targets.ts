@@ -1,0 +1,38 @@
+import type { Formula } from '../formulary/formula.ts';
+import { words } from '../words/catalogue.ts';
+import { plain, range } from '../words/numbers.ts';
+
+export interface TargetRow {
+  readonly name: string;
+  readonly value: string;
+}
+
+/** `35 to 40 °C`, with spaces that do not break. */
+export function targetText({ min, max, unit }: Formula['targets'][string]): string {
+  const ends = min === max ? plain(min, 1) : `${plain(min, 1)} to ${plain(max, 1)}`;
+  return `${ends}\u00a0${words.formulaPage.targets.units[unit]}`;
+}
+
+/** What to aim at while making, in the order of the file. */
+export function targetRows({ targets }: Formula): readonly TargetRow[] {
+  const { names } = words.formulaPage.targets;
+  return Object.entries(targets).map(([id, target]) => ({
+    name: names[id] ?? id,
+    value: targetText(target),
+  }));
+}
+
+/** What a batch must meet before it leaves the shop. */
+export function releaseRows({ release }: Formula): readonly TargetRow[] {
+  const text = words.formulaPage.targets;
+  const rows: TargetRow[] = [];
+  if (release.freeAlkali !== null) {
+    const value = `${plain(release.freeAlkali)} ${text.freeAlkaliUnit}`;
+    rows.push({ name: text.freeAlkali, value });
+  }
+  if (release.ph) rows.push({ name: text.ph, value: range(...release.ph, 1) });
+  if (release.moisture !== null) {
+    rows.push({ name: text.moisture, value: `${plain(release.moisture)} %` });
+  }
+  return rows;
+}

@@ -1,0 +1,26 @@
+import type { Formulary } from '../formulary/formulary.ts';
+
+/** Everything that the pages are made from. */
+export interface SiteInput {
+  readonly formulary: Formulary;
+  /** The one date that comparisons use and that pages show, `2026-12-01`. */
+  readonly asOf: string;
+  /** Folder of the formula files, for the pictures that they show. */
+  readonly formulasFolder: string;
+}
+
+// pages are bundled apart from the command that starts the build; the process is all they share
+const KEY = Symbol.for('formulary-handbook.site-input');
+const shared = globalThis as typeof globalThis & { [KEY]?: SiteInput };
+
+/** Hands the pages what they are made from; called by the commands before the build and at each reload. */
+export function handOver(input: SiteInput): void {
+  shared[KEY] = input;
+}
+
+/** What the pages are made from. Throws where no command has handed anything over. */
+export function siteInput(): SiteInput {
+  const input = shared[KEY];
+  if (!input) throw new Error('No formulary was loaded. Use `npm run build` or `npm run dev`.');
+  return input;
+}

@@ -1,0 +1,42 @@
+import { readdirSync, readFileSync, writeFileSync } from 'node:fs';
+import { join, posix, relative, sep } from 'node:path';
+import { fileURLToPath } from 'node:url';
+import type { AstroIntegration } from 'astro';
+import { rewriteLinks } from './rewrite-links.ts';
+
+/**
+ * Turns the site-absolute links of the written pages and style sheets into relative ones, so that the
+ * folder works at any address and from a disk. Fails the build on a link to a file or an anchor that is not there.
+ */
+export function relativeLinks(): AstroIntegration {
+  return {
+    name: 'relative-links',
+    hooks: {
+      'astro:build:done': ({ dir }) => {
+        const folder = fileURLToPath(dir);
+        const files = filesIn(folder);
+        const texts = new Map(
+          files
+            .filter((file) => /\.(html|css|svg)$/.test(file))
+            .map((file) => [file, readFileSync(join(folder, file), 'utf8')]),
+        );
+        const dangling: string[] = [];
+        for (const [file, text] of texts) {
+          const { rewritten, missing } = rewriteLinks(file, text, new Set(files), texts);
+          dangling.push(...missing.map((link) => `${file}: ${link}`));
+          if (rewritten !== text) writeFileSync(join(folder, file), rewritten);
+        }
+        if (dangling.length > 0) {
+          throw new Error(`Links that lead nowhere:\n${dangling.join('\n')}`);
+        }
+      },
+    },
+  };
+}
+
+function filesIn(folder: string): string[] {
+  return readdirSync(folder, { recursive: true, withFileTypes: true })
+    .filter((entry) => entry.isFile())
+    .map((entry) => relative(folder, join(entry.parentPath, entry.name)).split(sep).join(posix.sep))
+    .sort();
+}

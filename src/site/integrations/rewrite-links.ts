@@ -1,0 +1,47 @@
+import { posix } from 'node:path';
+
+/** A page with its links made relative, and the links that lead nowhere. */
+export interface RewrittenLinks {
+  readonly rewritten: string;
+  readonly missing: readonly string[];
+}
+
+/**
+ * Rewrites every site-absolute `href`, `src`, `srcset`, `data-root` and CSS `url()` of one file.
+ *
+ * `files` are all files of the site, with `/` and without a leading one; `texts` holds the pages, in which
+ * anchors are looked up. Links within a page (`#weights`) are checked too. Other hosts are left alone.
+ */
+export function rewriteLinks(
+  file: string,
+  text: string,
+  files: ReadonlySet<string>,
+  texts: ReadonlyMap<string, string>,
+): RewrittenLinks {
+  const missing: string[] = [];
+  const from = posix.dirname(file);
+  const relativeTo = (link: string) => {
+    const [path = '', anchor] = link.split('#');
+    const target = path === '' ? file : path.slice(1);
+    if (!files.has(target)) missing.push(link);
+    else if (anchor && !hasAnchor(texts.get(target) ?? '', anchor)) missing.push(link);
+    const hash = anchor === undefined ? '' : `#${anchor}`;
+    return path === '' ? hash : posix.relative(from, target) + hash;
+  };
+  const rewritten = text
+    .replace(/(\s(?:href|src)=")([/#][^"]*)"/g, (whole, start: string, link: string) =>
+      link.startsWith('//') || link === '#' ? whole : `${start}${relativeTo(link)}"`,
+    )
+    .replace(/(\ssrcset=")([^"]*)"/g, (_, start: string, set: string) => {
+      const parts = set.split(/,\s+/).map((part) => part.replace(/^\/\S+/, relativeTo));
+      return `${start}${parts.join(', ')}"`;
+    })
+    .replace(
+      /(\sdata-root=")\/"/g,
+      (_, start: string) => `${start}${posix.relative(from, '.') || '.'}/"`,
+    )
+    .replace(/url\((\/[^)]*)\)/g, (_, link: string) => `url(${relativeTo(link)})`);
+  return { rewritten, missing };
+}
+
+const hasAnchor = (page: string, anchor: string) => page.includes(` id="${anchor}"`);

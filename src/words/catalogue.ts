@@ -1,0 +1,30 @@
+import { breachText } from './en/breaches.ts';
+import { contentsPage } from './en/contents-page.ts';
+import { fatPages } from './en/fat-pages.ts';
+import { formulaPage } from './en/formula-page.ts';
+import { frame } from './en/frame.ts';
+import { lostPage } from './en/lost-page.ts';
+import { lyePage } from './en/lye-page.ts';
+import { marginWords } from './en/margin.ts';
+import { methodWords } from './en/methods.ts';
+import { methodsPage } from './en/methods-page.ts';
+import { profileWords, propertyNames, propertyUnits } from './en/profile.ts';
+import { safetyPage } from './en/safety.ts';
+
+/** Every word that a page shows. Pages take their text from here and nowhere else. */
+export const words = {
+  breachText,
+  contentsPage,
+  fatPages,
+  formulaPage,
+  frame,
+  lostPage,
+  lyePage,
+  marginWords,
+  methodWords,
+  methodsPage,
+  profileWords,
+  propertyNames,
+  propertyUnits,
+  safetyPage,
+} as const;

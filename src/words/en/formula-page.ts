@@ -1,0 +1,96 @@
+import { fixed, kilograms, plain } from '../numbers.ts';
+
+export const formulaPage = {
+  revision: (n: number) => `Revision ${n}`,
+  notApproved: 'Not approved yet',
+  approved: (by: string, on: string, until: string) =>
+    `Approved by ${by} on ${on}, to be reviewed by ${until}`,
+  concession: (reason: string, by: string, on: string) =>
+    `Published under a concession: ${reason} Given by ${by} on ${on}.`,
+  sections: {
+    weights: 'Weights',
+    margin: 'Superfat margin',
+    method: 'Method',
+    cautions: 'Cautions',
+    targets: 'Targets and release',
+    profile: 'Acid profile',
+    properties: 'Properties',
+    provenance: 'Where the values come from',
+    changes: 'Changes',
+    files: 'Files',
+  },
+  sizes: 'Batch sizes',
+  batch: {
+    groups: {
+      lye: 'Lye',
+      fats: 'Fats',
+      trace: 'At trace',
+      'after-cook': 'After the cook',
+      dilution: 'At dilution',
+    } as Readonly<Record<string, string>>,
+    caption: (code: string, label: string) => `${code}, ${label}: what to weigh, in working order`,
+    what: 'Weigh',
+    howMuch: 'Weight',
+    water: 'Water',
+    waterHeldBack: 'Water held back',
+    total: (grams: number) => `${kilograms(grams)} kg`,
+    totalLabel: 'All together',
+    bars: (n: number) => (n === 1 ? '1 bar' : `${n} bars`),
+    superfatLabel: 'Superfat by these weights',
+    superfat: (percent: number) => `${fixed(percent, 2)} %`,
+    lowestLabel: 'Lowest, scale counted',
+    lowest: (expanded: number) => `${fixed(expanded, 1)} %`,
+    steps: (steps: readonly number[]) =>
+      steps.length === 1
+        ? `Rounded to steps of ${plain(steps[0] ?? 0)} g.`
+        : `Rounded to steps of ${steps.map((step) => `${plain(step)} g`).join(' and ')}, as printed.`,
+    end: (label: string) => `End of ${label}`,
+    refusedTitle: 'No weights at this size',
+    refusedAdvice: 'Do not scale another size by hand. Ask the formulator.',
+  },
+  stock: (name: string) => `${name}, solution`,
+  lot: (lot: string) => `lot ${lot}`,
+  noLot: 'no lot released: reckoned on the trade range',
+  methodAmounts: (label: string) =>
+    `The amounts in the text are those of the size “${label}”. For another size take its own block above.`,
+  targets: {
+    names: {
+      fats: 'Fats',
+      lye: 'Lye',
+      combine: 'Combine',
+      cook: 'Cook',
+      unmould: 'Unmould after',
+      cure: 'Cure',
+      dilution: 'Dilution',
+    } as Readonly<Record<string, string>>,
+    units: { C: '°C', h: 'h', d: 'd', min: 'min' },
+    freeAlkali: 'Free alkali, at most',
+    freeAlkaliUnit: '% as NaOH',
+    ph: 'pH',
+    moisture: 'Moisture, at most',
+    targetColumn: 'Target',
+    releaseColumn: 'Release limit',
+    none: 'The formula states none.',
+  },
+  readCautions: (gravest: string, count: number) =>
+    count === 1
+      ? `${gravest}: one caution. Read it before you weigh.`
+      : `${gravest}: ${count} cautions. Read them before you weigh.`,
+  noAmount: 'no weight',
+  noCautions:
+    'No rule found anything to warn of beyond the safety page. The safety page still holds.',
+  basis: 'Basis',
+  acidForgotten: (percent: number) =>
+    `If the acid is forgotten, the superfat is ${fixed(percent, 1)} %${percent < 0 ? ': the soap is caustic' : ''}.`,
+  finalSuperfat: (written: number, final: number) =>
+    `The cook is reckoned at ${plain(written, 1)} %; with what joins after it the superfat is ${fixed(final, 1)} %.`,
+  provenance: {
+    lead: 'The alkali is reckoned on these saponification values, in mg KOH per g.',
+    columns: { fat: 'Fat', share: 'Share', value: 'Used', range: 'Range', source: 'Source' },
+    alkali: 'Alkali',
+    assay: 'Assay used',
+    lot: (lot: string, method: string) => `lot ${lot}, ${method}`,
+    loweredBy: (source: string) => `value lowered to a measured mean in ${source}`,
+  },
+  json: 'This formula as JSON',
+} as const;

@@ -1,0 +1,44 @@
+import { fixed, plain } from '../numbers.ts';
+
+/** What stands around every page, and the small words that many pages share. */
+export const frame = {
+  language: 'en',
+  title: 'Formulary handbook',
+  skip: 'To the content',
+  menu: 'Handbook',
+  contents: 'Contents',
+  lyeTables: 'Lye tables',
+  fats: 'Fats',
+  safety: 'Safety',
+  methods: 'Methods',
+  asOf: (date: string) => `As of ${date}`,
+  invented: 'Demonstration: an invented workshop, not a formulary to work from.',
+  foot: 'Not a substitute for the supplier’s safety data sheet, for local rules, or for a licensed practitioner’s advice. Those come first.',
+  home: 'Contents of the handbook',
+  grams: 'g',
+  percent: '%',
+  kinds: { bar: 'Bar', paste: 'Paste', liquid: 'Liquid' },
+  processes: { cold: 'cold process', hot: 'hot process' },
+  stages: {
+    lye: 'in the lye',
+    fats: 'in the fats',
+    trace: 'at trace',
+    'after-cook': 'after the cook',
+    dilution: 'at dilution',
+  } as Readonly<Record<string, string>>,
+  severities: { danger: 'Danger', warning: 'Warning', care: 'Care', note: 'Note' },
+  batchSize: {
+    fats: (grams: number) => `${plain(grams)} g of fats`,
+    batter: (grams: number) => `${plain(grams)} g of batter`,
+    bars: (count: number, grams: number) => `${count} bars of ${plain(grams)} g, poured weight`,
+    mould: (millilitres: number) => `mould of ${fixed(millilitres / 1000, 1)} L`,
+  },
+  how: {
+    measured: 'measured',
+    standard: 'standard',
+    handbook: 'handbook',
+    supplier: 'supplier’s figure',
+    'common practice': 'common practice, no source',
+    'from memory': 'from memory, not checked against the print',
+  },
+} as const;
