@@ -1,0 +1,92 @@
+import { mkdirSync, readdirSync } from 'node:fs';
+import { isAbsolute, relative, resolve } from 'node:path';
+import { fileURLToPath } from 'node:url';
+import { build } from 'astro';
+import { isCalendarDate } from '../formulary/calendar-date.ts';
+import { handOver } from '../site/input.ts';
+import { counted, problemSummary, problemText } from '../words/problem-text.ts';
+import { FOLDERS, readArguments } from './arguments.ts';
+import { loadSite, today } from './load-site.ts';
+import { healSwap, mayBeReplaced, swap, swapFolders } from './swap-fs.ts';
+
+const PROJECT = fileURLToPath(new URL('../..', import.meta.url));
+
+/**
+ * Builds the handbook. Everything is loaded and checked before anything is written; the pages are written
+ * beside the published folder, which is replaced only when they are whole. Status 1 where it failed; the
+ * published folder then is as it was.
+ */
+export async function main(args: readonly string[]): Promise<number> {
+  const read = readArguments(args, {
+    command: 'build',
+    about: 'Builds the handbook from the formulas and the data.',
+    options: {
+      ...FOLDERS,
+      out: { value: 'DIR', about: 'folder to write (dist)' },
+      'as-of': { value: 'DATE', about: 'the date the edition is of (today)' },
+    },
+  });
+  if (!read.ok) {
+    console.error(read.text);
+    return read.status;
+  }
+  const { formulas = 'formulas', data = 'data', out = 'dist' } = read.given;
+  const asOf = read.given['as-of'] ?? today();
+  if (!isCalendarDate(asOf)) {
+    console.error(`--as-of: "${asOf}" is no date. Write it like 2026-12-01.`);
+    return 1;
+  }
+  const folders = swapFolders(out);
+  const inTheWay = [formulas, data, PROJECT].find((folder) => holds(folders.current, folder));
+  if (inTheWay !== undefined) {
+    console.error(`--out: ${out} holds folders that the build reads. Choose another one.`);
+    return 1;
+  }
+  healSwap(folders);
+  if (!mayBeReplaced(folders)) {
+    console.error(
+      `--out: ${out} is not empty and is no handbook, so it is left alone. Choose another folder or empty it.`,
+    );
+    return 1;
+  }
+
+  const start = performance.now();
+  const loaded = loadSite({ formulas, data }, asOf);
+  for (const problem of loaded.problems) console.error(problemText(problem));
+  if (!loaded.ok) {
+    console.error(`${problemSummary(loaded.problems)}. Nothing was built.`);
+    return 1;
+  }
+  const count = loaded.input.formulary.formulas.length;
+  console.log(`Building ${counted(count, 'formula')} as of ${asOf} ...`);
+  handOver(loaded.input);
+  mkdirSync(folders.next, { recursive: true });
+  try {
+    await build({
+      root: PROJECT,
+      outDir: folders.next,
+      logLevel: 'error',
+      vite: { logLevel: 'error' },
+    });
+  } catch (error) {
+    healSwap(folders);
+    console.error(error instanceof Error ? error.message : error);
+    console.error('The build failed. The published folder is as it was.');
+    return 1;
+  }
+  swap(folders);
+  const pages = readdirSync(folders.current, { recursive: true }).filter((file) =>
+    String(file).endsWith('.html'),
+  ).length;
+  const seconds = ((performance.now() - start) / 1000).toFixed(1);
+  console.log(
+    `${relative('.', folders.current) || '.'}: ${counted(count, 'formula')}, ${counted(pages, 'page')}, ${seconds} s`,
+  );
+  return 0;
+}
+
+/** Whether `inner` is `outer` or lies within it. */
+function holds(outer: string, inner: string): boolean {
+  const path = relative(outer, resolve(inner));
+  return path === '' || !(path.startsWith('..') || isAbsolute(path));
+}

@@ -1,0 +1,24 @@
+import { resolve } from 'node:path';
+import type { ShopFolders } from '../formulary/formulary.ts';
+import { loadFormulary } from '../formulary/load.ts';
+import type { Problem } from '../formulary/problem.ts';
+import type { SiteInput } from '../site/input.ts';
+
+export type LoadedSite =
+  | { readonly ok: true; readonly input: SiteInput; readonly problems: readonly Problem[] }
+  | { readonly ok: false; readonly problems: readonly Problem[] };
+
+/** From a shop's folders to all that the pages are made from, or to every problem that stands against it. */
+export function loadSite(folders: ShopFolders, asOf: string): LoadedSite {
+  const loaded = loadFormulary(folders);
+  if (!loaded.ok) return loaded;
+  const { formulary, problems } = loaded;
+  return {
+    ok: true,
+    problems,
+    input: { formulary, asOf, formulasFolder: resolve(folders.formulas) },
+  };
+}
+
+/** Today in UTC, `2026-12-01`, for builds that are given no date. */
+export const today = (): string => new Date().toISOString().slice(0, 10);
