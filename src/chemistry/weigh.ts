@@ -15,6 +15,8 @@ export interface ScaleReading {
 /** A charge whose masses are all whole steps of a scale, the steps beside it, and its superfat. */
 export interface WeighedCharge {
   readonly charge: Charge;
+  /** The fats that the alkali is reckoned on, before rounding. */
+  readonly massOfFats: Grams;
   readonly steps: {
     readonly fats: readonly number[];
     readonly afterCookFats: readonly number[];
@@ -109,6 +111,7 @@ export function weigh(
   }
   return given({
     charge: result,
+    massOfFats: grams(charge.fats.reduce((sum, { mass }) => sum + mass, 0)),
     steps: {
       fats: fats.map(({ step }) => step),
       afterCookFats: afterCookFats.map(({ step }) => step),

@@ -10,6 +10,7 @@ import type {
   Liquid,
 } from '../chemistry/materials.ts';
 import type { Grams } from '../chemistry/quantity.ts';
+import type { CautionThresholds } from './caution-thresholds.ts';
 
 /** How a value is known. `from memory` is said wherever the value is shown. */
 export type How =
@@ -150,6 +151,12 @@ export interface AdditiveRecord {
   readonly allergens: readonly string[];
   readonly values: readonly (ValueRecord & { readonly name: string })[];
   readonly notes: readonly string[];
+  /** What its acid or hydrate is made of; `null` for mixtures and neutral things. */
+  readonly substance: {
+    readonly formula: string;
+    readonly crystalWater: number | null;
+    readonly protons: number | null;
+  } | null;
   readonly core: Additive;
 }
 
@@ -192,6 +199,8 @@ export interface BatchSize {
   readonly scale: string;
   readonly fineScale: string | null;
   readonly kinds: readonly ('bar' | 'paste' | 'liquid')[];
+  /** What the vessel holds in which this size is mixed or cooked, where the shop states it. [mL] */
+  readonly vessel?: number;
 }
 
 export interface Shop {
@@ -245,6 +254,8 @@ export interface AlkaliLot {
 
 /** Everything under `data/`, read, checked and turned into what the core takes. */
 export interface Reference {
+  /** Standard atomic weights with their source, by symbol. */
+  readonly elements: ReadonlyMap<string, ValueRecord>;
   /** Derived from `elements.yaml` by `constantsFrom`. */
   readonly constants: Constants;
   /** From `data/tables/`, ready for the models. */
@@ -252,6 +263,9 @@ export interface Reference {
     readonly lyeHeat: Readonly<Record<Cation, LyeHeatTables>>;
     /** Density at 20 degC [g/mL] by mass percent of hydroxide. */
     readonly lyeDensity: Readonly<Record<Cation, Curve>>;
+    /** Where the heats of solution and the heat capacities come from, in words for the working. */
+    readonly lyeHeatSources: Readonly<Record<Cation, readonly string[]>>;
+    readonly heatCapacitySources: Readonly<Record<Cation, readonly string[]>>;
   };
   readonly acids: ReadonlyMap<string, AcidRecord>;
   readonly fats: ReadonlyMap<string, FatRecord>;
@@ -261,4 +275,6 @@ export interface Reference {
   readonly sources: ReadonlyMap<string, Source>;
   readonly shop: Shop;
   readonly lots: { readonly fats: readonly FatLot[]; readonly alkalis: readonly AlkaliLot[] };
+  /** From `cautions.yaml`, by `cautionsSchema` and `cautionThresholdsFrom`. */
+  readonly cautionThresholds: CautionThresholds;
 }

@@ -1,0 +1,119 @@
+import { isBeforeSaponification } from '../../chemistry/saponification.ts';
+import { AS_USED, equivalentsOf, superfatFrom } from '../../chemistry/superfat.ts';
+import { weighBatch } from '../../formulary/compute-batch.ts';
+import { molarMassTerm } from './basics.ts';
+import { named, type Working } from './context.ts';
+import { type Section, type Step, step } from './step.ts';
+import { exact, figure, fractionOf, product, sumOf, symbol } from './term.ts';
+import { superfatStep } from './weights.ts';
+
+/** From the masses per 1000 g to what the scale shows, for each batch size that has weights. */
+export function batches(working: Working): readonly Section[] {
+  const { charge, document, reference } = working;
+  return document.batches.flatMap(({ id, label, refused, superfat }): Section[] => {
+    const batch = reference.shop.batches.find((batch) => batch.id === id);
+    if (refused || !superfat || !batch) return [];
+    const weighed = weighBatch(charge, batch, reference);
+    if (!weighed.ok) return [];
+    const rounded = weighed.value.charge;
+    const fats = weighed.value.massOfFats;
+    const perKilogram = charge.fats.reduce((sum, { mass }) => sum + mass, 0);
+    const scaled = (kind: Step['kind'], of: string, subject: string, mass: number) =>
+      step({
+        kind,
+        of: `${id}-${of}`,
+        subject,
+        symbol: symbol('m'),
+        numbers: fractionOf(product(figure(mass), figure(fats)), figure(perKilogram)),
+        value: (mass * fats) / perKilogram,
+        unit: 'g',
+      });
+    const koh = reference.constants.hydroxide.K;
+    const amounts = equivalentsOf(rounded, AS_USED, reference.constants);
+    const saponified = [
+      ...rounded.fats.map(({ fat, mass }) => ({
+        mass: exact(mass),
+        value: fat.saponificationValue.value,
+      })),
+      ...rounded.liquids.flatMap(({ liquid, mass, at }) =>
+        liquid.fatData && isBeforeSaponification(at)
+          ? [
+              {
+                mass: product(exact(mass), exact(liquid.fat)),
+                value: liquid.fatData.saponificationValue.value,
+              },
+            ]
+          : [],
+      ),
+    ];
+    const acids = [
+      ...rounded.additives.map(({ additive, mass, at }) => ({
+        mass,
+        acidity: additive.acidity,
+        at,
+      })),
+      ...rounded.liquids.map(({ liquid, mass, at }) => ({ mass, acidity: liquid.acidity, at })),
+    ].filter(({ acidity, at }) => acidity > 0 && isBeforeSaponification(at));
+    const steps: Step[] = [
+      step({
+        kind: 'fats-of-batch',
+        of: id,
+        symbol: symbol('m', 'fats'),
+        numbers: figure(fats),
+        value: fats,
+        unit: 'g',
+      }),
+      ...charge.fats.map(({ fat, mass }) =>
+        scaled('exact-weight', fat.id, named(working, fat.id), mass),
+      ),
+      ...charge.alkali.map(({ supply, weighedMass }) =>
+        scaled('exact-weight', supply.id, named(working, supply.id), weighedMass),
+      ),
+      step({
+        kind: 'batch-equivalents',
+        of: id,
+        symbol: symbol('E'),
+        numbers: fractionOf(
+          sumOf(...saponified.map(({ mass, value }) => product(mass, figure(value, 8)))),
+          product(exact(1000), molarMassTerm(koh)),
+        ),
+        value: amounts.saponifiable,
+        digits: 7,
+        unit: 'mol',
+      }),
+      ...(acids.length > 0
+        ? [
+            step({
+              kind: 'batch-acid',
+              of: id,
+              symbol: symbol('n', 'acid'),
+              numbers: sumOf(
+                ...acids.map(({ mass, acidity }) => product(exact(mass), figure(acidity))),
+              ),
+              value: amounts.acid,
+              digits: 7,
+              unit: 'mol',
+            }),
+          ]
+        : []),
+      step({
+        kind: 'batch-hydroxide',
+        of: id,
+        symbol: symbol('n', 'OH'),
+        numbers: sumOf(
+          ...rounded.alkali.map(({ supply, weighedMass }) =>
+            fractionOf(
+              product(exact(weighedMass), figure(supply.assay.value)),
+              molarMassTerm(reference.constants.hydroxide[supply.cation]),
+            ),
+          ),
+        ),
+        value: amounts.hydroxide,
+        digits: 7,
+        unit: 'mol',
+      }),
+      superfatStep('batch-superfat', amounts, superfatFrom(amounts) * 100, id),
+    ];
+    return [{ id: 'batch', subject: label, steps }];
+  });
+}

@@ -1,0 +1,212 @@
+import { expandedHalfWidth, superfatMargin } from '../../chemistry/margin.ts';
+import type { Range } from '../../chemistry/quantity.ts';
+import { isBeforeSaponification } from '../../chemistry/saponification.ts';
+import { equivalentsOf, type Reading, superfatFrom } from '../../chemistry/superfat.ts';
+import { molarMassTerm } from './basics.ts';
+import { named, type Working } from './context.ts';
+import { type Section, type Step, step } from './step.ts';
+import {
+  exact,
+  figure,
+  fractionOf,
+  minus,
+  product,
+  rootOf,
+  squareOf,
+  sumOf,
+  symbol,
+  type Term,
+} from './term.ts';
+import { superfatStep } from './weights.ts';
+
+/** The expanded interval and the worst case, contribution by contribution. */
+export function margin(working: Working): Section {
+  const { charge, reference } = working;
+  const { constants } = reference;
+  const waxAsAcids = charge.formulation.process === 'cold';
+  const centre: Reading = { fats: 'middle', assay: 'middle', waxAsAcids };
+  const worst: Reading = { fats: 'low', assay: 'high', waxAsAcids };
+  const atCentre = equivalentsOf(charge, centre, constants);
+  const atWorst = equivalentsOf(charge, worst, constants);
+  const result = superfatMargin(charge, constants);
+
+  const fats = fatRanges(working, waxAsAcids);
+  const contributions = [
+    ...fats.map(({ id, mass, range }) =>
+      contribution(
+        `fat:${id}`,
+        named(working, id),
+        product(
+          HUNDRED,
+          fractionOf(
+            atCentre.acid > 0
+              ? minus(figure(atCentre.hydroxide), figure(atCentre.acid))
+              : figure(atCentre.hydroxide),
+            squareOf(figure(atCentre.saponifiable)),
+          ),
+          fractionOf(
+            product(figure(mass, 8), halfWidth(range)),
+            product(exact(1000), molarMassTerm(constants.hydroxide.K)),
+          ),
+        ),
+        working,
+      ),
+    ),
+    ...charge.alkali.map(({ supply, weighedMass }) =>
+      contribution(
+        `assay:${supply.id}`,
+        named(working, supply.id),
+        product(
+          HUNDRED,
+          fractionOf(
+            product(figure(weighedMass), halfWidth(supply.assay)),
+            product(
+              molarMassTerm(constants.hydroxide[supply.cation]),
+              figure(atCentre.saponifiable),
+            ),
+          ),
+        ),
+        working,
+      ),
+    ),
+  ];
+  const together = Math.sqrt(
+    working.document.superfat.budget.reduce((sum, { halfWidth }) => sum + halfWidth ** 2, 0),
+  );
+  const centrePercent = superfatFrom(atCentre) * 100;
+  const { expanded, worstCase } = result;
+  const clipped = centrePercent - together < worstCase.low * 100;
+  return {
+    id: 'margin',
+    subject: null,
+    steps: [
+      sumStep(
+        'middle-equivalents',
+        'E',
+        fats,
+        (range) => (range.low + range.high) / 2,
+        atCentre.saponifiable,
+        working,
+      ),
+      hydroxideStep(
+        'middle-hydroxide',
+        (assay) => (assay.low + assay.high) / 2,
+        atCentre.hydroxide,
+        working,
+      ),
+      superfatStep('middle-superfat', atCentre, centrePercent),
+      ...contributions,
+      step({
+        kind: 'half-width',
+        symbol: symbol('U'),
+        numbers: rootOf(sumOf(...contributions.map(({ result }) => squareOf(result)))),
+        value: together,
+        digits: 4,
+        within: 0.0005,
+        unit: '%',
+      }),
+      sumStep('worst-equivalents', 'E', fats, (range) => range.low, atWorst.saponifiable, working),
+      hydroxideStep('worst-hydroxide', (assay) => assay.high, atWorst.hydroxide, working),
+      superfatStep('worst-superfat', atWorst, worstCase.low * 100),
+      step({
+        kind: 'expanded-low',
+        symbol: symbol('s', 'low'),
+        ...(clipped ? {} : { equation: minus(symbol('s', 'centre'), symbol('U')) }),
+        numbers: clipped
+          ? figure(worstCase.low * 100, 4)
+          : minus(figure(centrePercent, 4), figure(together, 4)),
+        value: expanded.low * 100,
+        digits: 4,
+        within: 0.002,
+        unit: '%',
+      }),
+    ],
+  };
+}
+
+const HUNDRED = exact(100);
+
+interface FatRange {
+  readonly id: string;
+  readonly mass: number;
+  readonly range: Range<number>;
+}
+
+function fatRanges({ charge }: Working, waxAsAcids: boolean): readonly FatRange[] {
+  const rangeOf = (fat: (typeof charge.fats)[number]['fat']) =>
+    waxAsAcids && fat.kind === 'wax' ? fat.acidValue : fat.saponificationValue;
+  return [
+    ...charge.fats.map(({ fat, mass }) => ({ id: fat.id, mass, range: rangeOf(fat) })),
+    ...charge.liquids.flatMap(({ liquid, mass, at }) =>
+      liquid.fatData && isBeforeSaponification(at)
+        ? [{ id: liquid.fatData.id, mass: mass * liquid.fat, range: rangeOf(liquid.fatData) }]
+        : [],
+    ),
+  ];
+}
+
+/** Half of the range, times 2/√3 where every value in it is equally likely. */
+function halfWidth(range: Range<number>): Term {
+  if (range.spread === 'expanded') return figure(expandedHalfWidth(range));
+  return fractionOf(
+    product(exact(2), fractionOf(minus(figure(range.high, 8), figure(range.low, 8)), exact(2))),
+    rootOf(exact(3)),
+  );
+}
+
+function contribution(id: string, subject: string, numbers: Term, working: Working): Step {
+  const value = working.document.superfat.budget.find((part) => part.id === id)?.halfWidth;
+  return step({
+    kind: 'contribution',
+    of: id.replace(':', '-'),
+    subject,
+    symbol: symbol('U', subject),
+    numbers,
+    value: value ?? Number.NaN,
+    digits: 4,
+    within: 0.0005,
+    unit: '%',
+  });
+}
+
+function sumStep(
+  kind: 'middle-equivalents' | 'worst-equivalents',
+  name: string,
+  fats: readonly FatRange[],
+  pick: (range: Range<number>) => number,
+  value: number,
+  { reference }: Working,
+): Step {
+  return step({
+    kind,
+    symbol: symbol(name),
+    numbers: fractionOf(
+      sumOf(...fats.map(({ mass, range }) => product(figure(mass, 8), figure(pick(range), 8)))),
+      product(exact(1000), molarMassTerm(reference.constants.hydroxide.K)),
+    ),
+    value,
+    unit: 'mol',
+  });
+}
+
+function hydroxideStep(
+  kind: 'middle-hydroxide' | 'worst-hydroxide',
+  pick: (assay: Range<number>) => number,
+  value: number,
+  { charge, reference }: Working,
+): Step {
+  return step({
+    kind,
+    symbol: symbol('n', 'OH'),
+    numbers: sumOf(
+      ...charge.alkali.map(({ supply, weighedMass }) =>
+        fractionOf(
+          product(figure(weighedMass, 7), figure(pick(supply.assay))),
+          molarMassTerm(reference.constants.hydroxide[supply.cation]),
+        ),
+      ),
+    ),
+    value,
+    unit: 'mol',
+  });
+}

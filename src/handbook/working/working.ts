@@ -1,0 +1,36 @@
+import type { ComputedFormula } from '../../formulary/formulary.ts';
+import type { Reference } from '../../reference/reference.ts';
+import { acids, equivalents, hydroxide, liquids, molarMasses } from './basics.ts';
+import { batches } from './batches.ts';
+import { workingOf } from './context.ts';
+import { margin } from './margin.ts';
+import { heat, profile, yieldSection } from './soap.ts';
+import type { Section } from './step.ts';
+import { alkali, check, water } from './weights.ts';
+
+/**
+ * The working of one formula: every equation with its numbers, in the order of a check by hand. Throws a
+ * RangeError where the printed numbers do not give the printed result.
+ */
+export function workingSections(
+  computed: ComputedFormula,
+  reference: Reference,
+): readonly Section[] {
+  const working = workingOf(computed, reference);
+  const sections = [
+    molarMasses(working),
+    liquids(working),
+    equivalents(working),
+    acids(working),
+    hydroxide(working),
+    alkali(working),
+    water(working),
+    check(working),
+    margin(working),
+    heat(working),
+    profile(working),
+    yieldSection(working),
+    ...batches(working),
+  ];
+  return sections.filter((section) => section !== null);
+}

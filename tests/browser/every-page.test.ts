@@ -1,0 +1,56 @@
+import { pathToFileURL } from 'node:url';
+import type { Browser } from 'playwright-core';
+import { afterAll, beforeAll, describe, expect, inject, test } from 'vitest';
+import { sitePages } from '../support/site-files.ts';
+import { launch } from './launch.ts';
+import { serve } from './serve.ts';
+
+const site = inject('site');
+const pages = sitePages(site);
+let browser: Browser;
+let servers: Awaited<ReturnType<typeof serve>>[] = [];
+const bases: Record<string, string> = {};
+
+beforeAll(async () => {
+  browser = await launch();
+  servers = [await serve(site, '/'), await serve(site, '/shop/handbook/')];
+  bases['at the root of a host'] = servers[0]?.origin ?? '';
+  bases['under a sub-path'] = servers[1]?.origin ?? '';
+  bases['opened as a file'] = `${pathToFileURL(site).href}/`;
+});
+afterAll(async () => {
+  await browser?.close();
+  await Promise.all(servers.map(({ close }) => close()));
+});
+
+describe.each(['at the root of a host', 'under a sub-path', 'opened as a file'])('%s', (where) => {
+  test('every page loads whole, in silence, and asks no other host', {
+    timeout: 120_000,
+  }, async () => {
+    const base = bases[where] ?? '';
+    const page = await browser.newPage();
+    const wrong: string[] = [];
+    let current = '';
+    page.on('console', (message) => {
+      if (['error', 'warning'].includes(message.type()))
+        wrong.push(`${current}: ${message.text()}`);
+    });
+    page.on('pageerror', (error) => wrong.push(`${current}: ${error.message}`));
+    page.on('requestfailed', (request) => wrong.push(`${current}: failed ${request.url()}`));
+    page.on('request', (request) => {
+      if (!request.url().startsWith(base)) wrong.push(`${current}: asked for ${request.url()}`);
+    });
+    page.on('response', (response) => {
+      if (response.status() >= 400)
+        wrong.push(`${current}: ${response.status()} ${response.url()}`);
+    });
+    for (const path of pages) {
+      current = path;
+      await page.goto(base + path, { waitUntil: 'load' });
+      expect(await page.locator('h1').count(), `${path} has one first heading`).toBe(1);
+    }
+    await page.close();
+    expect(pages.length).toBeGreaterThan(60);
+    expect(wrong).toEqual([]);
+  });
+});
