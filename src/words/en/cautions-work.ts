@@ -1,0 +1,58 @@
+import { fixed, plain } from '../numbers.ts';
+
+/** Cautions about the bench: sizes, vessels, and how the batter behaves. */
+export const workCautions = {
+  'batch-too-small': (n: { batch: string }) => ({
+    text: `There are no weights for the size ${n.batch}: it is too small for its scale.`,
+    action:
+      'Make a larger size or use a finer scale. Never divide the weights of another size by hand.',
+  }),
+  'batch-above-vessel': (n: {
+    batch: string;
+    litres: number;
+    vessel: number;
+    fill: number;
+    limit: number;
+  }) => ({
+    text: `The size ${n.batch} is about ${fixed(n.litres, 1)} L of batter: ${fixed(n.fill, 0)} % of its ${plain(n.vessel, 1)} L vessel, where ${plain(n.limit)} % is the most.`,
+    action: 'Take a larger vessel or a smaller size. Hot caustic soap that runs over burns.',
+  }),
+  'hot-process-boil-over': (n: { fill: number }) => ({
+    text: 'Soap can rise within seconds during the cook and run over, hot and caustic.',
+    action: `Fill a steel cooker, never aluminium, to ${plain(n.fill)} % at most. Stay with it, lid off when it climbs, off the heat, stir down.`,
+  }),
+  'alcohol-near-heat': (n: { materials: string }) => ({
+    text: `${n.materials}: the vapour catches fire, and this soap is hot.`,
+    action:
+      'No flame and no glowing plate in the room. Take the pot off the heat, let it cool below what the safety data sheet names, air the room, then add.',
+  }),
+  'heats-batter': (n: { materials: string; sugar: number }) => ({
+    text: `${n.materials}: sugars (${fixed(n.sugar, 1)} % of the fats) and alcohol heat the batter. It can crack, climb out of the mould, or scorch in the lye.`,
+    action: 'Work cool, leave moulds uncovered and apart, and keep watch for the first hours.',
+  }),
+  'salt-sets-fast': (n: { materials: string; percent: number; limit: number }) => ({
+    text: `${n.materials}, ${plain(n.percent, 1)} % of the fats: the bar sets within hours and then crumbles under a knife.`,
+    action: 'Use single moulds, or cut while it is still warm. It is caustic then: gloves on.',
+  }),
+  'free-acid-seizes': (n: { materials: string; share: number; limit: number }) => ({
+    text: `${n.materials}, ${plain(n.share, 1)} % of the fats: free acid reacts on contact, and the batter can turn to paste at once.`,
+    action: 'Melt it fully into the other fats, keep the pot hot, and pour the lye slowly.',
+  }),
+  'fast-trace': (n: { materials: string; share: number; limit: number }) => ({
+    text: `${n.materials}, ${plain(n.share, 1)} % of the fats: the batter thickens early.`,
+    action: 'Set out moulds and additives before the lye meets the fats. Blend in short bursts.',
+  }),
+  'slow-trace': (n: { unsaturated: number; limit: number }) => ({
+    text: `${fixed(n.unsaturated, 0)} % of the fatty acids are unsaturated: trace comes late and the bar stays soft for long.`,
+    action: 'Be patient with the blender, and unmould only when the edge is firm.',
+  }),
+  'fragrance-maximum-unknown': (n: { materials: string; percent: number }) => ({
+    text: `${n.materials}, ${plain(n.percent, 1)} % of the fats: the data hold no supplier’s maximum for it, so nothing here checks the dose.`,
+    action:
+      'Get the supplier’s maximum for soap, the allergen sheet and the flash point, and compare before making it.',
+  }),
+  'fragrance-above-maximum': (n: { materials: string; percent: number; maximum: number }) => ({
+    text: `${n.materials}: ${fixed(n.percent, 2)} % of the released soap. The supplier’s maximum is ${plain(n.maximum, 2)} %.`,
+    action: 'Do not make it. The formulator must lower the dose.',
+  }),
+} as const;
