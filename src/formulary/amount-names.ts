@@ -33,7 +33,9 @@ export function amountNames(
     .flatMap((id) => nearestId(id, candidates) ?? []);
 
   const alkali = recordOf(value.alkali);
-  const targets = Object.keys(recordOf(value.targets)).filter((name) => name in TARGETS);
+  const targets = Object.keys(recordOf(value.targets)).filter((name) =>
+    Object.hasOwn(TARGETS, name),
+  );
   const ofTarget = (of: 'temperature' | 'time') =>
     once(targets.filter((name) => TARGETS[name as TargetName].of === of));
   return {

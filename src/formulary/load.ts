@@ -13,7 +13,8 @@ export interface LoadOptions {
   readonly packagedData?: string;
 }
 
-const PACKAGED_DATA = fileURLToPath(new URL('../../data', import.meta.url));
+/** The reference data that comes with the code. */
+export const PACKAGED_DATA = fileURLToPath(new URL('../../data', import.meta.url));
 
 /**
  * Reads the data and all formulas of a shop and computes every formula: the one way from files to numbers.

@@ -1,3 +1,4 @@
+import type { Root } from 'mdast';
 import { type Place, parseYaml, type ReadYaml } from '../reference/yaml.ts';
 import type { FormulaRule } from '../words/en/problems-formula.ts';
 import { amountNames } from './amount-names.ts';
@@ -6,6 +7,7 @@ import { checkCharacters } from './checks/characters.ts';
 import { checkDirectives } from './checks/directives.ts';
 import { checkIds } from './checks/ids.ts';
 import { checkLinks, type FormulaLink } from './checks/links.ts';
+import { isShallow } from './checks/nesting.ts';
 import { checkNumbers } from './checks/numbers.ts';
 import { checkRecord } from './checks/record.ts';
 import { checkShares } from './checks/shares.ts';
@@ -61,13 +63,16 @@ export function readFormula(
   }
   const yaml = parseYaml(parts.yaml, { firstLine: parts.yamlLine });
   const report = reportOn(file, yaml);
-  const method = parseMethod(parts.body);
   checkCharacters(text.replace(/^\uFEFF/, ''), report);
   const front = checkFrontmatter(yaml, known, report);
-  checkStructure(method, parts.bodyPlace, report);
-  const links = checkLinks(method, images, report);
-  checkDirectives(method, front ? amountNames(front.value, known) : null, report);
-
+  let method: Root | null = null;
+  let links: readonly FormulaLink[] = [];
+  if (isShallow(parts.body, parts.bodyPlace, report)) {
+    method = parseMethod(parts.body);
+    checkStructure(method, parts.bodyPlace, report);
+    links = checkLinks(method, images, report);
+    checkDirectives(method, front ? amountNames(front.value, known) : null, report);
+  }
   const problems = report.problems.toSorted((a, b) => a.line - b.line || a.column - b.column);
   const code = front?.value.code;
   return {
@@ -75,7 +80,7 @@ export function readFormula(
     links,
     code: typeof code === 'string' ? { text: code, place: yaml.placeOf(['code']) } : null,
     formula:
-      front && problems.length === 0
+      front && method && problems.length === 0
         ? assembleFormula(file, front.sound as Frontmatter, {
             method,
             methodText: parts.bodyText,

@@ -14,7 +14,8 @@ export function checkSchema(
 ): Partial<Frontmatter> {
   const sound: Record<string, unknown> = {};
   for (const key of Object.keys(value)) {
-    if (!(key in frontmatterSchema.shape)) reportUnknownKey([key], frontmatterSchema, report);
+    if (!Object.hasOwn(frontmatterSchema.shape, key))
+      reportUnknownKey([key], frontmatterSchema, report);
   }
   for (const key of Object.keys(frontmatterSchema.shape) as FrontmatterKey[]) {
     const result = frontmatterSchema.shape[key].safeParse(value[key]);
@@ -50,6 +51,8 @@ function reportIssue(
       expected: expectedAt(issue),
       advice: input === null ? 'give it a value or take it out' : `add "${key}"`,
     });
+  } else if (typeof input === 'number' && !Number.isFinite(input)) {
+    // told by the check of how numbers are written
   } else if (issue.code === 'invalid_value') {
     const choices = issue.values.map(String);
     report.in(path, 'formula/unknown-word', {

@@ -40,17 +40,20 @@ export function within(
 
 /** A text on one line. */
 export function line(what: string, longest: number) {
-  return demanding(z.string(), (value) =>
-    value.trim() === '' || value.length > longest || /[\r\n]/.test(value)
-      ? {
-          rule: 'formula/text-form',
-          found:
-            value.trim() === '' ? `${what} without text` : `${what} of ${value.length} letters`,
-          expected: `one line of at most ${longest}`,
-          advice: 'say it shortly; the rest belongs in the text below the frontmatter',
-        }
-      : null,
-  );
+  return demanding(z.string(), (value) => {
+    const text = value.trim();
+    const lines = text.split(/\r?\n/).length;
+    if (text !== '' && lines === 1 && text.length <= longest) return null;
+    return {
+      rule: 'formula/text-form',
+      found:
+        text === ''
+          ? `${what} without text`
+          : `${what} of ${text.length} characters on ${lines === 1 ? 'one line' : `${lines} lines`}`,
+      expected: `one line of 1 to ${longest} characters`,
+      advice: text === '' ? '' : 'what is longer belongs in the text below the frontmatter',
+    };
+  });
 }
 
 /** A day as `2026-09-14`. */

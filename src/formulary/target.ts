@@ -2,14 +2,16 @@ import type { Formula } from './formula.ts';
 
 export type Target = Formula['targets'][string];
 
-/** What a target is of, the units it may have, and its sane range in the first of them. */
+const TEMPERATURE = { of: 'temperature', low: -5, high: 120, range: '-5 to 120 C' } as const;
+
+/** What a target is of, and its sane range in degrees Celsius or hours. */
 export const TARGETS = {
-  fats: { of: 'temperature', low: -5, high: 120 },
-  lye: { of: 'temperature', low: -5, high: 120 },
-  combine: { of: 'temperature', low: -5, high: 120 },
-  cook: { of: 'time', low: 5 / 60, high: 48 },
-  unmould: { of: 'time', low: 0.25, high: 24 * 21 },
-  cure: { of: 'time', low: 0, high: 24 * 1100 },
+  fats: TEMPERATURE,
+  lye: TEMPERATURE,
+  combine: TEMPERATURE,
+  cook: { of: 'time', low: 1 / 12, high: 48, range: '5 min to 48 h' },
+  unmould: { of: 'time', low: 1 / 4, high: 21 * 24, range: '15 min to 21 d' },
+  cure: { of: 'time', low: 0, high: 1100 * 24, range: '0 to 1100 d' },
 } as const;
 export type TargetName = keyof typeof TARGETS;
 

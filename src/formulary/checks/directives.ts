@@ -38,15 +38,23 @@ function checkOne(node: TextDirective, names: AmountNames | null, report: Report
   const label = textOf(node);
   const place = startOf(node);
   const { name } = node;
-  if (!Object.hasOwn(DIRECTIVES, name) || Object.keys(node.attributes ?? {}).length > 0) {
+  if (!Object.hasOwn(DIRECTIVES, name)) {
     report.at(place, 'formula/unknown-directive', {
-      found: Object.hasOwn(DIRECTIVES, name) ? `":${name}" with braces` : `":${name}"`,
+      found: `":${name}"`,
       expected: FORMS,
       advice: suggestion(
         name,
-        words(Object.keys(DIRECTIVES).filter((known) => known !== name)),
+        words(Object.keys(DIRECTIVES)),
         `if it is plain text, write "\\:${name}" or put a space after the colon`,
       ),
+    });
+    return;
+  }
+  if (Object.keys(node.attributes ?? {}).length > 0) {
+    report.at(place, 'formula/unknown-directive', {
+      found: `":${name}" with braces`,
+      expected: FORMS,
+      advice: 'take the braces out',
     });
     return;
   }

@@ -55,6 +55,7 @@ export const FORMULA_PROBLEMS = {
   'formula/changes-revision': { title: 'The newest change is not of this revision' },
   'formula/review-before-approval': { title: 'A review date that is not after the approval' },
   'formula/fingerprint-form': { title: 'A fingerprint that is not in its form' },
+  'formula/nesting': { title: 'Lists or quotations too deep to be read' },
   'formula/raw-html': { title: 'HTML in the text' },
   'formula/link-target': { title: 'A link to where no link may go' },
   'formula/unknown-formula': { title: 'A link to a formula that does not exist' },
