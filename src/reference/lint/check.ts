@@ -1,0 +1,23 @@
+import type { Constants } from '../../chemistry/constants.ts';
+import type { DataRule } from '../../words/en/problems-data.ts';
+import type { AcidRecord, FatRecord, Source } from '../reference.ts';
+import type { ProblemParts } from '../report.ts';
+import type { YamlPath } from '../yaml.ts';
+
+/** What a check may look at. */
+export interface LintContext {
+  readonly constants: Constants;
+  readonly acids: ReadonlyMap<string, AcidRecord>;
+  readonly sources: ReadonlyMap<string, Source>;
+}
+
+export interface LintFinding extends ProblemParts {
+  readonly path: YamlPath;
+}
+
+/** One check of one fat. Its rule id is `data/` and its name. */
+export interface LintCheck {
+  readonly name: DataRule extends `data/${infer Name}` ? Name : never;
+  readonly description: string;
+  readonly check: (fat: FatRecord, context: LintContext) => readonly LintFinding[];
+}

@@ -1,0 +1,103 @@
+import type { KnownFats } from './materials.ts';
+import { didYouMean } from './nearest.ts';
+import { ALKALIS } from './raw-data.ts';
+import type { Reference } from './reference.ts';
+import type { DataReport } from './report.ts';
+import type { RawLots } from './schema/lots.ts';
+
+/** How far a measured lot may lie outside the published range before it is more likely a slip. [1] */
+const TOLERANCE = 0.05;
+
+/** The shop's lots, checked against the materials they are of. */
+export function lotsFrom(
+  raw: RawLots,
+  { fats, fatIds }: KnownFats,
+  report: DataReport,
+): Reference['lots'] {
+  const fatLots = raw.fats ?? [];
+  const alkaliLots = raw.alkalis ?? [];
+  fatLots.forEach((lot, index) => {
+    const fat = fats.get(lot.fat);
+    if (!fatIds.has(lot.fat)) {
+      report.in(['fats', index, 'fat'], 'data/unknown-fat', {
+        found: `fat "${lot.fat}"`,
+        expected: 'an id from data/fats',
+        advice: didYouMean(lot.fat, fatIds, 'add a file for it first'),
+      });
+      return;
+    }
+    const published = fat?.core?.saponificationValue;
+    const value = lot['saponification-value'];
+    if (lot.status !== 'released' || !published) return;
+    if (value < published.low * (1 - TOLERANCE) || value > published.high * (1 + TOLERANCE)) {
+      report.in(['fats', index, 'saponification-value'], 'data/lot-outside-range', {
+        found: `saponification value ${value}`,
+        expected: `about ${published.low} to ${published.high}, the published range`,
+        advice: 'measure again before the lot is released; it may be another fat',
+      });
+    }
+  });
+  alkaliLots.forEach((lot, index) => {
+    const ids: readonly string[] = ALKALIS;
+    if (ids.includes(lot.alkali)) return;
+    report.in(['alkalis', index, 'alkali'], 'data/unknown-alkali', {
+      found: `alkali "${lot.alkali}"`,
+      expected: `one of ${ids.join(', ')}`,
+      advice: didYouMean(lot.alkali, ids, 'use one of these'),
+    });
+  });
+  reportTwice(fatLots, 'fats', ({ fat }) => fat, report);
+  reportTwice(alkaliLots, 'alkalis', ({ alkali }) => alkali, report);
+  return {
+    fats: fatLots.map((lot) => ({
+      fat: lot.fat,
+      lot: lot.lot,
+      saponificationValue: lot['saponification-value'],
+      uncertainty: lot.uncertainty,
+      method: lot.method,
+      status: lot.status,
+      opened: lot.opened ?? null,
+      retestBy: lot['retest-by'],
+    })),
+    alkalis: alkaliLots.map((lot) => ({
+      alkali: lot.alkali,
+      lot: lot.lot,
+      form: lot.form,
+      assay: lot.assay,
+      uncertainty: lot.uncertainty,
+      carbonate: lot.carbonate,
+      status: lot.status,
+      opened: lot.opened ?? null,
+      retestBy: lot['retest-by'],
+    })),
+  };
+}
+
+/** One lot number may stand there once; one material may have one released lot, or nobody knows which decides. */
+function reportTwice<Lot extends { readonly lot: string; readonly status: string }>(
+  lots: readonly Lot[],
+  key: 'fats' | 'alkalis',
+  materialOf: (lot: Lot) => string,
+  report: DataReport,
+): void {
+  lots.forEach((lot, index) => {
+    const earlier = lots.slice(0, index);
+    if (earlier.some((other) => other.lot === lot.lot)) {
+      report.in([key, index, 'lot'], 'data/repeated-entry', {
+        found: `a second lot "${lot.lot}"`,
+        expected: 'each lot once',
+        advice: 'remove one of the two',
+      });
+    }
+    const other = earlier.find(
+      (one) => materialOf(one) === materialOf(lot) && one.status === 'released',
+    );
+    if (other && lot.status === 'released') {
+      report.in([key, index, 'status'], 'data/two-released-lots', {
+        found: `lots "${other.lot}" and "${lot.lot}" of ${materialOf(lot)} both released`,
+        expected: 'one released lot of a material',
+        advice: 'close the lot that is used up: remove it or set it to quarantine',
+      });
+    }
+  });
+}

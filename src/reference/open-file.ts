@@ -1,0 +1,45 @@
+import type { z } from 'zod';
+import type { DataRule } from '../words/en/problems-data.ts';
+import type { DataFile } from './data-files.ts';
+import type { Problem } from './problem.ts';
+import { type DataReport, dataProblem, reportOn } from './report.ts';
+import { fit } from './schema-problems.ts';
+import { parseYaml, type YamlFault } from './yaml.ts';
+
+const RULE_OF_FAULT: Readonly<Record<YamlFault['kind'], DataRule>> = {
+  syntax: 'data/yaml',
+  tab: 'data/tab',
+  'duplicate-key': 'data/duplicate-key',
+  anchor: 'data/anchor',
+};
+
+export interface OpenedFile<T> {
+  readonly value: T;
+  readonly report: DataReport;
+}
+
+/** One file through YAML and its schema. `null` where it cannot be used; the problems say why. */
+export function openFile<T>(
+  { file, text }: DataFile,
+  schema: z.ZodType<T>,
+  problems: Problem[],
+): OpenedFile<T> | null {
+  const yaml = parseYaml(text);
+  for (const { kind, line, column, ...parts } of yaml.faults) {
+    problems.push(dataProblem(file, { line, column }, RULE_OF_FAULT[kind], parts));
+  }
+  if (yaml.faults.length > 0) return null;
+  if (yaml.value === null) {
+    problems.push(
+      dataProblem(file, { line: 1, column: 1 }, 'data/empty-file', {
+        found: 'nothing in the file',
+        expected: 'keys with values',
+        advice: 'write it, or remove the file',
+      }),
+    );
+    return null;
+  }
+  const report = reportOn(file, yaml, problems);
+  const value = fit(schema, yaml.value, report);
+  return value === null ? null : { value, report };
+}

@@ -1,0 +1,86 @@
+import { z } from 'zod';
+import { measure } from './measure.ts';
+import { broken, line } from './value.ts';
+
+const id = z.string().superRefine((text, context) => {
+  if (!/^[a-z0-9]+(-[a-z0-9]+)*$/.test(text) || text.length > 40) {
+    context.addIssue(
+      broken({
+        rule: 'data/text-form',
+        found: `the id "${text}"`,
+        expected: 'small letters, digits and single hyphens',
+        advice: 'ids become addresses of pages; the label may be anything',
+      }),
+    );
+  }
+});
+
+const KINDS = ['bar', 'paste', 'liquid'] as const;
+const WAYS = ['fats', 'batter', 'bars', 'mould'] as const;
+
+const batch = z
+  .strictObject({
+    id,
+    label: line,
+    fats: measure('mass', 50, 2_000_000).optional(),
+    batter: measure('mass', 50, 2_000_000).optional(),
+    bars: z.int().gte(1).lte(100_000).optional(),
+    'wet-mass': measure('mass', 5, 5000).optional(),
+    mould: measure('volume', 50, 2_000_000).optional(),
+    vessel: measure('volume', 50, 5_000_000).optional(),
+    losses: z.number().gte(0).lte(50).optional(),
+    scale: z.string(),
+    'fine-scale': z.string().optional(),
+    kinds: z.array(z.enum(KINDS)).min(1),
+  })
+  .superRefine((size, context) => {
+    const stated = WAYS.filter((way) => size[way] !== undefined);
+    const barsWhole = (size.bars === undefined) === (size['wet-mass'] === undefined);
+    if (stated.length !== 1 || !barsWhole) {
+      context.addIssue(
+        broken({
+          rule: 'data/batch-size',
+          found: !barsWhole
+            ? 'only one of "bars" and "wet-mass"'
+            : stated.length === 0
+              ? 'no size'
+              : `sizes by ${stated.join(' and ')}`,
+          expected: 'exactly one of "fats", "batter", "bars" with "wet-mass", "mould"',
+          advice: 'state the size in one way',
+        }),
+      );
+    }
+  });
+
+/** `data/shop.yaml`. */
+export const shopSchema = z.strictObject({
+  name: line,
+  invented: z.boolean().optional(),
+  batches: z.array(batch).min(1),
+  scales: z
+    .array(
+      z.strictObject({
+        id,
+        name: line,
+        step: measure('mass', 0.001, 1000),
+        error: measure('mass', 0, 1000),
+        capacity: measure('mass', 1, 5_000_000),
+      }),
+    )
+    .min(1),
+  'start-temperature': measure('temperature', 0, 40),
+  'release-moisture': z.number().gte(0).lte(40),
+  'largest-superfat-shift': z.number().gt(0).lte(5),
+  emergency: z.array(z.strictObject({ label: line, value: line })),
+  rules: z.array(line).optional(),
+  'release-limits': z.array(
+    z.strictObject({
+      kind: z.enum([...KINDS, 'any']),
+      process: z.enum(['cold', 'hot', 'any']),
+      end: z.enum(['expanded', 'worst-case']),
+      floor: z.number().gte(-10).lte(25),
+    }),
+  ),
+});
+
+export type RawShop = z.infer<typeof shopSchema>;

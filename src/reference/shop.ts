@@ -1,0 +1,75 @@
+import { grams } from '../chemistry/quantity.ts';
+import { didYouMean } from './nearest.ts';
+import type { BatchSize, Shop } from './reference.ts';
+import type { DataReport } from './report.ts';
+import type { RawShop } from './schema/shop.ts';
+
+/** The shop's settings. Percentages of losses become fractions, masses grams. */
+export function shopFrom(raw: RawShop, report: DataReport): Shop {
+  reportRepeated(raw.batches, 'batches', report);
+  reportRepeated(raw.scales, 'scales', report);
+  const scales = raw.scales.map(({ id, name, step, error, capacity }) => ({
+    id,
+    name,
+    step: grams(step),
+    error: grams(error),
+    capacity: grams(capacity),
+  }));
+  const known = scales.map(({ id }) => id);
+  const batches = raw.batches.map((batch, index): BatchSize => {
+    for (const key of ['scale', 'fine-scale'] as const) {
+      const scale = batch[key];
+      if (scale === undefined || known.includes(scale)) continue;
+      report.in(['batches', index, key], 'data/unknown-scale', {
+        found: `scale "${scale}"`,
+        expected: `one of ${known.join(', ')}`,
+        advice: didYouMean(scale, known, 'add it under "scales"'),
+      });
+    }
+    return {
+      id: batch.id,
+      label: batch.label,
+      size: sizeOf(batch),
+      losses: (batch.losses ?? 0) / 100,
+      scale: batch.scale,
+      fineScale: batch['fine-scale'] ?? null,
+      kinds: batch.kinds,
+      ...(batch.vessel === undefined ? {} : { vessel: batch.vessel }),
+    };
+  });
+  return {
+    name: raw.name,
+    invented: raw.invented ?? false,
+    batches,
+    scales,
+    startTemperature: raw['start-temperature'],
+    releaseMoisture: raw['release-moisture'],
+    largestSuperfatShift: raw['largest-superfat-shift'],
+    emergency: raw.emergency,
+    rules: raw.rules ?? [],
+    releaseLimits: raw['release-limits'],
+  };
+}
+
+/** The schema has seen to it that exactly one way is stated. */
+function sizeOf(batch: RawShop['batches'][number]): BatchSize['size'] {
+  if (batch.fats !== undefined) return { by: 'fats', mass: grams(batch.fats) };
+  if (batch.batter !== undefined) return { by: 'batter', mass: grams(batch.batter) };
+  if (batch.mould !== undefined) return { by: 'mould', millilitres: batch.mould };
+  return { by: 'bars', count: batch.bars ?? 0, wetMass: grams(batch['wet-mass'] ?? 0) };
+}
+
+function reportRepeated(
+  entries: readonly { readonly id: string }[],
+  key: string,
+  report: DataReport,
+): void {
+  entries.forEach(({ id }, index) => {
+    if (entries.findIndex((entry) => entry.id === id) === index) return;
+    report.in([key, index, 'id'], 'data/repeated-entry', {
+      found: `a second "${id}"`,
+      expected: 'each id once',
+      advice: 'rename or remove one of the two',
+    });
+  });
+}
