@@ -19,9 +19,13 @@ export type ClosedRange = ValueRecord & { readonly min: number; readonly max: nu
 export const isClosedRange = (record: ValueRecord): record is ClosedRange =>
   record.min !== null && record.max !== null;
 
-/** The first record with both ends: the range that is used. Records come in the order of choice. */
+/**
+ * The range that is used, from records in the order of choice: the first with both ends. What a stated number
+ * of samples happened to span is narrower than nature and counts only where no other range is known.
+ */
 export function firstClosedRange(records: readonly ValueRecord[]): ClosedRange | null {
-  return records.find(isClosedRange) ?? null;
+  const closed = records.filter(isClosedRange);
+  return closed.find(({ samples }) => samples === null) ?? closed[0] ?? null;
 }
 
 /** The lowest documented mean of measured samples, where it lies below the middle of the range used. */
