@@ -1,0 +1,46 @@
+import type { Stem } from './stemmer.ts';
+
+/** What was typed, taken apart as the index took the pages apart. */
+export interface Query {
+  /** The whole query stands in quotes: its words must follow one another. */
+  readonly phrase: boolean;
+  readonly terms: readonly QueryTerm[];
+}
+
+export interface QueryTerm {
+  /** Lower case, with the marks that were typed. */
+  readonly typed: string;
+  /** Without marks. */
+  readonly bare: string;
+  readonly stem: string;
+}
+
+/** Letters of a query beyond this are left out: enough for any sentence, too few to stall a page. */
+export const LONGEST_QUERY = 1000;
+
+const PUNCTUATION = /^\p{Pd}|[\p{Pe}\p{Pf}\p{Pi}\p{Po}]|\p{Ps}$/u;
+// voiced kana lose their meaning without these two
+const MARKS = /(?![\u3099\u309A])\p{M}/gu;
+
+/** Reads a query. Never throws: lone surrogates, markup and control characters are letters like others. */
+export function readQuery(typed: string, include: ReadonlySet<string>, stem: Stem): Query {
+  const text = typed.slice(0, LONGEST_QUERY);
+  const letters = new Intl.Segmenter(undefined, { granularity: 'grapheme' }).segment(text);
+  let kept = '';
+  for (const { segment } of letters) {
+    if (include.has(segment)) kept += segment;
+    else if (!PUNCTUATION.test(segment)) kept += segment.toLowerCase();
+  }
+  const terms = kept
+    .replace(/\s{2,}/g, ' ')
+    .trim()
+    .split(' ')
+    .map((term) => ({ typed: term.toWellFormed(), bare: withoutMarks(term).toWellFormed() }))
+    .filter(({ bare }) => bare !== '')
+    .map(({ typed, bare }) => ({ typed, bare, stem: stem(bare) }));
+  return { phrase: /^\s*".+"\s*$/.test(typed), terms };
+}
+
+/** The text without its combining marks. */
+export const withoutMarks = (text: string): string =>
+  text.normalize('NFD').replace(MARKS, '').normalize('NFC');
