@@ -12,8 +12,8 @@ import { formulaProblem, type ProblemParts } from './report.ts';
 export interface FormulasRead {
   readonly formulas: readonly Formula[];
   readonly problems: readonly Problem[];
-  /** All codes as written, also of formulas that are not sound. */
-  readonly codes: readonly string[];
+  /** All codes as written with their files, also of formulas that are not sound. */
+  readonly codes: readonly { readonly text: string; readonly file: string }[];
 }
 
 /**
@@ -28,7 +28,7 @@ export function readFormulas(folder: string, known: Known | null): FormulasRead 
   if (formulaNames.length === 0) {
     return refusedFolder(folder, 'formulary/empty', 'a folder without formula files');
   }
-  const images = new Set(names.filter((name) => /\.(png|jpe?g|webp)$/i.test(name)));
+  const images = new Set(names.filter(isImage));
   const reads = formulaNames.map((name) => {
     const file = `${folder.replace(/[/\\]+$/, '')}/${name}`;
     const read = name.includes('/')
@@ -39,9 +39,15 @@ export function readFormulas(folder: string, known: Known | null): FormulasRead 
   return {
     formulas: reads.flatMap(({ read }) => read.formula ?? []),
     problems: [...reads.flatMap(({ read }) => read.problems), ...checkAcross(reads)],
-    codes: reads.flatMap(({ read }) => read.code?.text ?? []),
+    codes: reads.flatMap(({ read, file }) => (read.code ? { text: read.code.text, file } : [])),
   };
 }
+
+/** The picture files of a folder of formulas, as a formula may name them. */
+export const imagesIn = (folder: string): ReadonlySet<string> =>
+  new Set((listFolder(folder) ?? []).filter(isImage));
+
+const isImage = (name: string) => /\.(png|jpe?g|webp)$/i.test(name);
 
 /** Names below `folder` with forward slashes, sorted by code point; `null` where it cannot be listed. */
 function listFolder(folder: string): readonly string[] | null {

@@ -1,9 +1,10 @@
 import { isAbsolute, relative, resolve } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { readReference } from '../reference/read-reference-fs.ts';
+import type { Reference } from '../reference/reference.ts';
 import { computeFormula } from './compute.ts';
 import type { ComputedFormula, Loaded, ShopFolders } from './formulary.ts';
-import { readFormulas } from './formulas-fs.ts';
+import { type FormulasRead, readFormulas } from './formulas-fs.ts';
 import { knownFrom } from './known.ts';
 import type { Problem } from './problem.ts';
 import { releaseProblems } from './release.ts';
@@ -20,30 +21,45 @@ export const PACKAGED_DATA = fileURLToPath(new URL('../../data', import.meta.url
  * Reads the data and all formulas of a shop and computes every formula: the one way from files to numbers.
  * All problems come at once; with any error there is no formulary. Never throws for bad input.
  */
-export function loadFormulary(
+export function loadFormulary(folders: ShopFolders, options: LoadOptions = {}): Loaded {
+  const { reference, formulas, problems } = loadParts(folders, options);
+  if (!reference || problems.some(({ severity }) => severity === 'error')) {
+    return { ok: false, problems };
+  }
+  return { ok: true, formulary: { reference, formulas }, problems };
+}
+
+/**
+ * What is sound in a shop's folders beside the problems of the rest, for work on one formula while another
+ * is broken. Nothing is published from it.
+ */
+export function loadParts(
   folders: ShopFolders,
   { packagedData = PACKAGED_DATA }: LoadOptions = {},
-): Loaded {
+): {
+  readonly reference: Reference | null;
+  /** Sorted by code, by code point. */
+  readonly formulas: readonly ComputedFormula[];
+  readonly problems: readonly Problem[];
+  readonly codes: FormulasRead['codes'];
+} {
   const { reference, problems: dataProblems } = readReference(
     dataFolders(packagedData, folders.data).map(asTyped),
   );
   const read = readFormulas(asTyped(folders.formulas), reference ? knownFrom(reference) : null);
   const problems: Problem[] = [...dataProblems, ...read.problems];
-  const computed: ComputedFormula[] = [];
+  const formulas: ComputedFormula[] = [];
   if (reference) {
     for (const formula of read.formulas) {
       const result = computeFormula(formula, reference);
       problems.push(...result.problems);
       if (!result.computed) continue;
       problems.push(...releaseProblems(formula, result.computed.document));
-      computed.push(result.computed);
+      formulas.push(result.computed);
     }
   }
-  if (!reference || problems.some(({ severity }) => severity === 'error')) {
-    return { ok: false, problems };
-  }
-  computed.sort((a, b) => (a.formula.code < b.formula.code ? -1 : 1));
-  return { ok: true, formulary: { reference, formulas: computed }, problems };
+  formulas.sort((a, b) => (a.formula.code < b.formula.code ? -1 : 1));
+  return { reference, formulas, problems, codes: read.codes };
 }
 
 /** A shop without a folder of its own and the shop whose folder is the packaged one read it once. */

@@ -37,7 +37,8 @@ function reportIssue(
 ) {
   const path = issuePath as Path;
   const input = valueAt(root, path);
-  const key = String(path.at(-1));
+  const last = path.at(-1);
+  const key = typeof last === 'number' ? `entry ${last + 1}` : String(last);
   if (issue.code === 'custom') {
     const refusal = issue.params?.refusal as Refusal;
     report.in(path, refusal.rule, refusal);
@@ -47,7 +48,7 @@ function reportIssue(
     const rows = typeof path.at(-2) === 'number';
     report.in(path, 'formula/missing-key', {
       found:
-        input === null ? `"${key}" without a value` : `no "${key}"${rows ? ' in this entry' : ''}`,
+        input === null ? `${key} without a value` : `no "${key}"${rows ? ' in this entry' : ''}`,
       expected: expectedAt(issue),
       advice: input === null ? 'give it a value or take it out' : `add "${key}"`,
     });

@@ -71,8 +71,9 @@ export function parseYaml(text: string, { firstLine = 1 }: { firstLine?: number 
     for (let length = path.length; length > 0; length--) {
       const part = path.slice(0, length);
       const node = document.getIn(part, true);
-      // an empty value has no place of its own: its key has
-      if (isScalar(node) && node.source === '') return placeOfKey(part);
+      // an empty value has no place of its own: its key has, but an empty entry of a list has no key
+      const inMap = isMap(document.getIn(part.slice(0, -1), true));
+      if (isScalar(node) && node.source === '' && inMap) return placeOfKey(part);
       const offset = offsetOf(node);
       if (offset !== null) return placeAt(offset);
     }

@@ -181,6 +181,17 @@ test('without data only the ids are not looked up', () => {
   ]);
 });
 
+test('an entry of a list that was left empty has a place', () => {
+  expect(
+    read(
+      SOUND.replace('- { fat: coconut, share: 40 }', '- # later').replace(
+        ' :weight[coconut] with',
+        '',
+      ),
+    ).problems,
+  ).toMatchObject([{ rule: 'formula/missing-key', line: 9, found: 'entry 2 without a value' }]);
+});
+
 test('pictures of the folder are found', () => {
   const text = `${SOUND}\n![The jug](pictures/jug.webp)\n`;
   expect(rules(text)).toEqual(['formula/image-missing']);
