@@ -21,6 +21,11 @@ export async function serve(folder: string, base: string) {
     const path = decodeURIComponent(new URL(request.url ?? '/', 'http://localhost').pathname);
     const inside = path.startsWith(base) ? normalize(path.slice(base.length)) : '..';
     const named = inside === '.' || inside === '' ? 'index.html' : inside;
+    // the page for lost addresses cannot know the way to an icon; browsers then ask for this one
+    if (path === '/favicon.ico') {
+      response.writeHead(204).end();
+      return;
+    }
     const file = join(folder, named);
     if (named.startsWith('..') || !existsSync(file) || !statSync(file).isFile()) {
       response.writeHead(404).end();
