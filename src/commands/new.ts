@@ -25,7 +25,7 @@ export function main(args: readonly string[]): number {
   }
   const { formulas: folder = 'formulas' } = read.given;
   const name = (read.files[0] ?? '').trim();
-  const { codes } = readFormulas(folder, null);
+  const codes = readFormulas(folder, null).codes.map(({ text }) => text);
   const code = read.given.code ?? nextCode(codes);
   if (codes.some((taken) => sameCode(taken) === sameCode(code))) {
     console.error(`The code ${code} is taken; the next free one is ${nextCode(codes)}.`);

@@ -6,7 +6,7 @@ import {
   type ProfileSummary,
   type WithdrawnEntry,
 } from './edition-document.ts';
-import type { StagedWeight, Weight, WeightsPerKilogram } from './weights-per-kilogram.ts';
+import { hasMoved, type Move, moves, type WeightMove, weightMoves } from './weight-moves.ts';
 
 /** What an edition has new against the one before. */
 export interface EditionChanges {
@@ -41,19 +41,6 @@ export interface FormulaChange extends Named {
   };
   /** Only those that moved; empty where one of the two has no profile. */
   readonly profile: readonly (Move & { readonly id: keyof ProfileSummary })[];
-}
-
-/** `null`: not there. */
-export interface Move {
-  readonly id: string;
-  readonly before: number | null;
-  readonly after: number | null;
-}
-
-export interface WeightMove extends Move {
-  readonly part: keyof WeightsPerKilogram;
-  /** When it joins, where that is stated. */
-  readonly at: string | null;
 }
 
 /** Compares two editions of one shop. */
@@ -112,49 +99,3 @@ function profileMoves(was: ProfileSummary | null, is: ProfileSummary | null) {
   if (!was || !is) return [];
   return PROFILE_NUMBERS.map((id) => ({ id, before: was[id], after: is[id] })).filter(hasMoved);
 }
-
-/** Every line of two weighings side by side, in the order of the later one, then what it no longer has. */
-export function weightMoves(
-  before: WeightsPerKilogram,
-  after: WeightsPerKilogram,
-): readonly WeightMove[] {
-  const lists = (['alkali', 'fats', 'afterCookFats', 'liquids', 'additives'] as const).flatMap(
-    (part) =>
-      moves(before[part].map(keyed), after[part].map(keyed)).map(({ id, ...move }) => {
-        const [material = id, at = null] = id.split(' ');
-        return { part, id: material, at, ...move };
-      }),
-  );
-  const water = (['water', 'heldBack'] as const)
-    .map((part) => ({ part, id: part, at: null, before: before[part], after: after[part] }))
-    .filter(({ part, before, after }) => part === 'water' || before !== 0 || after !== 0);
-  const [alkali, rest] = [
-    lists.filter(({ part }) => part === 'alkali'),
-    lists.filter(({ part }) => part !== 'alkali'),
-  ];
-  return [...alkali, ...water, ...rest];
-}
-
-/** Something may join twice, at two times; ids hold no space. */
-const keyed = (weight: Weight | StagedWeight) => ({
-  id: 'at' in weight ? `${weight.id} ${weight.at}` : weight.id,
-  value: weight.mass,
-});
-
-interface Valued {
-  readonly id: string;
-  readonly value: number;
-}
-
-function moves(before: readonly Valued[], after: readonly Valued[]): readonly Move[] {
-  const valueIn = (list: readonly Valued[], wanted: string) =>
-    list.find(({ id }) => id === wanted)?.value ?? null;
-  const ids = new Set([...after, ...before].map(({ id }) => id));
-  return [...ids].map((id) => ({ id, before: valueIn(before, id), after: valueIn(after, id) }));
-}
-
-/** Below this, two numbers differ by the arithmetic and not by the formula. */
-const SAME = 1e-9;
-
-const hasMoved = ({ before, after }: Move) =>
-  before === null || after === null || Math.abs(after - before) > SAME;

@@ -64,5 +64,9 @@ export function checkSheet(code: string, typedDigest: string, list: SheetList): 
   };
 }
 
-/** A code without what is easily left out or put in: case, dashes, spaces. */
-const bareCode = (code: string) => code.toUpperCase().replaceAll(/[^A-Z0-9]/g, '');
+/** A code without what is easily left out or put in: case, dashes, spaces, zeros before the number. */
+const bareCode = (code: string) =>
+  code
+    .toUpperCase()
+    .replaceAll(/[^A-Z0-9]/g, '')
+    .replace(/^([A-Z]+)0+(?=\d)/, '$1');

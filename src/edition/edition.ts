@@ -1,6 +1,7 @@
 import type { ComputedFormula, Formulary } from '../formulary/formulary.ts';
 import type { Problem } from '../reference/problem.ts';
 import { type ApprovalState, approvalOf, approvalProblems } from './approval.ts';
+import { MODELS_VERSION } from './approved-content.ts';
 import type { Canonical } from './canonical-text.ts';
 import { compareEditions, type EditionChanges } from './changes.ts';
 import type { SheetList } from './check-sheet.ts';
@@ -11,7 +12,7 @@ import {
   type WithdrawnFormula,
   withdrawnEntry,
 } from './edition-document.ts';
-import { fingerprintOf, MODELS_VERSION } from './fingerprint.ts';
+import { fingerprintOf } from './fingerprint.ts';
 import type { InputFile } from './inputs-fs.ts';
 import type { LedgerEntry } from './ledger.ts';
 import { ledgerProblems } from './ledger-rules.ts';
