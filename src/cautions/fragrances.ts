@@ -1,14 +1,14 @@
 import type { CautionContext } from './rule.ts';
 
-/** The name of a fragrance's value that holds its supplier's maximum for soap. [g/100 g of product] */
-const MAXIMUM = 'maximum-in-product';
-
 export interface FragranceDose {
   readonly name: string;
   readonly percentOfFats: number;
   /** Of the released soap, which has lost water and so holds more of it than the batter. */
   readonly percentOfProduct: number;
+  /** What the supplier allows in soap. [%] */
   readonly maximum: number | null;
+  /** The lowest that is stated. [degC] */
+  readonly flashPoint: number | null;
 }
 
 /** The fragrances of a formula with their doses; what is listed twice counts together. */
@@ -22,12 +22,16 @@ export function fragrancesOf({ document, reference }: CautionContext): readonly 
   const fats = document.fats.reduce((sum, { mass }) => sum + mass, 0);
   return [...masses].map(([id, mass]) => {
     const record = reference.additives.get(id);
-    const stated = record?.values.find(({ name }) => name === MAXIMUM);
+    const lowest = (wanted: string) => {
+      const stated = record?.values.find(({ name }) => name === wanted);
+      return stated ? (stated.value ?? stated.min ?? stated.max) : null;
+    };
     return {
       name: record?.name ?? id,
       percentOfFats: (100 * mass) / fats,
       percentOfProduct: (100 * mass) / document.yield.releasedMass,
-      maximum: stated ? (stated.value ?? stated.max) : null,
+      maximum: lowest('maximum-in-product'),
+      flashPoint: lowest('flash-point'),
     };
   });
 }

@@ -8,5 +8,5 @@ export function potassiumShare({ alkali }: Pick<Charge, 'alkali'>): number {
     all += moles;
     if (supply.cation === 'K') potassium += moles;
   }
-  return (100 * potassium) / all;
+  return 100 * (potassium / all);
 }

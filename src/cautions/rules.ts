@@ -13,6 +13,7 @@ import { rule as concessionInForce } from './rules/concession-in-force.ts';
 import { rule as fastTrace } from './rules/fast-trace.ts';
 import { rule as fragranceAboveMaximum } from './rules/fragrance-above-maximum.ts';
 import { rule as fragranceMaximumUnknown } from './rules/fragrance-maximum-unknown.ts';
+import { rule as fragranceNearFlashPoint } from './rules/fragrance-near-flash-point.ts';
 import { rule as freeAcidSeizes } from './rules/free-acid-seizes.ts';
 import { rule as freeAlkaliPossible } from './rules/free-alkali-possible.ts';
 import { rule as hardAndBrittle } from './rules/hard-and-brittle.ts';
@@ -44,6 +45,7 @@ export const RULES: { readonly [Id in CautionId]: CautionRule<Id> } = {
   'lye-heat-near-boiling': lyeHeatNearBoiling,
   'lye-heat-unknown': lyeHeatUnknown,
   'alcohol-near-heat': alcoholNearHeat,
+  'fragrance-near-flash-point': fragranceNearFlashPoint,
   'concession-in-force': concessionInForce,
   'superfat-margin-thin': superfatMarginThin,
   'after-cook-fats': afterCookFats,

@@ -199,6 +199,6 @@ export interface CautionDocument {
   readonly text: string;
   /** What to do. */
   readonly action: string;
-  /** A source id or `common practice, no source`. */
+  /** A source id, `common practice, no source`, or `reckoned here, see methods`. */
   readonly basis: string;
 }

@@ -26,6 +26,7 @@ export const LIMIT_UNITS = {
   'salt-share': '% of fats',
   'free-acid-share': '% of fats',
   'superfat-high': '% superfat',
+  'flash-point-margin': 'degC',
 } as const;
 export type LimitName = keyof typeof LIMIT_UNITS;
 

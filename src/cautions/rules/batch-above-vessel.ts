@@ -13,7 +13,7 @@ export const rule: CautionRule<'batch-above-vessel'> = {
     const limit = limits[document.process === 'hot' ? 'vessel-fill-hot' : 'vessel-fill-cold'].value;
     return document.batches.flatMap(({ id, label, total }) => {
       const vessel = reference.shop.batches.find((size) => size.id === id)?.vessel;
-      if (vessel === undefined || vessel === null || total === null) return [];
+      if (vessel === undefined || total === null) return [];
       const volume = total / BATTER_DENSITY;
       const fill = (100 * volume) / vessel;
       if (fill <= limit) return [];

@@ -2,7 +2,7 @@ import { fatShare } from '../fat-share.ts';
 import { materialNames } from '../material-names.ts';
 import type { CautionRule } from '../rule.ts';
 
-/** Fats that shorten the time to trace. */
+/** Fats that shorten the time to trace, in cold process. */
 export const rule: CautionRule<'fast-trace'> = {
   id: 'fast-trace',
   severity: 'note',
@@ -11,7 +11,7 @@ export const rule: CautionRule<'fast-trace'> = {
     const { limits, materials } = context.thresholds;
     const { ids, share } = fatShare(context, ({ id }) => materials['fast-trace'].ids.includes(id));
     const limit = limits['fast-trace-share'].value;
-    if (share < limit) return [];
+    if (context.formula.process !== 'cold' || share < limit) return [];
     return [{ materials: materialNames(context.reference, ids), share, limit }];
   },
 };

@@ -72,7 +72,13 @@ export const additivesSchema = z.record(
     allergens: z.array(z.enum(ALLERGENS)).optional(),
     substance: substance.optional(),
     values: z
-      .strictObject({ content: perHundred.optional(), water: perHundred.optional() })
+      .strictObject({
+        content: perHundred.optional(),
+        water: perHundred.optional(),
+        // of a fragrance: what its supplier allows in soap, and where its vapour catches fire
+        'maximum-in-product': perHundred.optional(),
+        'flash-point': valueIn('degC', 0, 250).optional(),
+      })
       .optional(),
     notes: z.array(line).optional(),
   }),

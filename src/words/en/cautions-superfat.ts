@@ -7,7 +7,7 @@ export const superfatCautions = {
   'free-alkali-possible': (n: { lowest: number; batch: string }) => ({
     text: `The superfat can fall to ${fixed(n.lowest, 2)} %${atSize(n.batch)}. Below zero the soap holds free alkali.`,
     action:
-      'Gloves for this soap until it is proved mild. Titrate every batch and hold it back while it shows free alkali above its limit.',
+      'Gloves on for this soap until it has passed. Titrate every batch and hold it back while it shows free alkali above its limit.',
   }),
   'superfat-margin-thin': (n: { lowest: number; limit: number; batch: string }) => ({
     text: `The lowest superfat is ${fixed(n.lowest, 2)} %${atSize(n.batch)}, under the ${plain(n.limit)} % that would forgive a slip.`,
@@ -23,11 +23,11 @@ export const superfatCautions = {
     action: 'Read the reason on the formula page and keep every condition in it.',
   }),
   'after-cook-fats': (n: { materials: string; percent: number }) => ({
-    text: `Joins after the cook: ${n.materials}, ${plain(n.percent, 1)} % of the fats. No alkali is reckoned for it, and it would hide free alkali.`,
+    text: `Joins after the cook: ${n.materials} (${plain(n.percent, 1)} % of the fats). No alkali is reckoned for it, and it would hide free alkali.`,
     action: 'Test the cooked soap for free alkali first. Only when it passes may this fat go in.',
   }),
   'wax-in-cold-process': (n: { materials: string; share: number }) => ({
-    text: `Wax in cold process: ${n.materials}, ${plain(n.share, 1)} % of the fats. The alkali is reckoned for it, yet it may hardly react.`,
+    text: `Wax in cold process: ${n.materials} (${plain(n.share, 1)} % of the fats). The alkali is reckoned for it, yet it may hardly react.`,
     action: 'Melt it right through and work warm. Test for free alkali before release.',
   }),
   'superfat-high': (n: { superfat: number; limit: number }) => ({

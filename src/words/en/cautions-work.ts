@@ -27,19 +27,19 @@ export const workCautions = {
       'No flame and no glowing plate in the room. Take the pot off the heat, let it cool below what the safety data sheet names, air the room, then add.',
   }),
   'heats-batter': (n: { materials: string; sugar: number }) => ({
-    text: `${n.materials}: sugars (${fixed(n.sugar, 1)} % of the fats) and alcohol heat the batter. It can crack, climb out of the mould, or scorch in the lye.`,
+    text: `${n.materials} (sugars: ${fixed(n.sugar, 1)} % of the fats) heats the batter. It can crack, climb out of the mould or, inside the lye, scorch.`,
     action: 'Work cool, leave moulds uncovered and apart, and keep watch for the first hours.',
   }),
   'salt-sets-fast': (n: { materials: string; percent: number; limit: number }) => ({
-    text: `${n.materials}, ${plain(n.percent, 1)} % of the fats: the bar sets within hours and then crumbles under a knife.`,
+    text: `${n.materials} (${plain(n.percent, 1)} % of the fats): the bar sets within hours and then crumbles under a knife.`,
     action: 'Use single moulds, or cut while it is still warm. It is caustic then: gloves on.',
   }),
   'free-acid-seizes': (n: { materials: string; share: number; limit: number }) => ({
-    text: `${n.materials}, ${plain(n.share, 1)} % of the fats: free acid reacts on contact, and the batter can turn to paste at once.`,
+    text: `${n.materials} (${plain(n.share, 1)} % of the fats): free acid reacts on contact, and the batter can turn to paste at once.`,
     action: 'Melt it fully into the other fats, keep the pot hot, and pour the lye slowly.',
   }),
   'fast-trace': (n: { materials: string; share: number; limit: number }) => ({
-    text: `${n.materials}, ${plain(n.share, 1)} % of the fats: the batter thickens early.`,
+    text: `${n.materials} (${plain(n.share, 1)} % of the fats): the batter thickens early.`,
     action: 'Set out moulds and additives before the lye meets the fats. Blend in short bursts.',
   }),
   'slow-trace': (n: { unsaturated: number; limit: number }) => ({
@@ -47,12 +47,22 @@ export const workCautions = {
     action: 'Be patient with the blender, and unmould only when the edge is firm.',
   }),
   'fragrance-maximum-unknown': (n: { materials: string; percent: number }) => ({
-    text: `${n.materials}, ${plain(n.percent, 1)} % of the fats: the data hold no supplier’s maximum for it, so nothing here checks the dose.`,
+    text: `${n.materials} (${plain(n.percent, 1)} % of the fats): the data hold no supplier’s maximum for it, so nothing here checks the dose.`,
     action:
       'Get the supplier’s maximum for soap, the allergen sheet and the flash point, and compare before making it.',
   }),
   'fragrance-above-maximum': (n: { materials: string; percent: number; maximum: number }) => ({
     text: `${n.materials}: ${fixed(n.percent, 2)} % of the released soap. The supplier’s maximum is ${plain(n.maximum, 2)} %.`,
     action: 'Do not make it. The formulator must lower the dose.',
+  }),
+  'fragrance-near-flash-point': (n: {
+    materials: string;
+    hottest: number;
+    flashPoint: number;
+    margin: number;
+  }) => ({
+    text: `${n.materials} has its flash point at ${fixed(n.flashPoint, 0)} °C, and this soap is worked at up to ${fixed(n.hottest, 0)} °C.`,
+    action:
+      'No flame and no glowing plate in the room. Let the soap cool before the fragrance goes in.',
   }),
 } as const;

@@ -1,0 +1,77 @@
+import type { FormulaDocument } from '../../src/formulary/document.ts';
+import type { Reference } from '../../src/reference/reference.ts';
+import type { lyeCautions } from '../../src/words/en/cautions-lye.ts';
+import type { Cases } from './cases.ts';
+import { alkaliLot } from './context.ts';
+
+const lye = (wish: Partial<FormulaDocument['lye']>) => (document: FormulaDocument) => ({
+  ...document,
+  lye: { ...document.lye, ...wish },
+});
+const sodiumLot =
+  (...lots: Parameters<typeof alkaliLot>) =>
+  (reference: Reference) => ({
+    ...reference,
+    lots: { fats: [], alkalis: [alkaliLot(...lots)] },
+  });
+const potassium = { sodium: 0, potassium: 100, basis: 'moles' } as const;
+
+export const LYE_CASES: Cases<keyof typeof lyeCautions> = {
+  'lye-heat-near-boiling': {
+    fires: { document: lye({ peakTemperature: 114, boilingPoint: 119 }) },
+    numbers: { peak: 114, boiling: 119 },
+    says: ['114 °C', '119 °C'],
+    silent: { document: lye({ peakTemperature: 113.9, boilingPoint: 119 }) },
+  },
+  'lye-heat-unknown': {
+    fires: { formula: { alkali: potassium } },
+    numbers: { potassium: 100 },
+    says: ['30 %', 'potassium hydroxide', 'it boils'],
+    silent: {},
+  },
+  'lye-stronger-than-written': {
+    // 30 % by 100/333: of 233 parts of water 11.5 kept back leave 100/321.5, 31.1 %
+    fires: { formula: { water: { form: 'lye-concentration', value: 30, holdBack: 5 } } },
+    numbers: { limit: 1 },
+    says: ['31.1 %', '30.0 %'],
+    silent: { formula: { water: { form: 'lye-concentration', value: 30, holdBack: 4 } } },
+  },
+  'lye-near-saturation': {
+    // 46 % at 20 and 50 % at 25 degC: 47.6 % at the 22 degC of the test's shop
+    fires: { document: lye({ pureAsMade: 42.7 }) },
+    numbers: { temperature: 22, percent: 42.7 },
+    says: ['42.7 %', '47.6 %', '22 °C'],
+    silent: { document: lye({ pureAsMade: 42.5 }) },
+  },
+  'potassium-lye': {
+    fires: { formula: { alkali: { sodium: 60, potassium: 40, basis: 'moles' } } },
+    numbers: {},
+    says: ['40 %'],
+    silent: {},
+  },
+  'stock-lye': {
+    fires: { reference: sodiumLot({ form: 'solution', assay: 50, carbonate: 0.1 }) },
+    numbers: { lot: 'T-1', assay: 50 },
+    says: ['T-1', '50.0 %', 'Sodium hydroxide'],
+    silent: { reference: sodiumLot() },
+  },
+  'alkali-without-lot': {
+    fires: { reference: sodiumLot({ status: 'quarantine' }) },
+    numbers: { low: 98, high: 99.5, reckoned: 99.5 },
+    says: ['Sodium hydroxide', '99.5 %'],
+    silent: { reference: sodiumLot() },
+  },
+  'alkali-lot-retest': {
+    fires: { reference: sodiumLot({ retestBy: '2027-01-30' }), asOf: '2026-12-31' },
+    numbers: { days: 30, lot: 'T-1' },
+    says: ['2027-01-30', '30 days', 'T-1'],
+    silent: { reference: sodiumLot({ retestBy: '2027-01-31' }), asOf: '2026-12-31' },
+  },
+  'lye-and-metals': {
+    fires: {},
+    numbers: {},
+    says: ['30 %', 'aluminium', 'zinc', 'tin'],
+    // holds for every lye
+    silent: null,
+  },
+};
