@@ -78,7 +78,7 @@ export function molarMassIn(
     report.in(path, 'data/molecular-formula', {
       found: `formula "${formula}"`,
       expected: `symbols of ${[...weights.keys()].join(', ')} with counts`,
-      advice: error.message,
+      advice: 'mend the formula, or add the element to data/elements.yaml',
     });
     return null;
   }

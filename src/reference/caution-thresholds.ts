@@ -8,6 +8,7 @@ export const COMMON_PRACTICE = 'common practice, no source';
 export const LIMIT_UNITS = {
   'superfat-margin': '% superfat',
   'lye-boiling-margin': 'degC',
+  'lye-heat': 'degC',
   'saturation-margin': 'percentage points',
   'lye-strengthened': 'percentage points',
   'vessel-fill-cold': '% of vessel',

@@ -4,8 +4,8 @@ import { distance } from 'fastest-levenshtein';
 export function didYouMean(found: string, candidates: Iterable<string>, otherwise: string): string {
   const wanted = found.toLowerCase().replaceAll(/[ _]+/g, '-');
   let nearest: string | null = null;
-  // a third of the letters may differ: more than that is another word
-  let limit = Math.max(1, Math.floor(wanted.length / 3)) + 1;
+  // a third of the letters may differ, two of five for letters that changed places; more is another word
+  let limit = (wanted.length < 5 ? 1 : Math.max(2, Math.floor(wanted.length / 3))) + 1;
   for (const candidate of candidates) {
     const difference = distance(wanted, candidate.toLowerCase());
     if (difference < limit) {

@@ -48,12 +48,13 @@ function assemble(raw: RawData): Reference | null {
   const constants = constantsFrom(weights);
   const acids = acidRecords(raw.acids.value, weights, constants, raw.acids.report);
 
+  const acidIds = new Set(Object.keys(raw.acids.value));
   const fats = new Map<string, FatRecord>();
   for (const { id, file, opened } of raw.fats) {
     if (!opened) continue;
     const fat = fatRecord(id, file, opened.value, acids);
     fats.set(id, fat);
-    lintFat(fat, opened.value.exceptions ?? [], { constants, acids, sources }, opened.report);
+    lintFat(fat, opened.value.exceptions ?? [], { constants, acidIds, sources }, opened.report);
   }
   // a fat whose file is broken is known: its own problems are enough
   const fatIds = new Set(raw.fats.map(({ id }) => id));

@@ -1,13 +1,14 @@
 import type { Constants } from '../../chemistry/constants.ts';
 import type { DataRule } from '../../words/en/problems-data.ts';
-import type { AcidRecord, FatRecord, Source } from '../reference.ts';
+import type { FatRecord, Source } from '../reference.ts';
 import type { ProblemParts } from '../report.ts';
 import type { YamlPath } from '../yaml.ts';
 
 /** What a check may look at. */
 export interface LintContext {
   readonly constants: Constants;
-  readonly acids: ReadonlyMap<string, AcidRecord>;
+  /** Of all fatty acids that have a record, even a broken one: that is told where it stands. */
+  readonly acidIds: ReadonlySet<string>;
   readonly sources: ReadonlyMap<string, Source>;
 }
 

@@ -5,7 +5,7 @@ import { line } from './value.ts';
 const origin = { basis: line, because: line };
 
 const limit = (unit: string) =>
-  z.strictObject({ value: z.number().gte(0).lte(100), unit: z.literal(unit), ...origin });
+  z.strictObject({ value: z.number().gte(0).lte(200), unit: z.literal(unit), ...origin });
 
 const list = z.strictObject({ ids: z.array(z.string()).min(1), ...origin });
 
