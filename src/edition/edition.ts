@@ -72,7 +72,17 @@ export function editionProblems(
     ...inUse.flatMap(({ formula, fingerprint }) =>
       approvalProblems(formula, fingerprint, asOf, severity),
     ),
-    ...ledgerProblems(printed, ledger, { file: names.ledger, severity }),
+    ...ledgerProblems(
+      printed.map(({ formula, fingerprint }) => ({
+        code: formula.code,
+        revision: formula.revision,
+        fingerprint: formula.withdrawn ? null : fingerprint,
+        approvedOn: formula.approval?.on ?? null,
+        placeOf: (path) => ({ file: formula.file, ...formula.places.get(path) }),
+      })),
+      ledger,
+      { file: names.ledger, severity },
+    ),
   ];
 }
 

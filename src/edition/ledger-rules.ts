@@ -1,7 +1,17 @@
-import type { Formula } from '../formulary/formula.ts';
 import type { Problem } from '../reference/problem.ts';
-import { editionProblem } from './edition-problem.ts';
+import { editionProblem, type ProblemPlace } from './edition-problem.ts';
 import { type LedgerEntry, type PublishedEntry, publishedIn } from './ledger.ts';
+
+/** A formula that is about to be published. */
+export interface Candidate {
+  readonly code: string;
+  readonly revision: number;
+  /** `null` for a withdrawn one. */
+  readonly fingerprint: string | null;
+  readonly approvedOn: string | null;
+  /** Where a key of its file stands. */
+  readonly placeOf: (path: string) => ProblemPlace;
+}
 
 /**
  * Holds formulas against what was published: a revision says one thing for ever, revisions do not go back,
@@ -9,21 +19,17 @@ import { type LedgerEntry, type PublishedEntry, publishedIn } from './ledger.ts'
  * edition the same are warnings.
  */
 export function ledgerProblems(
-  formulas: readonly { readonly formula: Formula; readonly fingerprint: string }[],
+  candidates: readonly Candidate[],
   ledger: readonly LedgerEntry[],
   { file, severity }: { readonly file: string; readonly severity: Problem['severity'] },
 ): readonly Problem[] {
   const published = publishedIn(ledger);
-  const codes = new Set(formulas.map(({ formula }) => formula.code));
+  const codes = new Set(candidates.map(({ code }) => code));
   return [
-    ...formulas.flatMap(({ formula, fingerprint }) =>
-      formula.withdrawn
-        ? []
-        : [
-            ...revisionProblems(formula, fingerprint, published, severity),
-            ...returnProblems(formula, published, severity),
-          ],
-    ),
+    ...candidates.flatMap((candidate) => [
+      ...revisionProblems(candidate, published, severity),
+      ...returnProblems(candidate, published, severity),
+    ]),
     ...vanished(codes, published).map(({ code, asOf }) =>
       editionProblem(
         { file },
@@ -40,13 +46,12 @@ export function ledgerProblems(
 }
 
 function revisionProblems(
-  formula: Formula,
-  fingerprint: string,
+  { code, revision, fingerprint, placeOf }: Candidate,
   published: readonly PublishedEntry[],
   severity: Problem['severity'],
 ): readonly Problem[] {
-  const { code, revision, file, places } = formula;
-  const at = { file, ...places.get('revision') };
+  if (fingerprint === null) return [];
+  const at = placeOf('revision');
   const earlier = published.flatMap(({ asOf, formulas }) =>
     formulas.filter((entry) => entry.code === code).map((entry) => ({ ...entry, asOf })),
   );
@@ -72,19 +77,18 @@ function revisionProblems(
 }
 
 function returnProblems(
-  { code, approval, file, places }: Formula,
+  { code, fingerprint, approvedOn, placeOf }: Candidate,
   published: readonly PublishedEntry[],
   severity: Problem['severity'],
 ): readonly Problem[] {
   const last = published.at(-1)?.withdrawn.find((entry) => entry.code === code);
-  if (!last || !approval || approval.on > last.on) return [];
+  if (!last || fingerprint === null || approvedOn === null || approvedOn > last.on) return [];
   const parts = {
-    found: `${code}, withdrawn on ${last.on}, with an approval of ${approval.on}`,
+    found: `${code}, withdrawn on ${last.on}, with an approval of ${approvedOn}`,
     expected: 'an approval after the withdrawal',
     advice: `npm run approve -- ${code} --by NAME --until DATE`,
   };
-  const at = { file, ...places.get('approval.on') };
-  return [editionProblem(at, 'edition/back-without-approval', parts, severity)];
+  return [editionProblem(placeOf('approval.on'), 'edition/back-without-approval', parts, severity)];
 }
 
 /** Codes of the last published edition that are not among `codes`, with the date of that edition. */
