@@ -22,6 +22,7 @@ import { rule as hotProcessBoilOver } from './rules/hot-process-boil-over.ts';
 import { rule as lyeAndMetals } from './rules/lye-and-metals.ts';
 import { rule as lyeHeatNearBoiling } from './rules/lye-heat-near-boiling.ts';
 import { rule as lyeHeatUnknown } from './rules/lye-heat-unknown.ts';
+import { rule as lyeHot } from './rules/lye-hot.ts';
 import { rule as lyeNearSaturation } from './rules/lye-near-saturation.ts';
 import { rule as lyeStrongerThanWritten } from './rules/lye-stronger-than-written.ts';
 import { rule as oxidisesEarly } from './rules/oxidises-early.ts';
@@ -51,6 +52,7 @@ export const RULES: { readonly [Id in CautionId]: CautionRule<Id> } = {
   'after-cook-fats': afterCookFats,
   'wax-in-cold-process': waxInColdProcess,
   'hot-process-boil-over': hotProcessBoilOver,
+  'lye-hot': lyeHot,
   'lye-stronger-than-written': lyeStrongerThanWritten,
   'lye-near-saturation': lyeNearSaturation,
   'potassium-lye': potassiumLye,

@@ -23,6 +23,12 @@ export const LYE_CASES: Cases<keyof typeof lyeCautions> = {
     says: ['114 °C', '119 °C'],
     silent: { document: lye({ peakTemperature: 113.9, boilingPoint: 119 }) },
   },
+  'lye-hot': {
+    fires: { document: lye({ peakTemperature: 115, boilingPoint: 124 }) },
+    numbers: { peak: 115, limit: 115 },
+    says: ['115 °C', 'steel'],
+    silent: { document: lye({ peakTemperature: 114.9, boilingPoint: 124 }) },
+  },
   'lye-heat-unknown': {
     fires: { formula: { alkali: potassium } },
     numbers: { potassium: 100 },

@@ -74,3 +74,23 @@ test('every rule stands under its own id with a severity that is known', () => {
     expect(SEVERITIES).toContain(rule.severity);
   }
 });
+
+test('a lye near boiling is not called hot a second time', () => {
+  const found = cautions({
+    document: (document) => ({
+      ...document,
+      lye: { ...document.lye, peakTemperature: 118, boilingPoint: 120 },
+    }),
+  }).map(({ id }) => id);
+  expect(found).toContain('lye-heat-near-boiling');
+  expect(found).not.toContain('lye-hot');
+});
+
+test('acid that is dissolved in the lye brings it near boiling, by the model and the data', () => {
+  const strong = { form: 'lye-concentration', value: 32, holdBack: 0 } as const;
+  const acid = { additive: 'citric-acid-monohydrate', percentOfFats: 2, at: 'lye' } as const;
+  const ids = (formula: Wish['formula']) =>
+    cautions({ formula: { ...formula } }).map(({ id }) => id);
+  expect(ids({ water: strong, additives: [acid] })).toContain('lye-heat-near-boiling');
+  expect(ids({ water: strong })).not.toContain('lye-heat-near-boiling');
+});

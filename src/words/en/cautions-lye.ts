@@ -9,6 +9,10 @@ export const lyeCautions = {
     text: `Made in one go, this lye can heat itself to ${fixed(n.peak, 0)} °C. It boils at ${fixed(n.boiling, 0)} °C.`,
     action: STRONG_LYE,
   }),
+  'lye-hot': (n: { peak: number; limit: number }) => ({
+    text: `Made in one go, this lye can heat itself to ${fixed(n.peak, 0)} °C, hotter than many plastics bear.`,
+    action: `Use a steel jug. ${STRONG_LYE}`,
+  }),
   'lye-heat-unknown': (n: { asMade: number; potassium: number }) => ({
     text: `How hot this lye of ${fixed(n.asMade, 0)} % gets is not known${n.potassium > 0 ? ': there are no data for potassium hydroxide' : ''}. Take it that it boils.`,
     action: STRONG_LYE,
