@@ -1,13 +1,23 @@
-import { mkdirSync, readdirSync } from 'node:fs';
-import { isAbsolute, relative, resolve } from 'node:path';
+import { mkdirSync, mkdtempSync, readdirSync, rmSync } from 'node:fs';
+import { isAbsolute, join, relative, resolve } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { build } from 'astro';
+import {
+  dropPrevious,
+  healSwap,
+  mayBeReplaced,
+  moveFolder,
+  swap,
+  swapFolders,
+} from '../edition/swap-fs.ts';
 import { isCalendarDate } from '../formulary/calendar-date.ts';
 import { handOver } from '../site/input.ts';
 import { counted, problemSummary, problemText } from '../words/problem-text.ts';
 import { FOLDERS, readArguments } from './arguments.ts';
 import { loadSite, today } from './load-site.ts';
-import { healSwap, mayBeReplaced, swap, swapFolders } from './swap-fs.ts';
+
+// the build must not tell anybody that it ran
+process.env.ASTRO_TELEMETRY_DISABLED = '1';
 
 const PROJECT = fileURLToPath(new URL('../..', import.meta.url));
 
@@ -60,21 +70,24 @@ export async function main(args: readonly string[]): Promise<number> {
   const count = loaded.input.formulary.formulas.length;
   console.log(`Building ${counted(count, 'formula')} as of ${asOf} ...`);
   handOver(loaded.input);
-  mkdirSync(folders.next, { recursive: true });
+  const work = workFolder();
+  const here = process.cwd();
   try {
-    await build({
-      root: PROJECT,
-      outDir: folders.next,
-      logLevel: 'error',
-      vite: { logLevel: 'error' },
-    });
+    // Astro looks at the folder it runs in to choose where its own output goes
+    process.chdir(PROJECT);
+    await build({ root: PROJECT, outDir: work, logLevel: 'error', vite: { logLevel: 'error' } });
+    moveFolder(work, folders.next);
   } catch (error) {
     healSwap(folders);
+    rmSync(work, { recursive: true, force: true });
     console.error(error instanceof Error ? error.message : error);
     console.error('The build failed. The published folder is as it was.');
     return 1;
+  } finally {
+    process.chdir(here);
   }
   swap(folders);
+  dropPrevious(folders);
   const pages = readdirSync(folders.current, { recursive: true }).filter((file) =>
     String(file).endsWith('.html'),
   ).length;
@@ -83,6 +96,13 @@ export async function main(args: readonly string[]): Promise<number> {
     `${relative('.', folders.current) || '.'}: ${counted(count, 'formula')}, ${counted(pages, 'page')}, ${seconds} s`,
   );
   return 0;
+}
+
+/** While it builds, Astro runs its own output, which must lie where its packages can be found. */
+function workFolder(): string {
+  const cache = join(PROJECT, '.cache');
+  mkdirSync(cache, { recursive: true });
+  return mkdtempSync(join(cache, 'build-'));
 }
 
 /** Whether `inner` is `outer` or lies within it. */

@@ -9,6 +9,9 @@ import { counted, problemSummary, problemText } from '../words/problem-text.ts';
 import { FOLDERS, readArguments } from './arguments.ts';
 import { loadSite, today } from './load-site.ts';
 
+// the preview must not tell anybody that it ran
+process.env.ASTRO_TELEMETRY_DISABLED = '1';
+
 const PROJECT = fileURLToPath(new URL('../..', import.meta.url));
 /** Editors save in several steps; one reload is enough. [ms] */
 const SETTLE = 120;

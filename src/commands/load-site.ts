@@ -1,4 +1,6 @@
 import { resolve } from 'node:path';
+import { withCautions } from '../cautions/with-cautions.ts';
+import { withDigests } from '../edition/with-digests.ts';
 import type { ShopFolders } from '../formulary/formulary.ts';
 import { loadFormulary } from '../formulary/load.ts';
 import type { Problem } from '../formulary/problem.ts';
@@ -12,11 +14,17 @@ export type LoadedSite =
 export function loadSite(folders: ShopFolders, asOf: string): LoadedSite {
   const loaded = loadFormulary(folders);
   if (!loaded.ok) return loaded;
-  const { formulary, problems } = loaded;
+  const { reference, formulas } = withDigests(withCautions(loaded.formulary, asOf));
+  // what is withdrawn reaches no page and no file
+  const inUse = formulas.filter(({ formula }) => !formula.withdrawn);
   return {
     ok: true,
-    problems,
-    input: { formulary, asOf, formulasFolder: resolve(folders.formulas) },
+    problems: loaded.problems,
+    input: {
+      formulary: { reference, formulas: inUse },
+      asOf,
+      formulasFolder: resolve(folders.formulas),
+    },
   };
 }
 

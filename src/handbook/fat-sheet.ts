@@ -74,7 +74,7 @@ export function recordRows(fat: FatRecord): readonly RecordRow[] {
       what,
       record,
       text: recordText(record),
-      unit: record.unit,
+      unit: record.unit === '1' ? '' : record.unit,
       role: record === used ? usedHere : record === chosen.loweredBy ? lowersValue : null,
     })),
   );

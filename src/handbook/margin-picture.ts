@@ -16,7 +16,8 @@ export interface MarginPicture {
 export function marginPicture({ superfat }: FormulaDocument): MarginPicture {
   const { written, expanded, worstCase } = superfat;
   const low = Math.floor(Math.min(0, written, expanded[0], worstCase[0]) - 1);
-  const high = Math.ceil(Math.max(0, written, expanded[1], worstCase[1]) + 1);
+  // at least four points wide, so that there are ticks to read distances from
+  const high = Math.max(low + 4, Math.ceil(Math.max(0, written, expanded[1], worstCase[1]) + 1));
   const at = (value: number) => Number(((100 * (value - low)) / (high - low)).toFixed(3));
   const span = high - low;
   const step = span > 24 ? 5 : span > 12 ? 2 : 1;

@@ -50,10 +50,20 @@ export function methodHtml(formula: Formula, batch: BatchDocument | null): strin
   // the plugin's types list only the nodes of plain Markdown
   const options: Options = { handlers: { textDirective } as Options['handlers'] & object };
   const tree: HastRoot = remark().use(remarkRehype, options).runSync(formula.method);
+  dropMethodHeading(tree);
   visit(tree, 'element', (element: Element) => {
     adjust(element);
   });
   return toHtml(sanitize(tree as Nodes, ALLOWED));
+}
+
+/** The page has a heading of its own for the method. */
+function dropMethodHeading(tree: HastRoot): void {
+  const at = tree.children.findIndex(({ type }) => type === 'element');
+  const first = tree.children[at];
+  if (first?.type !== 'element' || first.tagName !== 'h2') return;
+  const [text] = first.children;
+  if (text?.type === 'text' && text.value === 'Method') tree.children.splice(at, 1);
 }
 
 function adjust(element: Element): void {

@@ -6,10 +6,10 @@ const STYLE =
 
 /** The page that stands in for every other in the preview while a file is broken. It reloads when that ends. */
 export function problemsPage(problems: readonly Problem[]): string {
-  const summary = escape(problemSummary(problems));
-  const items = problems.map((problem) => `<li>${escape(problemText(problem))}</li>`).join('');
+  const summary = escaped(problemSummary(problems));
+  const items = problems.map((problem) => `<li>${escaped(problemText(problem))}</li>`).join('');
   return `<!doctype html><html lang="en"><meta charset="utf-8"><title>${summary}</title><style>${STYLE}</style><script type="module" src="/@vite/client"></script><h1>${summary}</h1><ul>${items}</ul></html>`;
 }
 
-const escape = (text: string) =>
+const escaped = (text: string) =>
   text.replaceAll('&', '&amp;').replaceAll('<', '&lt;').replaceAll('>', '&gt;');

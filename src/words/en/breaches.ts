@@ -13,7 +13,9 @@ const reasons: Readonly<Record<string, (numbers: Numbers) => string>> = {
     `Rounding to the scale would move the superfat from ${of(n, 'written')} % to ${of(n, 'weighed')} %, by more than the ${of(n, 'allowed')} points that the shop allows. The size is too small for this scale.`,
   'weight-below-scale-step': () =>
     'One of the weights is smaller than half a step of the scale and would round to nothing.',
-  'weight-above-capacity': () => 'One of the weights is more than the scale takes.',
+  'weight-above-scale-capacity': (n) =>
+    `One of the weights would be ${of(n, 'mass', 0)} g, more than the ${of(n, 'capacity', 0)} g that the scale takes.`,
+  'scale-not-known': () => 'The shop’s data name no scale for this size.',
   'stock-weaker-than-lye': () =>
     'The stock lye already holds more water than the formula asks for. It cannot be made stronger by adding water.',
   'liquids-need-more-alkali-than-they-leave-water-for': () =>

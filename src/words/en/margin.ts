@@ -5,7 +5,6 @@ export const marginWords = {
   expanded: 'expanded interval',
   worst: 'worst case',
   freeAlkali: 'free alkali from here',
-  axis: 'superfat, %',
   summary: (
     written: number,
     expanded: readonly [number, number],
@@ -18,10 +17,10 @@ export const marginWords = {
     'The expanded interval reaches below zero. Free alkali is possible in ordinary work; measure before release.',
   clear:
     'Both intervals stay above zero: no free alkali is expected from the spread of the materials.',
+  method: 'How the margin is reckoned',
   scaleLeftOut: 'The scale is left out here; each batch size above counts its own.',
   budgetTitle: 'What moves it most',
-  budget: (percent: number) => `± ${fixed(percent, 2)}`,
   budgetUnit: 'percentage points, k = 2',
-  assay: (name: string) => `assay of ${name}`,
-  scale: 'scale',
+  assay: (name: string) => `${name}, assay`,
+  scale: 'Scale',
 } as const;

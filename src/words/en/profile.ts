@@ -30,7 +30,7 @@ export const propertyNames = {
   moistureReleased: 'Water, at release',
   columns: { measure: 'Measure', value: 'Value', unit: 'Unit', method: 'Method' },
   method: 'method',
-  noNumber: 'no number',
+  noNumber: 'No number',
 } as const;
 
 export const propertyUnits = {
@@ -39,5 +39,5 @@ export const propertyUnits = {
   iodine: 'g I₂/100 g',
   carbons: 'carbons',
   celsius: '°C',
-  none: '1',
+  none: 'no unit',
 } as const;
