@@ -30,7 +30,7 @@ export interface PendingApproval {
   readonly last: ApprovedEntry | null;
   /** g for 1000 g of fats, with published values. */
   readonly weights: WeightsPerKilogram;
-  /** Old and new side by side; empty where there is no record of an approval. */
+  /** Old and new side by side; nothing old where there is no record of an approval. */
   readonly moves: readonly WeightMove[];
   readonly shop: string;
   readonly ledger: string;
@@ -42,6 +42,16 @@ export interface PendingApproval {
 export type Prepared =
   | { readonly ok: true; readonly pending: PendingApproval }
   | { readonly ok: false; readonly problems: readonly Problem[] };
+
+const NOTHING: WeightsPerKilogram = {
+  fats: [],
+  afterCookFats: [],
+  alkali: [],
+  water: 0,
+  heldBack: 0,
+  liquids: [],
+  additives: [],
+};
 
 /**
  * Looks at everything an approval needs and writes nothing: names and dates, one sound formula with that
@@ -100,7 +110,7 @@ export function prepareApproval(
       stateBefore: approvalOf(formula, fingerprint, request.on),
       last,
       weights,
-      moves: last ? weightMoves(last.weights, weights) : [],
+      moves: weightMoves(last?.weights ?? NOTHING, weights),
       shop: reference.shop.name,
       ledger: ledgerFile,
       approval,

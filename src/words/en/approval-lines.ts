@@ -11,11 +11,6 @@ interface Pending {
     readonly by: string;
     readonly on: string;
   } | null;
-  readonly weights: {
-    readonly water: number;
-    readonly alkali: readonly { readonly id: string; readonly mass: number }[];
-    readonly fats: readonly { readonly id: string; readonly mass: number }[];
-  };
   readonly moves: readonly {
     readonly part: string;
     readonly id: string;
@@ -40,15 +35,14 @@ export function approvalLines(pending: Pending): readonly string[] {
   return [
     `${formula.code} ${formula.name}, revision ${formula.revision}, fingerprint ${fingerprint}`,
     STATES[stateBefore] ?? stateBefore,
-    ...(last ? sinceLast(last, fingerprint, moves) : firstTime(pending.weights)),
+    ...(last ? sinceLast(last, fingerprint, moves) : firstTime(moves)),
   ];
 }
 
-function firstTime({ alkali, water, fats }: Pending['weights']): readonly string[] {
-  const lines = [...alkali, { id: 'water', mass: water }, ...fats];
+function firstTime(moves: Pending['moves']): readonly string[] {
   return [
     `The ledger holds no approval of it. Weights (${UNIT}):`,
-    ...lines.map(({ id, mass }) => `  ${id.padEnd(26)} ${amount(mass)}`),
+    ...moves.map((move) => `  ${nameOf(move).padEnd(26)} ${amount(move.after)}`),
   ];
 }
 
@@ -69,17 +63,17 @@ function sinceLast(
     `Since ${before} (${UNIT}):`,
     `  ${''.padEnd(26)} ${'old'.padStart(10)} ${'new'.padStart(10)} ${'moved'.padStart(10)}`,
     ...moves.map((move) => {
-      const name = [WATER[move.part] ?? move.id, move.at && `(${move.at})`]
-        .filter(Boolean)
-        .join(' ');
       const { before, after } = move;
       const by = before === after ? '' : signed((after ?? 0) - (before ?? 0));
-      return `  ${name.padEnd(26)} ${amount(before)} ${amount(after)} ${by.padStart(10)}`.trimEnd();
+      return `  ${nameOf(move).padEnd(26)} ${amount(before)} ${amount(after)} ${by.padStart(10)}`.trimEnd();
     }),
   ];
 }
 
 const WATER: Readonly<Record<string, string>> = { water: 'water', heldBack: 'water held back' };
+
+const nameOf = ({ part, id, at }: Pending['moves'][number]) =>
+  (WATER[part] ?? id) + (at === null ? '' : ` (${at})`);
 
 const amount = (mass: number | null) => (mass === null ? '-' : fixed(mass, 2)).padStart(10);
 const signed = (mass: number) => `${mass > 0 ? '+' : ''}${fixed(mass, 2)}`;
