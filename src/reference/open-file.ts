@@ -4,7 +4,8 @@ import type { DataFile } from './data-files.ts';
 import type { Problem } from './problem.ts';
 import { type DataReport, dataProblem, reportOn } from './report.ts';
 import { fit } from './schema-problems.ts';
-import { parseYaml, type YamlFault } from './yaml.ts';
+import { parseYaml } from './yaml.ts';
+import type { YamlFault } from './yaml-faults.ts';
 
 const RULE_OF_FAULT: Readonly<Record<YamlFault['kind'], DataRule>> = {
   syntax: 'data/yaml',

@@ -1,15 +1,5 @@
-import {
-  type Document,
-  isAlias,
-  isMap,
-  isNode,
-  isPair,
-  isScalar,
-  LineCounter,
-  type Node,
-  parseDocument,
-  visit,
-} from 'yaml';
+import { isMap, isNode, isScalar, LineCounter, parseDocument } from 'yaml';
+import { faultsOf, type YamlFault } from './yaml-faults.ts';
 
 /** 1-based, in the whole file. */
 export interface Place {
@@ -19,14 +9,6 @@ export interface Place {
 
 /** `['fats', 0, 'share']`. */
 export type YamlPath = readonly PropertyKey[];
-
-/** Why a text could not be taken as it stands; the caller gives it its rule id. */
-export interface YamlFault extends Place {
-  readonly kind: 'syntax' | 'tab' | 'duplicate-key' | 'anchor';
-  readonly found: string;
-  readonly expected: string;
-  readonly advice: string;
-}
 
 export interface ReadYaml {
   /** Plain value; `null` where there are faults. */
@@ -57,13 +39,7 @@ export function parseYaml(text: string, { firstLine = 1 }: { firstLine?: number 
     prettyErrors: false,
     version: '1.2',
   });
-  const faults = [
-    ...firstOfEachKind(document.errors).map((error) => ({
-      ...placeAt(error.pos[0]),
-      ...describe(error),
-    })),
-    ...forbidden(document, placeAt),
-  ];
+  const faults = faultsOf(document, placeAt);
   const start = placeAt(isNode(document.contents) ? (document.contents.range?.[0] ?? 0) : 0);
   if (faults.length > 0) return failed(faults, start);
   const offsetOf = (node: unknown) => (isNode(node) && node.range ? node.range[0] : null);
@@ -109,85 +85,4 @@ function failed(faults: readonly YamlFault[], start: Place): ReadYaml {
     placeOfKey: () => start,
     writtenAt: () => null,
   };
-}
-
-/** Duplicate keys each count; of slips in the writing only the first, since the rest follow from it. */
-function firstOfEachKind<E extends { readonly code: string }>(errors: readonly E[]): readonly E[] {
-  const slip = errors.find(({ code }) => code !== 'DUPLICATE_KEY');
-  return errors.filter((error) => error === slip || error.code === 'DUPLICATE_KEY');
-}
-
-function describe(error: {
-  readonly code: string;
-  readonly message: string;
-}): Omit<YamlFault, 'line' | 'column'> {
-  switch (error.code) {
-    case 'RESOURCE_EXHAUSTION':
-      return {
-        kind: 'syntax',
-        found: 'lists inside lists without end',
-        expected: 'a few levels',
-        advice: 'write the file as the others are written',
-      };
-    case 'MULTIPLE_DOCS':
-      return {
-        kind: 'syntax',
-        found: 'a line "---" inside the file',
-        expected: 'one document',
-        advice: 'remove the line',
-      };
-    case 'DUPLICATE_KEY':
-      return {
-        kind: 'duplicate-key',
-        found: 'a key that stands there twice',
-        expected: 'each key once',
-        advice: 'remove one of the two',
-      };
-    case 'TAB_AS_INDENT':
-      return {
-        kind: 'tab',
-        found: 'a tab at the start of a line',
-        expected: 'spaces',
-        advice: 'replace the tab with two spaces',
-      };
-    default:
-      return {
-        kind: 'syntax',
-        found: `text that cannot be read as YAML (${error.message.replace(/\s+/g, ' ')})`,
-        expected: 'keys, values and lists',
-        advice: 'look for a missing quote, bracket, colon or space just before this place',
-      };
-  }
-}
-
-/** What YAML allows and no file here needs. */
-function forbidden(document: Document.Parsed, placeAt: (offset: number) => Place): YamlFault[] {
-  const faults: YamlFault[] = [];
-  const anchor = (node: Node, found: string) => {
-    faults.push({
-      ...placeAt(node.range?.[0] ?? 0),
-      kind: 'anchor',
-      found,
-      expected: 'the value itself',
-      advice: 'write the value out where it is needed',
-    });
-  };
-  visit(document, (_, node) => {
-    if (isAlias(node)) anchor(node, `the alias "*${node.source}"`);
-    else if (isPair(node)) {
-      if (isScalar(node.key) && node.key.value === '<<') anchor(node.key, 'the merge key "<<"');
-      else if (isNode(node.key) && !isScalar(node.key) && !isAlias(node.key)) {
-        faults.push({
-          ...placeAt(node.key.range?.[0] ?? 0),
-          kind: 'syntax',
-          found: 'a key that is a list',
-          expected: 'a word',
-          advice: 'write the key as one word before the colon',
-        });
-      }
-    } else if (isNode(node) && 'anchor' in node && typeof node.anchor === 'string') {
-      anchor(node, `the anchor "&${node.anchor}"`);
-    }
-  });
-  return faults;
 }

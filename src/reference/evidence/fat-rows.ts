@@ -67,7 +67,11 @@ function toleranceFor(
   published: ValueRecord,
 ): number {
   const middle = published.value ?? middleOf(published);
-  if (published.statistic !== 'range' || published.how === 'measured') {
+  if (
+    published.statistic !== 'range' ||
+    published.samples !== null ||
+    published.how === 'measured'
+  ) {
     return group === 'iodine-value' ? IODINE_SAMPLES : SAMPLES * middle;
   }
   return published.source === record.chosen.composition?.source ? 0 : OTHER_SOURCE * middle;
