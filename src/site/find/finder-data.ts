@@ -1,0 +1,57 @@
+import type { Formulary } from '../../formulary/formulary.ts';
+import type { FinderData, Property } from '../../search/finder/finder-data.ts';
+import { findWords } from '../../words/en/find.ts';
+import { traitsOf } from './finder-traits.ts';
+import { NUMBER_PROPERTIES } from './number-properties.ts';
+
+/** Acids below this in every formula are traces of the standards' ranges. [percent of the fatty acids] */
+const LEAST_ACID = 0.5;
+
+/** All that the finder knows of a formulary. Properties and traits that no formula has are left out. */
+export function finderData(formulary: Formulary): FinderData {
+  const { formulas } = formulary;
+  const properties = NUMBER_PROPERTIES.map(
+    ({ id, group, format, decimals, value }): Property => ({
+      id,
+      name: findWords.properties[id][0],
+      unit: findWords.properties[id][1],
+      group: findWords.groups[group],
+      format,
+      decimals,
+      values: formulas.map((computed) => rounded(value(computed), decimals)),
+    }),
+  );
+  return {
+    codes: formulas.map(({ document }) => document.code),
+    names: formulas.map(({ document }) => document.name),
+    properties: [...properties, ...acidProperties(formulary)].filter(({ values }) =>
+      values.some((value) => value !== null),
+    ),
+    traits: traitsOf(formulary).filter(({ choices }) => choices.length > 0),
+  };
+}
+
+function acidProperties({ formulas, reference }: Formulary): readonly Property[] {
+  const acids = [
+    ...new Set(formulas.flatMap(({ document }) => Object.keys(document.profile?.acids ?? {}))),
+  ].sort((a, b) => (a < b ? -1 : 1));
+  return acids
+    .map((acid): Property => {
+      const values = formulas.map(({ document }) =>
+        document.profile ? rounded(document.profile.acids[acid] ?? 0, 1) : null,
+      );
+      return {
+        id: acid.toLowerCase().replaceAll(':', '-'),
+        name: `${reference.acids.get(acid)?.name ?? acid} ${acid}`,
+        unit: findWords.percent,
+        group: findWords.groups.acids,
+        format: 'number',
+        decimals: 1,
+        values,
+      };
+    })
+    .filter(({ values }) => values.some((value) => (value ?? 0) >= LEAST_ACID));
+}
+
+const rounded = (value: number | null, decimals: number) =>
+  value === null ? null : Number(value.toFixed(decimals)) + 0;

@@ -1,0 +1,95 @@
+import type { ComputedFormula, Formulary } from '../../formulary/formulary.ts';
+import { nameOf } from '../../handbook/names.ts';
+import type { Trait } from '../../search/finder/finder-data.ts';
+import { findWords } from '../../words/en/find.ts';
+import { frame } from '../../words/en/frame.ts';
+
+interface TraitSource {
+  readonly id: keyof typeof findWords.traits;
+  readonly holds: 'one' | 'many';
+  readonly only?: true;
+  readonly of: (computed: ComputedFormula) => readonly string[];
+  readonly name: (id: string) => string;
+}
+
+/** What every formula of the formulary is or has; choices that no formula has are left out. */
+export function traitsOf({ formulas, reference }: Formulary): readonly Trait[] {
+  const material = (id: string) => nameOf(reference, id);
+  const labels = new Map(
+    formulas.flatMap(({ document }) =>
+      document.batches.map(({ id, label }) => [id, label] as const),
+    ),
+  );
+  const sources: readonly TraitSource[] = [
+    {
+      id: 'kind',
+      holds: 'one',
+      of: ({ document }) => [document.kind],
+      name: (id) => frame.kinds[id as keyof typeof frame.kinds],
+    },
+    {
+      id: 'process',
+      holds: 'one',
+      of: ({ document }) => [document.process],
+      name: (id) => frame.processes[id as keyof typeof frame.processes],
+    },
+    { id: 'fats', holds: 'many', only: true, of: fatsOf, name: material },
+    {
+      id: 'additives',
+      holds: 'many',
+      of: ({ document }) => [...document.additives, ...document.liquids].map(({ id }) => id),
+      name: material,
+    },
+    {
+      id: 'batches',
+      holds: 'many',
+      of: ({ document }) => document.batches.filter(({ refused }) => !refused).map(({ id }) => id),
+      name: (id) => labels.get(id) ?? id,
+    },
+    { id: 'tags', holds: 'many', of: ({ formula }) => formula.tags, name: (id) => id },
+    {
+      id: 'allergens',
+      holds: 'many',
+      of: (computed) => allergensOf(computed, reference),
+      name: (id) => id,
+    },
+    {
+      id: 'cautions',
+      holds: 'many',
+      of: ({ document }) => document.cautions.map(({ id }) => id),
+      name: (id) => id.replaceAll('-', ' '),
+    },
+  ];
+  return sources.map(({ id, holds, only = false, of, name }) => {
+    const ids = formulas.map((computed) => [...new Set(of(computed))]);
+    const choices = [...new Set(ids.flat())]
+      .map((choice) => ({ id: choice, name: name(choice) }))
+      .sort((a, b) => (a.name < b.name ? -1 : 1));
+    const place = new Map(choices.map((choice, i) => [choice.id, i]));
+    return {
+      id,
+      name: findWords.traits[id],
+      holds,
+      only,
+      choices,
+      members: ids.map((row) => row.map((each) => place.get(each) ?? 0).sort((a, b) => a - b)),
+    };
+  });
+}
+
+const fatsOf = ({ document }: ComputedFormula) =>
+  [...document.fats, ...document.afterCookFats].map(({ id }) => id);
+
+function allergensOf({ document }: ComputedFormula, reference: Formulary['reference']) {
+  const ids = [
+    ...document.fats,
+    ...document.afterCookFats,
+    ...document.additives,
+    ...document.liquids,
+  ];
+  return ids.flatMap(
+    ({ id }) =>
+      (reference.fats.get(id) ?? reference.additives.get(id) ?? reference.liquids.get(id))
+        ?.allergens ?? [],
+  );
+}
