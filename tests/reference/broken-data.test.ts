@@ -23,7 +23,10 @@ const ON_DISK = [
 
 test('every problem has a broken example', () => {
   expect([...BROKEN.map(({ rule }) => rule), ...ON_DISK].sort()).toEqual(
-    Object.keys(DATA_PROBLEMS).sort(),
+    Object.keys(DATA_PROBLEMS)
+      // those of the evidence are shown where the evidence is tested
+      .filter((rule) => !rule.startsWith('data/evidence-'))
+      .sort(),
   );
 });
 
