@@ -16,7 +16,7 @@ export interface WeighingError {
 
 /** One source of doubt: how far it moves the superfat at k = 2. */
 export interface Contribution {
-  /** `fat:olive`, `assay:sodium-hydroxide`, `scale`. */
+  /** `fat:olive`, `liquid:goat-milk` (its fat), `assay:sodium-hydroxide`, `scale`. */
   readonly id: string;
   /** [1] */
   readonly halfWidth: number;
@@ -88,14 +88,16 @@ function spreadAround(
   const budget: Contribution[] = [];
   const perEquivalent = (at.hydroxide - at.acid) / at.saponifiable ** 2;
 
-  const addFat = (fat: Fat, mass: number) => {
+  const addFat = (id: string, fat: Fat, mass: number) => {
     const range = waxAsAcids && fat.kind === 'wax' ? fat.acidValue : fat.saponificationValue;
     const equivalents = expandedHalfWidth(range) / (1000 * constants.hydroxide.K);
-    budget.push({ id: `fat:${fat.id}`, halfWidth: perEquivalent * mass * equivalents });
+    budget.push({ id, halfWidth: perEquivalent * mass * equivalents });
   };
-  for (const { fat, mass } of charge.fats) addFat(fat, mass);
+  for (const { fat, mass } of charge.fats) addFat(`fat:${fat.id}`, fat, mass);
   for (const { liquid, mass, at: stage } of charge.liquids) {
-    if (liquid.fatData && isBeforeSaponification(stage)) addFat(liquid.fatData, mass * liquid.fat);
+    if (liquid.fatData && isBeforeSaponification(stage)) {
+      addFat(`liquid:${liquid.id}`, liquid.fatData, mass * liquid.fat);
+    }
   }
   for (const { supply, weighedMass } of charge.alkali) {
     const hydroxide =

@@ -2,8 +2,9 @@ import { resolve } from 'node:path';
 import { withCautions } from '../cautions/with-cautions.ts';
 import { withDigests } from '../edition/with-digests.ts';
 import type { ShopFolders } from '../formulary/formulary.ts';
-import { loadFormulary } from '../formulary/load.ts';
+import { loadFormulary, packagedData } from '../formulary/load.ts';
 import type { Problem } from '../formulary/problem.ts';
+import { readEvidence } from '../reference/evidence/read-evidence-fs.ts';
 import type { SiteInput } from '../site/input.ts';
 
 export type LoadedSite =
@@ -15,6 +16,10 @@ export function loadSite(folders: ShopFolders, asOf: string): LoadedSite {
   const loaded = loadFormulary(folders);
   if (!loaded.ok) return loaded;
   const { reference, formulas } = withDigests(withCautions(loaded.formulary, asOf));
+  const evidence = readEvidence(packagedData(), reference);
+  if (evidence.problems.length > 0) {
+    return { ok: false, problems: [...loaded.problems, ...evidence.problems] };
+  }
   // what is withdrawn reaches no page and no file
   const inUse = formulas.filter(({ formula }) => !formula.withdrawn);
   return {
@@ -22,6 +27,7 @@ export function loadSite(folders: ShopFolders, asOf: string): LoadedSite {
     problems: loaded.problems,
     input: {
       formulary: { reference, formulas: inUse },
+      evidence: evidence.rows,
       asOf,
       formulasFolder: resolve(folders.formulas),
     },

@@ -50,7 +50,8 @@ export function prepareFormulation(formula: Formula, reference: Reference): Prep
     holdBack: percent(formula.water.holdBack),
     liquids: formula.liquids.flatMap(({ liquid: id, replacesWater, at }, i) =>
       found(reference.liquids, id, `liquids.${i}.liquid`).map(({ core }) => ({
-        liquid: core.fatData ? { ...core, fatData: fatInForce(core.fatData, reference).fat } : core,
+        // the fat of a milk is not from the shop's lot of that fat
+        liquid: core,
         replacesWater: percent(replacesWater),
         at,
       })),

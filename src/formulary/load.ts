@@ -17,6 +17,9 @@ export interface LoadOptions {
 /** The reference data that comes with the code. */
 export const PACKAGED_DATA = fileURLToPath(new URL('../../data', import.meta.url));
 
+/** The data folder that comes with the code, as a user would type it from here. */
+export const packagedData = (): string => asTyped(PACKAGED_DATA);
+
 /**
  * Reads the data and all formulas of a shop and computes every formula: the one way from files to numbers.
  * All problems come at once; with any error there is no formulary. Never throws for bad input.

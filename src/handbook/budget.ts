@@ -15,7 +15,7 @@ export function budgetLines(
 
 function contributionName(id: string, reference: Reference): string {
   const [kind, of] = id.split(':');
-  if (kind === 'fat' && of) return nameOf(reference, of);
+  if ((kind === 'fat' || kind === 'liquid') && of) return nameOf(reference, of);
   if (kind === 'assay' && of) return words.marginWords.assay(nameOf(reference, of));
   return kind === 'scale' ? words.marginWords.scale : id;
 }

@@ -1,8 +1,11 @@
 import type { Formulary } from '../formulary/formulary.ts';
+import type { EvidenceRow } from '../reference/evidence/evidence.ts';
 
 /** Everything that the pages are made from. */
 export interface SiteInput {
   readonly formulary: Formulary;
+  /** Computed against published, for the models and the fats. */
+  readonly evidence: readonly EvidenceRow[];
   /** The one date that comparisons use and that pages show, `2026-12-01`. */
   readonly asOf: string;
   /** Folder of the formula files, for the pictures that they show. */

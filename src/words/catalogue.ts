@@ -1,5 +1,6 @@
 import { breachText } from './en/breaches.ts';
 import { contentsPage } from './en/contents-page.ts';
+import { evidencePage } from './en/evidence-page.ts';
 import { fatPages } from './en/fat-pages.ts';
 import { formulaPage } from './en/formula-page.ts';
 import { frame } from './en/frame.ts';
@@ -10,11 +11,13 @@ import { methodWords } from './en/methods.ts';
 import { methodsPage } from './en/methods-page.ts';
 import { profileWords, propertyNames, propertyUnits } from './en/profile.ts';
 import { safetyPage } from './en/safety.ts';
+import { workingWords } from './en/working.ts';
 
 /** Every word that a page shows. Pages take their text from here and nowhere else. */
 export const words = {
   breachText,
   contentsPage,
+  evidencePage,
   fatPages,
   formulaPage,
   frame,
@@ -27,4 +30,5 @@ export const words = {
   propertyNames,
   propertyUnits,
   safetyPage,
+  workingWords,
 } as const;

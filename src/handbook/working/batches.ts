@@ -15,8 +15,7 @@ export function batches(working: Working): readonly Section[] {
     if (refused || !superfat || !batch) return [];
     const weighed = weighBatch(charge, batch, reference);
     if (!weighed.ok) return [];
-    const rounded = weighed.value.charge;
-    const fats = weighed.value.massOfFats;
+    const { charge: rounded, massOfFats: fats, steps } = weighed.value;
     const perKilogram = charge.fats.reduce((sum, { mass }) => sum + mass, 0);
     const scaled = (kind: Step['kind'], of: string, subject: string, mass: number) =>
       step({
@@ -26,6 +25,18 @@ export function batches(working: Working): readonly Section[] {
         symbol: symbol('m'),
         numbers: fractionOf(product(figure(mass), figure(fats)), figure(perKilogram)),
         value: (mass * fats) / perKilogram,
+        unit: 'g',
+      });
+    /** So many whole steps of the scale. */
+    const onScale = (of: string, mass = Number.NaN, size = Number.NaN) =>
+      step({
+        kind: 'on-the-scale',
+        of: `${id}-${of}`,
+        subject: named(working, of),
+        symbol: symbol('m'),
+        numbers: product(exact(Math.round(mass / size)), exact(size)),
+        value: mass,
+        digits: 9,
         unit: 'g',
       });
     const koh = reference.constants.hydroxide.K;
@@ -54,7 +65,7 @@ export function batches(working: Working): readonly Section[] {
       })),
       ...rounded.liquids.map(({ liquid, mass, at }) => ({ mass, acidity: liquid.acidity, at })),
     ].filter(({ acidity, at }) => acidity > 0 && isBeforeSaponification(at));
-    const steps: Step[] = [
+    const lines: Step[] = [
       step({
         kind: 'fats-of-batch',
         of: id,
@@ -63,12 +74,22 @@ export function batches(working: Working): readonly Section[] {
         value: fats,
         unit: 'g',
       }),
-      ...charge.fats.map(({ fat, mass }) =>
+      ...charge.fats.flatMap(({ fat, mass }, i) => [
         scaled('exact-weight', fat.id, named(working, fat.id), mass),
-      ),
-      ...charge.alkali.map(({ supply, weighedMass }) =>
+        onScale(fat.id, rounded.fats[i]?.mass, steps.fats[i]),
+      ]),
+      ...charge.alkali.flatMap(({ supply, weighedMass }, i) => [
         scaled('exact-weight', supply.id, named(working, supply.id), weighedMass),
-      ),
+        onScale(supply.id, rounded.alkali[i]?.weighedMass, steps.alkali[i]),
+      ]),
+      ...charge.additives.flatMap(({ additive, mass }, i) => [
+        scaled('exact-weight', additive.id, named(working, additive.id), mass),
+        onScale(additive.id, rounded.additives[i]?.mass, steps.additives[i]),
+      ]),
+      ...charge.liquids.flatMap(({ liquid, mass }, i) => [
+        scaled('exact-weight', liquid.id, named(working, liquid.id), mass),
+        onScale(liquid.id, rounded.liquids[i]?.mass, steps.liquids[i]),
+      ]),
       step({
         kind: 'batch-equivalents',
         of: id,
@@ -114,6 +135,6 @@ export function batches(working: Working): readonly Section[] {
       }),
       superfatStep('batch-superfat', amounts, superfatFrom(amounts) * 100, id),
     ];
-    return [{ id: 'batch', subject: label, steps }];
+    return [{ id: 'batch', subject: label, steps: lines }];
   });
 }

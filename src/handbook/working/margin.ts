@@ -32,10 +32,10 @@ export function margin(working: Working): Section {
 
   const fats = fatRanges(working, waxAsAcids);
   const contributions = [
-    ...fats.map(({ id, mass, range }) =>
+    ...fats.map(({ id, of, mass, range }) =>
       contribution(
-        `fat:${id}`,
-        named(working, id),
+        id,
+        named(working, of),
         product(
           HUNDRED,
           fractionOf(
@@ -127,7 +127,10 @@ export function margin(working: Working): Section {
 const HUNDRED = exact(100);
 
 interface FatRange {
+  /** As in the budget of the margin. */
   readonly id: string;
+  /** The fat or the liquid that carries it. */
+  readonly of: string;
   readonly mass: number;
   readonly range: Range<number>;
 }
@@ -136,10 +139,22 @@ function fatRanges({ charge }: Working, waxAsAcids: boolean): readonly FatRange[
   const rangeOf = (fat: (typeof charge.fats)[number]['fat']) =>
     waxAsAcids && fat.kind === 'wax' ? fat.acidValue : fat.saponificationValue;
   return [
-    ...charge.fats.map(({ fat, mass }) => ({ id: fat.id, mass, range: rangeOf(fat) })),
+    ...charge.fats.map(({ fat, mass }) => ({
+      id: `fat:${fat.id}`,
+      of: fat.id,
+      mass,
+      range: rangeOf(fat),
+    })),
     ...charge.liquids.flatMap(({ liquid, mass, at }) =>
       liquid.fatData && isBeforeSaponification(at)
-        ? [{ id: liquid.fatData.id, mass: mass * liquid.fat, range: rangeOf(liquid.fatData) }]
+        ? [
+            {
+              id: `liquid:${liquid.id}`,
+              of: liquid.id,
+              mass: mass * liquid.fat,
+              range: rangeOf(liquid.fatData),
+            },
+          ]
         : [],
     ),
   ];

@@ -32,7 +32,7 @@ export interface Section {
 
 export type SectionId = keyof typeof workingWords.sections;
 
-/** How far the printed numbers may lead from the printed result: half a unit of its last digit and the rest. */
+/** What rounding the printed numbers may do to a result, beside half a unit of the result's own last digit. */
 const RELATIVE = 5e-5;
 
 /**
@@ -58,8 +58,8 @@ export function step(parts: {
   const id = of ? `${kind}-${of}` : kind;
   const result = figure(value, digits);
   const found = evaluate(parts.numbers);
-  const allowed = Math.max(Math.abs(value) * RELATIVE, within, 10 ** -digits);
-  if (!(Math.abs(found - evaluate(result)) <= allowed)) {
+  const allowed = Math.max(Math.abs(value) * RELATIVE, within);
+  if (!(Math.abs(found - evaluate(result)) <= allowed + lastDigit(result) / 2)) {
     throw new RangeError(`Working ${id}: the printed numbers give ${found}, not ${value}`);
   }
   return {
@@ -73,4 +73,10 @@ export function step(parts: {
     subject: parts.subject ?? null,
     sources: parts.sources ?? [],
   };
+}
+
+/** One unit of the last digit that a number is printed with. */
+function lastDigit(term: Term): number {
+  const decimals = term.is === 'number' ? (term.text.split('.')[1]?.length ?? 0) : 0;
+  return 10 ** -decimals;
 }

@@ -34,6 +34,10 @@ export const DATA_PROBLEMS = {
     title: 'A composition that does not fit the saponification value',
   },
   'data/computed-iodine-value': { title: 'A composition that does not fit the iodine value' },
+  'data/evidence-disagrees': {
+    title: 'A computed value that does not agree with the published one',
+  },
+  'data/evidence-without-number': { title: 'A published value that no model can be held against' },
   'data/stale-exception': { title: 'An exception that is no longer needed' },
   'data/no-trade-range': { title: 'An alkali without an assay range' },
   'data/fat-of-liquid': { title: 'A liquid whose fat is not known' },

@@ -87,6 +87,7 @@ export const workingWords = {
     'released-tfm': () => 'Total fatty matter, released',
     'fats-of-batch': () => 'Fats for this size',
     'exact-weight': (of: string) => `${of}, before rounding`,
+    'on-the-scale': (of: string) => `${of}, on the scale`,
     'batch-equivalents': () => 'Equivalents of the rounded weights',
     'batch-acid': () => 'Acid of the rounded weights',
     'batch-hydroxide': () => 'Hydroxide of the rounded weights',
