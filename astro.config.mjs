@@ -1,4 +1,5 @@
 import { defineConfig } from 'astro/config';
+import { formulaPictures } from './src/site/integrations/formula-pictures.ts';
 import { relativeLinks } from './src/site/integrations/relative-links.ts';
 
 // Run through `npm run build` and `npm run dev`: they load the formulary that the pages are made from.
@@ -11,6 +12,7 @@ export default defineConfig({
   // links name files, so that the handbook also opens from a folder
   build: { format: 'preserve', assets: 'assets', inlineStylesheets: 'never' },
   devToolbar: { enabled: false },
-  integrations: [relativeLinks()],
+  // pictures first: the links are checked against what is there
+  integrations: [formulaPictures(), relativeLinks()],
   vite: { build: { assetsInlineLimit: 0 } },
 });

@@ -92,9 +92,7 @@ export async function main(args: readonly string[]): Promise<number> {
     String(file).endsWith('.html'),
   ).length;
   const seconds = ((performance.now() - start) / 1000).toFixed(1);
-  console.log(
-    `${relative('.', folders.current) || '.'}: ${counted(count, 'formula')}, ${counted(pages, 'page')}, ${seconds} s`,
-  );
+  console.log(`${out}: ${counted(count, 'formula')}, ${counted(pages, 'page')}, ${seconds} s`);
   return 0;
 }
 

@@ -25,7 +25,7 @@ const ALLOWED: Schema = {
     th: ['align'],
     td: ['align'],
   },
-  protocols: { href: ['https', 'mailto'], src: [] },
+  protocols: { href: ['http', 'https', 'mailto'], src: [] },
   clobberPrefix: '',
 };
 
