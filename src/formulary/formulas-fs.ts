@@ -1,5 +1,5 @@
 import { readdirSync } from 'node:fs';
-import { join, relative } from 'node:path';
+import { dirname, join, relative } from 'node:path';
 import { LARGEST_FILE, type ReadText, readText } from '../reference/read-text-fs.ts';
 import type { FormulaRule } from '../words/en/problems-formula.ts';
 import { checkAcross } from './checks/across.ts';
@@ -42,6 +42,10 @@ export function readFormulas(folder: string, known: Known | null): FormulasRead 
     codes: reads.flatMap(({ read, file }) => (read.code ? { text: read.code.text, file } : [])),
   };
 }
+
+/** One formula file by its path, wherever it lies; pictures are looked for beside it. */
+export const readFormulaFile = (file: string, known: Known | null): FormulaRead =>
+  readOne(file, file.replaceAll('\\', '/'), known, imagesIn(dirname(file)));
 
 /** The picture files of a folder of formulas, as a formula may name them. */
 export const imagesIn = (folder: string): ReadonlySet<string> =>

@@ -2,6 +2,7 @@ import { isAbsolute, relative, resolve } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { readReference } from '../reference/read-reference-fs.ts';
 import type { Reference } from '../reference/reference.ts';
+import type { ReadReference } from '../reference/reference-from.ts';
 import { computeFormula } from './compute.ts';
 import type { ComputedFormula, Loaded, ShopFolders } from './formulary.ts';
 import { type FormulasRead, readFormulas } from './formulas-fs.ts';
@@ -46,9 +47,7 @@ export function loadParts(
   readonly problems: readonly Problem[];
   readonly codes: FormulasRead['codes'];
 } {
-  const { reference, problems: dataProblems } = readReference(
-    dataFolders(packagedData, folders.data).map(asTyped),
-  );
+  const { reference, problems: dataProblems } = readData(folders.data, packagedData);
   const read = readFormulas(asTyped(folders.formulas), reference ? knownFrom(reference) : null);
   const problems: Problem[] = [...dataProblems, ...read.problems];
   const formulas: ComputedFormula[] = [];
@@ -64,6 +63,10 @@ export function loadParts(
   formulas.sort((a, b) => (a.formula.code < b.formula.code ? -1 : 1));
   return { reference, formulas, problems, codes: read.codes };
 }
+
+/** The data of a shop, over the data that come with the code. */
+export const readData = (data: string, packaged: string = PACKAGED_DATA): ReadReference =>
+  readReference(dataFolders(packaged, data).map(asTyped));
 
 /** A shop without a folder of its own and the shop whose folder is the packaged one read it once. */
 function dataFolders(packaged: string, shop: string): readonly string[] {
