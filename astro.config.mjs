@@ -1,6 +1,7 @@
 import { defineConfig } from 'astro/config';
 import { formulaPictures } from './src/site/integrations/formula-pictures.ts';
 import { relativeLinks } from './src/site/integrations/relative-links.ts';
+import { searchIndex } from './src/site/integrations/search-index.ts';
 
 // Run through `npm run build` and `npm run dev`: they load the formulary that the pages are made from.
 export default defineConfig({
@@ -13,6 +14,6 @@ export default defineConfig({
   build: { format: 'preserve', assets: 'assets', inlineStylesheets: 'never' },
   devToolbar: { enabled: false },
   // pictures first: the links are checked against what is there
-  integrations: [formulaPictures(), relativeLinks()],
+  integrations: [formulaPictures(), relativeLinks(), searchIndex()],
   vite: { build: { assetsInlineLimit: 0 } },
 });

@@ -23,9 +23,13 @@ export interface BuiltSearch {
 
 /**
  * The search data of the pages, as classic scripts. All of it has been read back with the reader that the browser
- * uses; throws where that fails, or where it finds pages that were not given.
+ * uses; throws where that fails, or where it finds pages that were not given. `rows` are paths of pages that must be
+ * found by their place in this list.
  */
-export async function buildSearch(pages: readonly Page[]): Promise<BuiltSearch> {
+export async function buildSearch(
+  pages: readonly Page[],
+  rows: readonly string[] = [],
+): Promise<BuiltSearch> {
   const index = dataFiles(await indexPages(pages));
   const carried = new Map(
     index.map(({ path, content }) => [path, Buffer.from(content).toString('base64')]),
@@ -42,7 +46,12 @@ export async function buildSearch(pages: readonly Page[]): Promise<BuiltSearch> 
   for (const bare of languagesOf(index)) {
     const { urls, texts, words } = await readWholeIndex(bare, load);
     const exceptions = stemExceptions(texts, words, stemmerFor(bare.language, {}));
-    const entry = { ...bare, stemExceptions: exceptions };
+    const numbers = new Map(urls.map((url, page) => [url, page]));
+    const entry = {
+      ...bare,
+      stemExceptions: exceptions,
+      rows: rows.map((path) => numbers.get(path) ?? missing(path)),
+    };
     const name = `entry.${entry.language}`;
     files.push({
       path: `${name}.js`,
@@ -63,4 +72,8 @@ export async function buildSearch(pages: readonly Page[]): Promise<BuiltSearch> 
     ...rest.map((name) => ({ path: `${name}.js`, text: chunkScript({ [name]: chunk(name) }) })),
   );
   return { files, entries, found };
+}
+
+function missing(path: string): never {
+  throw new Error(`The search index lacks the page ${path}.`);
 }

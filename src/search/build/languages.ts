@@ -1,7 +1,7 @@
 import type { SearchEntry } from '../reader/search.ts';
 import type { IndexFile } from './data-kinds.ts';
 
-/** What a reader starts from, for each language of an index; stem exceptions are not known yet. */
+/** What a reader starts from, for each language of an index; stem exceptions and rows are not known yet. */
 export function languagesOf(index: readonly IndexFile[]): readonly SearchEntry[] {
   const file = index.find(({ path }) => path === 'pagefind-entry.json');
   if (!file) throw new Error('The search index lacks its list of languages.');
@@ -13,6 +13,7 @@ export function languagesOf(index: readonly IndexFile[]): readonly SearchEntry[]
     contents: `pagefind.${hash}.pf_meta`,
     includeCharacters: list.include_characters,
     stemExceptions: {},
+    rows: [],
   }));
 }
 

@@ -22,6 +22,8 @@ export interface SearchEntry {
   readonly includeCharacters: readonly string[];
   /** Words whose stem is another than the stemmer gives. */
   readonly stemExceptions: Readonly<Record<string, string>>;
+  /** Page numbers of the pages that another list of the handbook counts in rows, in its order. */
+  readonly rows: readonly number[];
 }
 
 /** The text of a page as it was indexed. */

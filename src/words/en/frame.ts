@@ -7,6 +7,7 @@ export const frame = {
   skip: 'To the content',
   menu: 'Handbook',
   contents: 'Contents',
+  find: 'Find',
   lyeTables: 'Lye tables',
   fats: 'Fats',
   safety: 'Safety',
