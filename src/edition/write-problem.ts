@@ -15,7 +15,7 @@ const REASONS: Readonly<Record<string, readonly [found: string, advice: string]>
 };
 
 /**
- * The problem of a file or folder that could not be written. Nothing was lost: the old one stands.
+ * The problem of a file or folder that could not be written; what was there stands as it was.
  *
  * @throws the error itself where it is not one of the file system's.
  */
@@ -25,7 +25,7 @@ export function writeProblem(file: string, error: unknown): Problem {
   const [found, advice] = REASONS[code] ?? [`an error of the file system (${code})`, ''];
   return editionProblem({ file }, 'edition/cannot-write', {
     found,
-    expected: 'a place to write to; nothing has been changed',
+    expected: 'a place to write to; what was there stands as it was',
     advice,
   });
 }

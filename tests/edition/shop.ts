@@ -4,6 +4,7 @@ import { join } from 'node:path';
 import { afterAll } from 'vitest';
 import { completeApproval, prepareApproval } from '../../src/edition/approve-fs.ts';
 import { type EditionOptions, loadEdition } from '../../src/edition/load-edition-fs.ts';
+import { sealEdition } from '../../src/edition/seal-fs.ts';
 import { problemText } from '../../src/words/problem-text.ts';
 
 const SETTINGS = `name: Workshop of a test
@@ -90,6 +91,7 @@ export function shopWith(
       if (!text.includes(from)) throw new Error(`"${from}" is not in ${name}`);
       shop.write(name, text.replace(from, to));
     },
+    editSettings: (from: string, to: string) => shop.edit('../data/shop.yaml', from, to),
     setLots: (text: string) => writeFileSync(join(folders.data, 'lots.yaml'), text),
     approve: (code = 'TT-001', wish: { by?: string; on?: string; until?: string } = {}) => {
       const request = { code, by: 'Quality lead', on: AS_OF, until: '2027-12-01', ...wish };
@@ -117,4 +119,14 @@ export function approvedShop(lots = LOTS) {
   const problems = shop.approve();
   if (problems.length > 0) throw new Error(problems.map(problemText).join('\n'));
   return shop;
+}
+
+/** A folder as a build leaves it, with a page that says `text`. */
+export function builtFolder(shop: ReturnType<typeof shopWith>, text = 'x', options = {}): string {
+  const folder = join(emptyFolder(), 'dist');
+  mkdirSync(join(folder, 'formulas'), { recursive: true });
+  writeFileSync(join(folder, 'index.html'), text);
+  writeFileSync(join(folder, 'formulas/TT-001.html'), text);
+  sealEdition(folder, shop.edition(options).document);
+  return folder;
 }
