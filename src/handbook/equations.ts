@@ -134,6 +134,7 @@ export const EQUATIONS = {
   ],
   balance: [
     equals(
+      of('m', 'in'),
       row(
         of('m', 'fats'),
         plus,
@@ -143,6 +144,9 @@ export const EQUATIONS = {
         plus,
         of('m', 'additives'),
       ),
+    ),
+    equals(
+      of('m', 'out'),
       row(
         of('m', 'soap'),
         plus,
@@ -152,13 +156,10 @@ export const EQUATIONS = {
         plus,
         of('m', 'unsaponifiable'),
         plus,
-        of('m', 'water, all'),
-        plus,
-        of('m', 'inert'),
-        plus,
-        of('m', 'additives, salts'),
+        of('m', 'rest'),
       ),
     ),
+    equals(of('m', 'in'), of('m', 'out')),
     equals(
       named('TFM'),
       row(

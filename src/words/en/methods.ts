@@ -180,7 +180,14 @@ export const methodWords = [
     id: 'balance',
     title: 'Mass balance, total fatty matter, glycerol',
     text: 'What goes in comes out, to a part in a thousand million. Glycerides give one mole of glycerol for three of alkali, free acids give water, wax esters give alcohols. Total fatty matter counts the acids in the soap, the unsaponified fat and the unsaponifiable matter. Drying takes water alone, down to the shop’s release moisture.',
-    symbols: [['m', 'masses named by their index', 'g']],
+    symbols: [
+      ['m', 'masses named by their index', 'g'],
+      [
+        'm_rest',
+        'water from all origins, carbonate and other inert matter, additives and their salts',
+        'g',
+      ],
+    ],
     range: 'Complete reaction of the alkali with the fats.',
     ignores: 'Evaporation while making, and reaction that is not finished.',
     source: 'Stoichiometry; total fatty matter as in ISO 685 (from memory).',
