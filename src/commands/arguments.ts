@@ -1,5 +1,5 @@
 import { parseArgs } from 'node:util';
-import { suggestion, words } from '../formulary/suggestion.ts';
+import { didYouMean } from '../reference/nearest.ts';
 
 /** One option: `value` names what it takes (`DIR`), `null` makes it a switch. */
 export interface Option {
@@ -65,7 +65,7 @@ export function readArguments<Name extends string>(
       return { ok: false, text: help(usage), status: 0 };
     }
     if (!Object.hasOwn(options, token.name)) {
-      const near = suggestion(token.name, words(Object.keys(options)), '');
+      const near = didYouMean(token.name, Object.keys(options), '');
       return refuse(`There is no option ${token.rawName}${near === '' ? '.' : `; ${near}`}`);
     }
     const { value } = options[token.name as Name];

@@ -1,5 +1,5 @@
+import { nearestId } from '../reference/nearest.ts';
 import type { Known } from './known.ts';
-import { nearestId } from './suggestion.ts';
 import { TARGETS, type TargetName } from './target.ts';
 
 /** What the text of a formula may print, and how often the formula has it. */

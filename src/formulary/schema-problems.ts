@@ -1,8 +1,8 @@
 import { z } from 'zod';
+import { didYouMean } from '../reference/nearest.ts';
 import type { Path, Report } from './report.ts';
 import { type Frontmatter, type FrontmatterKey, frontmatterSchema } from './schema.ts';
 import type { Refusal } from './schema-values.ts';
-import { suggestion, words } from './suggestion.ts';
 
 /**
  * Holds each key of the frontmatter against the schema by itself, so that a slip in one does not hide what
@@ -59,7 +59,7 @@ function reportIssue(
     report.in(path, 'formula/unknown-word', {
       found: `${key} "${String(input)}"`,
       expected: `one of ${choices.join(', ')}`,
-      advice: typeof input === 'string' ? suggestion(input, words(choices), '') : '',
+      advice: typeof input === 'string' ? didYouMean(input, choices, '') : '',
     });
   } else {
     report.in(path, 'formula/wrong-type', {
@@ -84,7 +84,7 @@ function reportUnknownKey(path: Path, schema: z.ZodType, report: Report) {
 function adviceForKey(name: string, keys: readonly string[]): string {
   if (/^\d+$/.test(name)) return 'write decimals with a point, 2.5';
   if (name.includes(' ')) return 'put a text with a comma in quotes';
-  return suggestion(name, words(keys), '');
+  return didYouMean(name, keys, '');
 }
 
 function schemaAt(path: Path): z.ZodType {

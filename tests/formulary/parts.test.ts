@@ -1,7 +1,7 @@
 import { describe, expect, test } from 'vitest';
 import { isCalendarDate } from '../../src/formulary/calendar-date.ts';
-import { suggestion, words } from '../../src/formulary/suggestion.ts';
 import { parseTarget } from '../../src/formulary/target.ts';
+import { didYouMean, suggestion } from '../../src/reference/nearest.ts';
 import { problemSummary, problemText } from '../../src/words/problem-text.ts';
 import { KNOWN } from './known.ts';
 
@@ -44,7 +44,7 @@ describe('suggestions', () => {
   });
   test('none where nothing is near', () => {
     expect(suggestion('tallow', KNOWN.fats, 'add it')).toBe('add it');
-    expect(suggestion('', words(['bar', 'paste']), '')).toBe('');
+    expect(didYouMean('', ['bar', 'paste'], '')).toBe('');
   });
 });
 

@@ -1,9 +1,9 @@
+import { didYouMean } from '../../reference/nearest.ts';
 import type { Place } from '../../reference/yaml.ts';
 import type { Problem } from '../problem.ts';
 import type { FormulaRead } from '../read-formula.ts';
 import { formulaProblem } from '../report.ts';
 import { sameCode } from '../same-code.ts';
-import { suggestion, words } from '../suggestion.ts';
 
 /** What can only be seen with all files at hand: one code is one formula, and links find theirs. */
 export function checkAcross(
@@ -36,7 +36,7 @@ export function checkAcross(
         formulaProblem(file, place, 'formula/unknown-formula', {
           found: `a link to formula "${code}"`,
           expected: 'the code of a formula in this folder',
-          advice: suggestion(code, words(codes), ''),
+          advice: didYouMean(code, codes, ''),
         }),
       );
     }

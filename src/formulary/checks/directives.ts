@@ -1,9 +1,9 @@
 import type { Root } from 'mdast';
 import type { TextDirective } from 'mdast-util-directive';
 import { visit } from 'unist-util-visit';
+import { didYouMean } from '../../reference/nearest.ts';
 import type { AmountNames } from '../amount-names.ts';
 import type { Report } from '../report.ts';
-import { suggestion, words } from '../suggestion.ts';
 import { textOf } from '../text-of.ts';
 import { startOf } from './structure.ts';
 
@@ -42,9 +42,9 @@ function checkOne(node: TextDirective, names: AmountNames | null, report: Report
     report.at(place, 'formula/unknown-directive', {
       found: `":${name}"`,
       expected: FORMS,
-      advice: suggestion(
+      advice: didYouMean(
         name,
-        words(Object.keys(DIRECTIVES)),
+        Object.keys(DIRECTIVES),
         `if it is plain text, write "\\:${name}" or put a space after the colon`,
       ),
     });
@@ -90,7 +90,7 @@ function checkOne(node: TextDirective, names: AmountNames | null, report: Report
         choices.size > 0
           ? `one that this formula has: ${[...choices.keys()].join(', ')}`
           : `a formula that states a ${name} to print`,
-      advice: suggestion(label, words([...choices.keys()]), ''),
+      advice: didYouMean(label, [...choices.keys()], ''),
     });
   }
 }

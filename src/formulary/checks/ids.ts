@@ -1,6 +1,6 @@
+import { suggestion } from '../../reference/nearest.ts';
 import type { Known } from '../known.ts';
 import type { Path, Report } from '../report.ts';
-import { suggestion } from '../suggestion.ts';
 
 /**
  * Looks up every id, in the raw frontmatter so that a slip beside it hides nothing: fats, additives,
