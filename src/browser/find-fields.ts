@@ -40,7 +40,7 @@ export function fillFields(
   form: HTMLElement,
   data: FinderData,
   state: FinderState,
-  columns: readonly string[],
+  columns: ReadonlySet<string>,
 ): void {
   const words = fieldOf(form, 'words');
   if (words && words.value !== state.words) words.value = state.words;
@@ -54,7 +54,7 @@ export function fillFields(
       if (read === value && (value !== null || document.activeElement === field)) continue;
       field.value = value === null ? '' : format === 'date' ? dateOf(value) : String(value);
     }
-    for (const field of inputs(within, 'column')) field.checked = columns.includes(id);
+    for (const field of inputs(within, 'column')) field.checked = columns.has(id);
   }
   for (const { id } of data.traits) {
     const choice = state.choices[id] ?? NO_CHOICE;

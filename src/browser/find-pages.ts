@@ -5,13 +5,11 @@ import { findWords } from '../words/en/find.ts';
 import { addressOf } from './find-chunks.ts';
 import { element } from './find-dom.ts';
 
-const AT_ONCE = 10;
-
 /** The pages that have the words, each with the stretch of its text that says most. Rejects where a text is missing. */
 export async function pageList(
   search: Search,
   hits: readonly Hit[],
-  shown = AT_ONCE,
+  shown: number,
 ): Promise<{ readonly list: HTMLElement; readonly left: number }> {
   const entries = await Promise.all(
     hits.slice(0, shown).map(async (hit) => {
@@ -30,9 +28,6 @@ export async function pageList(
     left: hits.length - entries.length,
   };
 }
-
-/** How many pages to show when more are asked for. */
-export const more = (shown: number): number => shown + 2 * AT_ONCE;
 
 function excerpt(content: string, { places }: Hit) {
   const { parts, cutBefore, cutAfter } = excerptOf(content, places);

@@ -53,7 +53,7 @@ export const findWords = {
   lead: 'A word, a fat, a range of a property, a batch size, or all of them together. The address of this page keeps what you ask: bookmark it or send it.',
   words: 'Words',
   wordsHint:
-    'The beginning of a word is enough. Words in “quotes” must follow one another. All pages of the handbook are searched.',
+    'The beginning of a word is enough. Words in “quotes” must follow one another. Formulas, fats, safety and methods are searched.',
   wordsCut: (most: number) => `Only the first ${most} letters are looked at.`,
   noWord: 'There is no word in this.',
   searching: 'Looking …',
@@ -71,7 +71,7 @@ export const findWords = {
   clear: 'Ask for nothing',
   results: 'Formulas',
   found: (n: number, all: number) => (n === 1 ? `1 of ${all} formulas` : `${n} of ${all} formulas`),
-  inForce: 'Limits in force',
+  inForce: 'Limits in force; without one of them there would be as many as it says:',
   drop: (limit: string, n: number) => `Drop “${limit}”: ${n}`,
   nothing: 'No formula keeps all of these limits. Dropping one would leave:',
   limitNames: {
@@ -89,7 +89,7 @@ export const findWords = {
   columns: { code: 'Code', name: 'Formula', acids: 'Acids' },
   acidsOf: (saturated: string, mono: string, poly: string) =>
     `saturated ${saturated} %, monounsaturated ${mono} %, polyunsaturated ${poly} %`,
-  acidsNote: 'Acids: solid, saturated; striped, monounsaturated; white, polyunsaturated.',
+  acidsNote: 'Acids: dark, saturated; grey, monounsaturated; white, polyunsaturated.',
   noValue: '–',
   showAll: (n: number) => `Show all ${n}`,
   pages: 'Pages with these words',

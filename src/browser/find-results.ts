@@ -1,0 +1,87 @@
+import { answer, inOrder } from '../search/finder/answer.ts';
+import type { FinderData } from '../search/finder/finder-data.ts';
+import { limitsOf } from '../search/finder/limits.ts';
+import type { FinderState } from '../search/finder/state.ts';
+import { findWords } from '../words/en/find.ts';
+import { shownColumns } from './find-columns.ts';
+import { element, part } from './find-dom.ts';
+import { limitList } from './find-limits.ts';
+import { sayBroken } from './find-notes.ts';
+import { pageList } from './find-pages.ts';
+import { FIRST_ROWS, resultTable } from './find-table.ts';
+import type { WordsFound } from './find-words.ts';
+
+/** What is drawn beside the form. */
+export interface Results {
+  readonly rows: readonly number[];
+  /** For each limit in force, what is asked without it. */
+  readonly dropped: readonly FinderState[];
+}
+
+export interface Shown {
+  /** All rows, not only the first. */
+  readonly allRows: boolean;
+  readonly pages: number;
+}
+
+/** Draws count, limits, table and pages of a state. */
+export function drawResults(
+  data: FinderData,
+  state: FinderState,
+  found: WordsFound | null,
+  shown: Shown,
+): Results {
+  const limits = limitsOf(state, data, found && new Set(found.rows));
+  const { rows, withoutLimit } = answer(data, limits);
+  part('find-count').textContent = findWords.found(rows.length, data.codes.length);
+  part('find-limits').replaceChildren(...limitList(limits, rows.length, withoutLimit));
+  drawTable(data, state, inOrder(rows, data, state.sort, found?.rows ?? null), shown);
+  const onlyRows = limits.length > (found ? 1 : 0) ? new Set(rows) : null;
+  drawPages(found, onlyRows, shown.pages).catch(sayBroken);
+  return { rows, dropped: limits.map((limit) => limit.dropped) };
+}
+
+function drawTable(
+  data: FinderData,
+  state: FinderState,
+  rows: readonly number[],
+  { allRows }: Shown,
+): void {
+  const first = allRows ? rows : rows.slice(0, FIRST_ROWS);
+  const place = part('find-table');
+  const focused = place.contains(document.activeElement)
+    ? document.activeElement?.getAttribute('data-sort')
+    : null;
+  place.replaceChildren(
+    ...(rows.length > 0 ? [resultTable(data, state, first, shownColumns(data, state))] : []),
+  );
+  if (focused) place.querySelector<HTMLElement>(`[data-sort="${focused}"]`)?.focus();
+  part('find-all').replaceChildren(
+    ...(first.length < rows.length
+      ? [element('button', { type: 'button' }, findWords.showAll(rows.length))]
+      : []),
+  );
+}
+
+let turn = 0;
+
+/** With other limits than words only the rows that keep them are listed. */
+async function drawPages(
+  found: WordsFound | null,
+  onlyRows: ReadonlySet<number> | null,
+  shown: number,
+): Promise<void> {
+  const mine = ++turn;
+  part('find-pages').hidden = !found;
+  if (!found) return;
+  const { search, hits, rowOf } = found;
+  const kept = onlyRows ? hits.filter(({ page }) => onlyRows.has(rowOf.get(page) ?? -1)) : hits;
+  const { list, left } = await pageList(search, kept, shown);
+  if (mine !== turn) return;
+  const note = kept.length === 0 ? findWords.noPages : onlyRows ? findWords.outsideLimits : '';
+  part('find-pages-list').replaceChildren(
+    element('p', { class: 'label' }, note),
+    list,
+    ...(left > 0 ? [element('button', { type: 'button' }, findWords.morePages(left))] : []),
+  );
+}
