@@ -17,6 +17,7 @@ export const PACKAGED_FILES = [
   'additives.yaml',
   'liquids.yaml',
   'cautions.yaml',
+  'soap-grades.yaml',
   'alkalis/sodium-hydroxide.yaml',
   'alkalis/potassium-hydroxide.yaml',
   ...(Object.keys(TABLES) as TableName[]).map((name) => `tables/${name}.yaml`),

@@ -15,6 +15,7 @@ import {
 import { fatSchema, type RawFat } from './schema/fat.ts';
 import { lotsSchema } from './schema/lots.ts';
 import { shopSchema } from './schema/shop.ts';
+import { soapGradesSchema } from './schema/soap-grades.ts';
 import { sourcesSchema } from './schema/sources.ts';
 import { type RawTable, tableSchema } from './schema/table.ts';
 import { TABLES, type TableName } from './tables.ts';
@@ -35,6 +36,7 @@ export interface RawData {
   readonly additives: Raw<typeof additivesSchema>;
   readonly liquids: Raw<typeof liquidsSchema>;
   readonly cautions: Raw<typeof cautionsSchema>;
+  readonly soapGrades: Raw<typeof soapGradesSchema>;
   readonly shop: Raw<typeof shopSchema>;
   /** `undefined` where the shop keeps no lots. */
   readonly lots: Raw<typeof lotsSchema> | undefined;
@@ -79,6 +81,7 @@ export function openAll(files: readonly DataFile[], folder: string, problems: Pr
     additives: open('additives.yaml', additivesSchema),
     liquids: open('liquids.yaml', liquidsSchema),
     cautions: open('cautions.yaml', cautionsSchema),
+    soapGrades: open('soap-grades.yaml', soapGradesSchema),
     shop: open('shop.yaml', shopSchema),
     lots: byName.has('lots.yaml') ? open('lots.yaml', lotsSchema) : undefined,
     alkalis: ALKALIS.map((id) => ({ id, opened: open(`alkalis/${id}.yaml`, alkaliSchema) })),

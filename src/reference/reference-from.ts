@@ -72,7 +72,7 @@ function assemble(raw: RawData): Reference | null {
     ? lotsFrom(raw.lots.value, { fats, fatIds }, raw.lots.report)
     : { fats: [], alkalis: [] };
   const tables = everyTable(raw.tables) ? modelTables(raw.tables, sources) : null;
-  if (!additives || !liquids || !shop || !tables || !raw.cautions) return null;
+  if (!additives || !liquids || !shop || !tables || !raw.cautions || !raw.soapGrades) return null;
   const cautionThresholds = cautionThresholdsFrom(
     raw.cautions.value,
     sources,
@@ -86,6 +86,10 @@ function assemble(raw: RawData): Reference | null {
     elements,
     constants,
     tables,
+    soapGrades: raw.soapGrades.value.map((grade) => ({
+      name: grade.name,
+      totalFattyMatter: valueRecord(grade['total-fatty-matter']),
+    })),
     acids,
     fats,
     alkalis,

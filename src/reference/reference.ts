@@ -11,6 +11,7 @@ import type {
 } from '../chemistry/materials.ts';
 import type { Grams } from '../chemistry/quantity.ts';
 import type { CautionThresholds } from './caution-thresholds.ts';
+import type { TableName } from './tables.ts';
 
 /** How a value is known. `from memory` is said wherever the value is shown. */
 export type How =
@@ -252,6 +253,31 @@ export interface AlkaliLot {
   readonly retestBy: string;
 }
 
+/** One set of points that one source gives for one curve. */
+export interface TableSet {
+  readonly solute: 'sodium-hydroxide' | 'potassium-hydroxide' | 'potassium-carbonate';
+  readonly source: string;
+  readonly at: string;
+  readonly how: How;
+  readonly note: string | null;
+  /** [degC] */
+  readonly temperature: number | null;
+  /** Beyond the range in which the source's fit holds: shown, never used. */
+  readonly extrapolated: boolean;
+  /** Of a heat of solution: its limit at infinite dilution. [kJ/mol] */
+  readonly infiniteDilution: number | null;
+  /** Empty where the source gives the limit alone. */
+  readonly points: Curve;
+  /** Whether a model reads it. */
+  readonly used: boolean;
+}
+
+/** A grade of a published standard of toilet soap: what its total fatty matter must at least be. */
+export interface SoapGrade {
+  readonly name: string;
+  readonly totalFattyMatter: ValueRecord;
+}
+
 /** Everything under `data/`, read, checked and turned into what the core takes. */
 export interface Reference {
   /** Standard atomic weights with their source, by symbol. */
@@ -266,7 +292,11 @@ export interface Reference {
     /** Where the heats of solution and the heat capacities come from, in words for the working. */
     readonly lyeHeatSources: Readonly<Record<Cation, readonly string[]>>;
     readonly heatCapacitySources: Readonly<Record<Cation, readonly string[]>>;
+    /** Every set of every table as its source gives it, the ones that no model uses among them. */
+    readonly sets: Readonly<Record<TableName, readonly TableSet[]>>;
   };
+  /** Grades of toilet soap by total fatty matter, the highest first. */
+  readonly soapGrades: readonly SoapGrade[];
   readonly acids: ReadonlyMap<string, AcidRecord>;
   readonly fats: ReadonlyMap<string, FatRecord>;
   readonly alkalis: ReadonlyMap<string, AlkaliRecord>;

@@ -1,7 +1,7 @@
 import type { Curve } from '../chemistry/interpolate.ts';
 import type { LyeHeatTables } from '../chemistry/lye-heat.ts';
 import type { Cation } from '../chemistry/materials.ts';
-import type { Reference, Source } from './reference.ts';
+import type { Reference, Source, TableSet } from './reference.ts';
 import type { DataReport } from './report.ts';
 import type { RawTable } from './schema/table.ts';
 
@@ -75,14 +75,55 @@ export function modelTables(
       const title = sources.get(source)?.title ?? source;
       return `${title}, ${at}${how === 'from memory' ? ' (from memory)' : ''}`;
     });
+  const used = new Set(
+    (['Na', 'K'] as const).flatMap((cation) => [
+      ...FIRST_IS_USED.flatMap((name) => sets(name, cation).slice(0, 1)),
+      ...heats(cation).slice(0, 1),
+      ...hottestLimit(heats(cation)),
+      ...capacities(cation),
+    ]),
+  );
+  const setsOf = (name: TableName) =>
+    opened[name].value.sets.map((set) => tableSet(set, used.has(set)));
   return {
     lyeHeat: { Na: heat('Na'), K: heat('K') },
     lyeDensity: { Na: first('density', 'Na'), K: first('density', 'K') },
     lyeHeatSources: { Na: cited(heats('Na')), K: cited(heats('K')) },
     heatCapacitySources: { Na: cited(capacities('Na')), K: cited(capacities('K')) },
+    sets: {
+      'heat-of-solution': setsOf('heat-of-solution'),
+      'heat-capacity': setsOf('heat-capacity'),
+      density: setsOf('density'),
+      solubility: setsOf('solubility'),
+      'boiling-point': setsOf('boiling-point'),
+      crystallisation: setsOf('crystallisation'),
+    },
   };
 }
 
 /** How far the highest limit at infinite dilution lies above that of the first set, which has the points. */
 const newerSetAdds = ([own, ...others]: readonly (number | undefined)[]): number =>
   own === undefined ? 0 : Math.max(0, ...others.map((limit = own) => limit - own));
+
+/** Tables of which a model reads the first set of a solute and no other. */
+const FIRST_IS_USED = ['density', 'solubility', 'boiling-point', 'crystallisation'] as const;
+
+/** The set whose limit lies highest, where that is not the first one. */
+const hottestLimit = ([own, ...others]: RawTable['sets']): RawTable['sets'] =>
+  others
+    .filter((set) => (set['infinite-dilution'] ?? 0) > (own?.['infinite-dilution'] ?? 0))
+    .sort((a, b) => (b['infinite-dilution'] ?? 0) - (a['infinite-dilution'] ?? 0))
+    .slice(0, 1);
+
+const tableSet = (set: RawTable['sets'][number], used: boolean): TableSet => ({
+  solute: set.solute,
+  source: set.source,
+  at: set.at,
+  how: set.how,
+  note: set.note ?? null,
+  temperature: set.temperature ?? null,
+  extrapolated: set.extrapolated ?? false,
+  infiniteDilution: set['infinite-dilution'] ?? null,
+  points: set.points ?? [],
+  used,
+});
