@@ -17,7 +17,7 @@ export const formulaPage = {
     properties: 'Properties',
     provenance: 'Where the values come from',
     changes: 'Changes',
-    files: 'Files',
+    files: 'More of this formula',
   },
   sizes: 'Batch sizes',
   batch: {
@@ -92,5 +92,6 @@ export const formulaPage = {
     lot: (lot: string, method: string) => `lot ${lot}, ${method}`,
     loweredBy: (source: string) => `value lowered to a measured mean in ${source}`,
   },
+  working: 'Every step of the reckoning, with its numbers',
   json: 'This formula as JSON',
 } as const;
