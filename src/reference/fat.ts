@@ -8,6 +8,7 @@ import {
   type Range,
 } from '../chemistry/quantity.ts';
 import { type ClosedRange, firstClosedRange, loweringMean } from './choice.ts';
+import { fatLabel } from './label.ts';
 import type { CompositionRecord, FatRecord, ValueRecord } from './reference.ts';
 import type { RawFat } from './schema/fat.ts';
 import { middleOf, valueRecord } from './schema/value.ts';
@@ -88,6 +89,7 @@ export function fatRecord(
     origin: raw.origin,
     palm: raw.palm ?? false,
     allergens: raw.allergens ?? [],
+    label: fatLabel(raw.label),
     saponificationValues,
     acidValues,
     iodineValues,

@@ -4,6 +4,7 @@ import type { Fat } from '../chemistry/materials.ts';
 import type { AtomicWeights } from '../chemistry/molar-mass.ts';
 import { fraction, molesPerGram } from '../chemistry/quantity.ts';
 import { molarMassIn } from './acids.ts';
+import { additiveLabel, materialLabel } from './label.ts';
 import { didYouMean } from './nearest.ts';
 import type { AdditiveRecord, LiquidRecord } from './reference.ts';
 import type { DataReport } from './report.ts';
@@ -38,6 +39,7 @@ export function additiveRecords(
       kind: entry.kind,
       origin: entry.origin,
       allergens: entry.allergens ?? [],
+      label: additiveLabel(entry.label),
       values: namedValues(values),
       notes: entry.notes ?? [],
       substance: substance
@@ -101,6 +103,7 @@ export function liquidRecords(
       inci: entry.inci,
       origin: entry.origin,
       allergens: entry.allergens ?? [],
+      label: materialLabel(entry.label),
       fat: entry.fat ?? null,
       values: namedValues(values),
       notes: entry.notes ?? [],

@@ -11,6 +11,7 @@ import type {
 } from '../chemistry/materials.ts';
 import type { Grams } from '../chemistry/quantity.ts';
 import type { CautionThresholds } from './caution-thresholds.ts';
+import type { AdditiveLabel, FatLabel, MaterialLabel } from './label.ts';
 import type { TableName } from './tables.ts';
 
 /** How a value is known. `from memory` is said wherever the value is shown. */
@@ -89,6 +90,7 @@ export interface FatRecord {
   readonly palm: boolean;
   /** Allergen source words for label and cautions: `tree nuts`, `peanut`, `soy`, `sesame`, `milk`, `wheat`. */
   readonly allergens: readonly string[];
+  readonly label: FatLabel;
   readonly saponificationValues: readonly ValueRecord[];
   readonly acidValues: readonly ValueRecord[];
   readonly iodineValues: readonly ValueRecord[];
@@ -150,6 +152,7 @@ export interface AdditiveRecord {
     | 'other';
   readonly origin: 'plant' | 'animal' | 'mineral' | 'synthetic';
   readonly allergens: readonly string[];
+  readonly label: AdditiveLabel;
   readonly values: readonly (ValueRecord & { readonly name: string })[];
   readonly notes: readonly string[];
   /** What its acid or hydrate is made of; `null` for mixtures and neutral things. */
@@ -167,6 +170,7 @@ export interface LiquidRecord {
   readonly inci: string;
   readonly origin: 'plant' | 'animal' | 'mineral';
   readonly allergens: readonly string[];
+  readonly label: MaterialLabel;
   /** The fat's id, where it carries any. */
   readonly fat: string | null;
   /** `water`, `fat`, `sugar`, `acid`, in g per 100 g. */

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { ALLERGENS } from './fat.ts';
+import { additiveLabelSchema, liquidLabelSchema } from './label.ts';
 import { line, origin, valueIn } from './value.ts';
 
 /** `data/elements.yaml`: symbol to standard atomic weight. */
@@ -70,6 +71,7 @@ export const additivesSchema = z.record(
     ]),
     origin: z.enum(['plant', 'animal', 'mineral', 'synthetic']),
     allergens: z.array(z.enum(ALLERGENS)).optional(),
+    label: additiveLabelSchema.optional(),
     substance: substance.optional(),
     values: z
       .strictObject({
@@ -92,6 +94,7 @@ export const liquidsSchema = z.record(
     inci: line,
     origin: z.enum(['plant', 'animal', 'mineral']),
     allergens: z.array(z.enum(ALLERGENS)).optional(),
+    label: liquidLabelSchema.optional(),
     fat: z.string().optional(),
     acid: substance.optional(),
     values: z.strictObject({

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { fatLabelSchema } from './label.ts';
 import { broken, checkEnds, line, origin, valueIn } from './value.ts';
 
 /** Checks that a fat's file may except itself from, with a reason. */
@@ -35,6 +36,7 @@ export const fatSchema = z.strictObject({
   origin: z.enum(['plant', 'animal']),
   palm: z.boolean().optional(),
   allergens: z.array(z.enum(ALLERGENS)).optional(),
+  label: fatLabelSchema.optional(),
   'saponification-value': z.array(valueIn('mg KOH/g', 60, 400)).optional(),
   'acid-value': z.array(valueIn('mg KOH/g', 0, 400)).optional(),
   'iodine-value': z.array(valueIn('g I2/100 g', 0, 230)).optional(),
