@@ -1,24 +1,38 @@
-import { massIn } from '../chemistry/balance.ts';
+import { massBalance, massIn } from '../chemistry/balance.ts';
 import { massOfFatsFor } from '../chemistry/batch-size.ts';
 import type { Charge } from '../chemistry/charge.ts';
 import { superfatMargin } from '../chemistry/margin.ts';
-import { type Breach, type Grams, grams, type Outcome, refused } from '../chemistry/quantity.ts';
+import {
+  type Breach,
+  type Fraction,
+  type Grams,
+  grams,
+  type Outcome,
+  refused,
+} from '../chemistry/quantity.ts';
 import { reckon } from '../chemistry/reckon.ts';
 import { type WeighedCharge, weigh } from '../chemistry/weigh.ts';
+import { yields } from '../chemistry/yields.ts';
 import type { BatchSize, Reference, Scale } from '../reference/reference.ts';
 import type { BatchDocument } from './document.ts';
 import { percentRange } from './percent-range.ts';
 
-/** One batch size of a formula: rounded weights with their margin, or the reason why there are none. */
+/**
+ * One batch size of a formula: rounded weights with their margin and yield, or the reason why there are none.
+ * `driedTo` is the release moisture of a bar, `null` for a paste or liquid.
+ */
 export function computeBatch(
   charge: Charge,
   batch: BatchSize,
+  driedTo: Fraction | null,
   reference: Reference,
 ): BatchDocument {
   const weighed = weighBatch(charge, batch, reference);
   if (!weighed.ok) return refusedBatch(batch, weighed.breach);
   const { charge: rounded, steps, superfat, weighing } = weighed.value;
   const margin = superfatMargin(rounded, reference.constants, weighing);
+  const balance = massBalance(rounded, reference.constants);
+  const kept = 1 - batch.losses;
   return {
     id: batch.id,
     label: batch.label,
@@ -50,6 +64,11 @@ export function computeBatch(
       worstCase: percentRange(margin.worstCase),
     },
     bars: batch.size.by === 'bars' ? batch.size.count : null,
+    yield: {
+      poured: balance.total * kept,
+      releasedMass: yields(balance, driedTo).releasedMass * kept,
+      soap: balance.soap * kept,
+    },
     refused: null,
   };
 }
@@ -122,6 +141,7 @@ function refusedBatch(batch: BatchSize, breach: Breach): BatchDocument {
     total: null,
     superfat: null,
     bars: null,
+    yield: null,
     refused: breach,
   };
 }

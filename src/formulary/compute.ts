@@ -2,9 +2,10 @@ import { massBalance } from '../chemistry/balance.ts';
 import type { Charge } from '../chemistry/charge.ts';
 import { lyeOf } from '../chemistry/lye.ts';
 import { lyeHeat } from '../chemistry/lye-heat.ts';
+import { lyeBoilingPoint, saturationAt } from '../chemistry/lye-limits.ts';
 import { superfatMargin } from '../chemistry/margin.ts';
 import { acidProfile } from '../chemistry/profile.ts';
-import { celsius, fraction, grams } from '../chemistry/quantity.ts';
+import { type Celsius, celsius, fraction, grams } from '../chemistry/quantity.ts';
 import { reckon } from '../chemistry/reckon.ts';
 import {
   AS_USED,
@@ -24,6 +25,7 @@ import { prepareFormulation } from './formulation.ts';
 import { percentRange } from './percent-range.ts';
 import type { Problem } from './problem.ts';
 import { checkRelease } from './release.ts';
+import { scheduleOf } from './schedule.ts';
 
 /** What the document is reckoned on. [g] */
 const MASS_OF_FATS = grams(1000);
@@ -61,15 +63,20 @@ function documentOf(formula: Formula, charge: Charge, reference: Reference): For
   const equivalents = equivalentsOf(charge, AS_USED, constants);
   const margin = superfatMargin(charge, constants);
   const lye = lyeOf(charge);
-  const heat = lyeHeat(charge, celsius(shop.startTemperature), reference.tables.lyeHeat, constants);
+  const start = celsius(shop.startTemperature);
+  const lyeTables = reference.tables.lyeHeat;
+  const heat = lyeHeat(charge, start, lyeTables, constants);
+  const allWater = lyeHeat({ ...charge, heldBack: grams(0) }, start, lyeTables, constants);
+  const saturation = (temperature: Celsius) => {
+    const limit = saturationAt(charge, temperature, lyeTables);
+    return limit === null ? null : limit * 100;
+  };
   const profile = acidProfile([...charge.fats, ...charge.afterCookFats], constants);
   const balance = massBalance(charge, constants);
-  const given = yields(
-    balance,
-    formula.kind === 'bar' ? fraction(releaseMoisture(formula, reference)) : null,
-  );
+  const driedTo = formula.kind === 'bar' ? fraction(releaseMoisture(formula, reference)) : null;
+  const given = yields(balance, driedTo);
   const batches = batchesOf(formula, reference).map((batch) =>
-    computeBatch(charge, batch, reference),
+    computeBatch(charge, batch, driedTo, reference),
   );
   const superfat = {
     expanded: percentRange(margin.expanded),
@@ -113,7 +120,13 @@ function documentOf(formula: Formula, charge: Charge, reference: Reference): For
       pureAsMade: lye.pureAsMade * 100,
       peakTemperature: heat.ok ? heat.value.peak : null,
       peakTemperatureSpread: heat.ok ? [heat.value.coolest, heat.value.peak] : null,
-      boilingPoint: heat.ok ? heat.value.boilingPoint : null,
+      startTemperature: start,
+      peakWithAllWater: charge.heldBack > 0 && allWater.ok ? allWater.value.peak : null,
+      boilingPoint: lyeBoilingPoint(charge, lyeTables),
+      saturation: {
+        atStart: saturation(start),
+        atPeak: heat.ok ? saturation(heat.value.peak) : null,
+      },
     },
     equivalents,
     superfat: {
@@ -132,6 +145,7 @@ function documentOf(formula: Formula, charge: Charge, reference: Reference): For
       moisture: percents(given.moisture),
       releasedMass: given.releasedMass,
     },
+    schedule: scheduleOf(formula),
     batches,
     cautions: [],
     breaches: [

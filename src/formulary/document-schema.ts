@@ -50,6 +50,10 @@ const batch = z
       .readonly()
       .nullable(),
     bars: number.nullable(),
+    yield: z
+      .strictObject({ poured: number, releasedMass: number, soap: number })
+      .readonly()
+      .nullable(),
     refused: breach.nullable(),
   })
   .readonly();
@@ -150,7 +154,12 @@ export const documentSchema: z.ZodType<FormulaDocument> = z
         pureAsMade: number,
         peakTemperature: number.nullable(),
         peakTemperatureSpread: pair.nullable(),
+        startTemperature: number,
+        peakWithAllWater: number.nullable(),
         boilingPoint: number.nullable(),
+        saturation: z
+          .strictObject({ atStart: number.nullable(), atPeak: number.nullable() })
+          .readonly(),
       })
       .readonly(),
     equivalents: z
@@ -178,6 +187,9 @@ export const documentSchema: z.ZodType<FormulaDocument> = z
       .readonly(),
     profile: profile.nullable(),
     yield: yields,
+    schedule: z
+      .strictObject({ cutFromDay: number.nullable(), releaseFromDay: number.nullable() })
+      .readonly(),
     batches: list(batch),
     cautions: list(
       z

@@ -1,3 +1,5 @@
+import type { Schedule } from './schedule.ts';
+
 /**
  * One computed formula as plain data: what `npm run compute` prints, what `data/formulas/CODE.json`
  * holds and what the pages are made from. Unrounded. Masses in g per 1000 g of the fats that the alkali
@@ -41,7 +43,13 @@ export interface FormulaDocument {
     readonly peakTemperature: number | null;
     /** Coolest and hottest data set. */
     readonly peakTemperatureSpread: readonly [number, number] | null;
+    /** The shop's temperature of alkali and water, from which the peak is reckoned. */
+    readonly startTemperature: number;
+    /** The peak if no water were held back; `null` where none is, or where there is no number. */
+    readonly peakWithAllWater: number | null;
     readonly boilingPoint: number | null;
+    /** Percent hydroxide in a saturated lye, to be held against `pureAsMade`. */
+    readonly saturation: { readonly atStart: number | null; readonly atPeak: number | null };
     /** Percent hydroxide in hydroxide and water, in the pot. */
     readonly pureAsMade: number;
   };
@@ -67,6 +75,7 @@ export interface FormulaDocument {
   readonly release: ReleaseCheck;
   readonly profile: Profile | null;
   readonly yield: Yield;
+  readonly schedule: Schedule;
   readonly batches: readonly BatchDocument[];
   readonly cautions: readonly CautionDocument[];
   readonly breaches: readonly {
@@ -178,6 +187,15 @@ export interface BatchDocument {
     readonly worstCase: readonly [number, number];
   } | null;
   readonly bars: number | null;
+  /** After the shop's losses for this size. [g] */
+  readonly yield: {
+    /** What reaches the moulds or the vat. */
+    readonly poured: number;
+    /** The same dried to the release moisture; equal to `poured` for pastes and liquids. */
+    readonly releasedMass: number;
+    /** Dry soap in it. */
+    readonly soap: number;
+  } | null;
   /** Why there are no weights: the breach. The arrays above are then empty. */
   readonly refused: {
     readonly rule: string;

@@ -48,6 +48,7 @@ export const BATCH: BatchDocument = {
   total: 1512.1,
   superfat: { weighed: 5.04, expanded: [2.8, 7.2], worstCase: [-0.4, 9] },
   bars: null,
+  yield: { poured: 1466.7, releasedMass: 1240, soap: 1000 },
   refused: null,
 };
 
@@ -62,6 +63,7 @@ export const REFUSED: BatchDocument = {
   massOfFats: null,
   total: null,
   superfat: null,
+  yield: null,
   refused: { rule: 'weight-below-scale-step', numbers: {} },
 };
 
