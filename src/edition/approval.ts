@@ -1,5 +1,6 @@
 import type { Formula } from '../formulary/formula.ts';
 import type { Problem } from '../reference/problem.ts';
+import type { EditionRule } from '../words/en/problems-edition.ts';
 import { editionProblem } from './edition-problem.ts';
 
 /** What an approval is worth on a day. */
@@ -9,6 +10,14 @@ export type ApprovalState =
   | 'review-date-passed'
   | 'not-approved'
   | 'withdrawn';
+
+/** Rules that a proof edition only warns of. */
+export const APPROVAL_RULES: ReadonlySet<string> = new Set<EditionRule>([
+  'edition/not-approved',
+  'edition/approved-later',
+  'edition/changed-since-approval',
+  'edition/review-date-passed',
+]);
 
 type Approvable = Pick<Formula, 'approval' | 'withdrawn'>;
 

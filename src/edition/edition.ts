@@ -105,20 +105,21 @@ export function editionOf(formulary: Formulary, inputs: EditionInputs): Edition 
     a.code < b.code ? -1 : 1,
   );
   const past = pastSheets(formulas, ledger, asOf);
-  const id = editionId(inputs, past);
+  const proof = drafts && entries.some(({ state }) => state !== 'approved');
+  const id = editionId(inputs, proof, past);
   const document: EditionDocument = {
     schema: 1,
     shop: reference.shop.name,
     id,
     asOf,
-    proof: drafts && entries.some(({ state }) => state !== 'approved'),
+    proof,
     models: MODELS_VERSION,
     formulas,
   };
   return {
     id,
     asOf,
-    proof: document.proof,
+    proof,
     formulary: current,
     states: new Map(entries.map(({ code, state }) => [code, state])),
     withdrawn,
@@ -141,11 +142,15 @@ function entryOf({ formula, document }: ComputedFormula, { reference }: Formular
 }
 
 /** Of the ledger only what pages show counts: to publish an edition does not give its next build a new id. */
-function editionId({ asOf, drafts, files, last }: EditionInputs, past: SheetList['past']): string {
+function editionId(
+  { asOf, files, last }: EditionInputs,
+  proof: boolean,
+  past: SheetList['past'],
+): string {
   return digestOf({
     models: MODELS_VERSION,
     'as-of': asOf,
-    drafts,
+    proof,
     files: files.map(({ path, hash }): Canonical => ({ path, hash })),
     past: past.map(({ digest, on }): Canonical => ({ digest, on })),
     last: last?.id ?? null,
