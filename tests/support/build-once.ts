@@ -22,8 +22,15 @@ export default function buildOnce(project: TestProject): () => void {
   execFileSync('npm', ['run', '--silent', 'build', '--', '--out', site], {
     cwd: ROOT,
     stdio: ['ignore', 'ignore', 'inherit'],
+    env: userEnvironment(),
     shell: process.platform === 'win32',
   });
   project.provide('site', site);
   return () => rmSync(folder, { recursive: true, force: true });
+}
+
+/** The environment of a user: what the test runner adds would make Astro build for tests. */
+function userEnvironment(): NodeJS.ProcessEnv {
+  const isOurs = (name: string) => name === 'NODE_ENV' || /^(VITE|VITEST)(_|$)/.test(name);
+  return Object.fromEntries(Object.entries(process.env).filter(([name]) => !isOurs(name)));
 }
