@@ -1,5 +1,5 @@
 import type { Formulary } from '../formulary/formulary.ts';
-import type { FatRecord, ValueRecord } from '../reference/reference.ts';
+import type { FatRecord, Reference, ValueRecord } from '../reference/reference.ts';
 import { words } from '../words/catalogue.ts';
 import { plain, range } from '../words/numbers.ts';
 
@@ -102,4 +102,21 @@ export function acidRows(fat: FatRecord, { reference }: Formulary): readonly Aci
       max: ends?.max ?? null,
     };
   });
+}
+
+/** What was measured on the released lots of a fat, a sentence each. */
+export function lotLines(fat: string, { lots }: Reference): readonly string[] {
+  const { lot: sentence, measures } = words.fatPages;
+  return lots.fats
+    .filter((lot) => lot.fat === fat && lot.status === 'released')
+    .flatMap(({ lot, saponificationValue, acidValue }) =>
+      (
+        [
+          [measures.saponificationValue, saponificationValue],
+          [measures.acidValue, acidValue],
+        ] as const
+      ).flatMap(([measure, found]) =>
+        found ? [sentence(lot, measure, found.value, found.uncertainty, found.method)] : [],
+      ),
+    );
 }

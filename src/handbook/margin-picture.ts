@@ -6,6 +6,8 @@ export interface MarginPicture {
   readonly written: number;
   readonly expanded: readonly [number, number];
   readonly worst: readonly [number, number];
+  /** The expanded interval of the trade ranges, where lots have narrowed it. */
+  readonly withoutLots: readonly [number, number] | null;
   readonly ticks: readonly { readonly at: number; readonly value: number }[];
 }
 
@@ -15,9 +17,11 @@ export interface MarginPicture {
  */
 export function marginPicture({ superfat }: FormulaDocument): MarginPicture {
   const { written, expanded, worstCase } = superfat;
-  const low = Math.floor(Math.min(0, written, expanded[0], worstCase[0]) - 1);
+  const trade = superfat.withoutLots?.expanded ?? null;
+  const all = [0, written, ...expanded, ...worstCase, ...(trade ?? [])];
+  const low = Math.floor(Math.min(...all) - 1);
   // at least four points wide, so that there are ticks to read distances from
-  const high = Math.max(low + 4, Math.ceil(Math.max(0, written, expanded[1], worstCase[1]) + 1));
+  const high = Math.max(low + 4, Math.ceil(Math.max(...all) + 1));
   const at = (value: number) => Number(((100 * (value - low)) / (high - low)).toFixed(3));
   const span = high - low;
   const step = span > 24 ? 5 : span > 12 ? 2 : 1;
@@ -30,6 +34,7 @@ export function marginPicture({ superfat }: FormulaDocument): MarginPicture {
     written: at(written),
     expanded: [at(expanded[0]), at(expanded[1])],
     worst: [at(worstCase[0]), at(worstCase[1])],
+    withoutLots: trade && [at(trade[0]), at(trade[1])],
     // a label at the very edge would be cut off
     ticks: ticks.filter((tick) => tick.at > 1 && tick.at < 99),
   };

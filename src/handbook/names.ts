@@ -4,6 +4,7 @@ import type { Reference } from '../reference/reference.ts';
 export function nameOf(reference: Reference, id: string): string {
   const record =
     reference.fats.get(id) ??
+    reference.blends.get(id) ??
     reference.alkalis.get(id) ??
     reference.additives.get(id) ??
     reference.liquids.get(id);

@@ -39,7 +39,10 @@ export function fatProvenance(
       value: fixed(used.value, 1),
       range: range(used.low, used.high, 1),
       source: used.lot
-        ? words.formulaPage.provenance.lot(used.lot, lot?.method ?? used.source)
+        ? words.formulaPage.provenance.lot(
+            used.lot,
+            (lot?.saponificationValue ?? lot?.acidValue)?.method ?? used.source,
+          )
         : published.join('; '),
       how: used.lot ? words.frame.how.measured : chosen ? words.frame.how[chosen.how] : '',
     };

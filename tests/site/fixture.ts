@@ -12,6 +12,7 @@ export const REFERENCE = {
     ['citric-acid', { name: 'Citric acid' }],
     ['kaolin', { name: 'Kaolin' }],
   ]),
+  blends: new Map(),
   liquids: new Map(),
   acids: new Map(
     [

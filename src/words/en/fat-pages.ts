@@ -52,8 +52,8 @@ export const fatPages = {
   atTemperature: (celsius: number) => `at ${plain(celsius, 1)} °C`,
   usedHere: 'used',
   lowersValue: 'lowers the value used',
-  lot: (lot: string, value: number, uncertainty: number) =>
-    `Lot ${lot}: ${plain(value, 1)} ± ${plain(uncertainty, 1)} mg KOH/g, measured. Formulas are reckoned on it.`,
+  lot: (lot: string, measure: string, value: number, uncertainty: number, method: string) =>
+    `Lot ${lot}, ${measure}: ${plain(value, 2)} ± ${plain(uncertainty, 2)} mg KOH/g, ${method}. Formulas are reckoned on it.`,
   computedFrom: 'Shares used are the middles of the range, brought to 100 %.',
   notUsed: 'No formula uses it.',
   asAfterCook: 'after the cook',

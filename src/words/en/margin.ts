@@ -4,6 +4,7 @@ export const marginWords = {
   written: 'written',
   expanded: 'expanded interval',
   worst: 'worst case',
+  withoutLots: 'expanded interval without the measured lots, on trade ranges',
   freeAlkali: 'free alkali from here',
   summary: (
     written: number,
