@@ -5,6 +5,8 @@ import type { ShopFolders } from '../formulary/formulary.ts';
 import { loadFormulary, packagedData } from '../formulary/load.ts';
 import type { Problem } from '../formulary/problem.ts';
 import { readEvidence } from '../reference/evidence/read-evidence-fs.ts';
+import { finderData } from '../site/find/finder-data.ts';
+import { readSavedSearches } from '../site/find/saved-searches-fs.ts';
 import type { SiteInput } from '../site/input.ts';
 
 export type LoadedSite =
@@ -21,13 +23,18 @@ export function loadSite(folders: ShopFolders, asOf: string): LoadedSite {
     return { ok: false, problems: [...loaded.problems, ...evidence.problems] };
   }
   // what is withdrawn reaches no page and no file
-  const inUse = formulas.filter(({ formula }) => !formula.withdrawn);
+  const inUse = { reference, formulas: formulas.filter(({ formula }) => !formula.withdrawn) };
+  const kept = readSavedSearches(folders.data, finderData(inUse));
+  if (kept.problems.length > 0) {
+    return { ok: false, problems: [...loaded.problems, ...kept.problems] };
+  }
   return {
     ok: true,
     problems: loaded.problems,
     input: {
-      formulary: { reference, formulas: inUse },
+      formulary: inUse,
       evidence: evidence.rows,
+      searches: kept.searches,
       asOf,
       formulasFolder: resolve(folders.formulas),
     },

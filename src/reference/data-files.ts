@@ -29,8 +29,8 @@ export const PACKAGED_FILES = [
  */
 export const SHOP_FILES = ['shop.yaml', 'lots.yaml', 'prices.yaml'];
 
-/** Read by the evidence of the models, not by the reference. */
-const OTHER_FILES = ['evidence.yaml'];
+/** Read elsewhere: by the evidence of the models, and by the pages of kept searches. */
+const OTHER_FILES = ['evidence.yaml', 'searches.yaml'];
 
 export const DATA_FOLDERS = ['fats', 'alkalis', 'tables'] as const;
 

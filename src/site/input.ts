@@ -1,11 +1,13 @@
 import type { Formulary } from '../formulary/formulary.ts';
 import type { EvidenceRow } from '../reference/evidence/evidence.ts';
+import type { SavedSearch } from '../search/saved/saved-search.ts';
 
 /** Everything that the pages are made from. */
 export interface SiteInput {
   readonly formulary: Formulary;
   /** Computed against published, for the models and the fats. */
   readonly evidence: readonly EvidenceRow[];
+  readonly searches: readonly SavedSearch[];
   /** The one date that comparisons use and that pages show, `2026-12-01`. */
   readonly asOf: string;
   /** Folder of the formula files, for the pictures that they show. */

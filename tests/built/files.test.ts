@@ -30,7 +30,8 @@ describe('every page', () => {
       const [file = '', anchor] = link.split('#');
       const target = file === '' ? path : posix.normalize(posix.join(dirname(path), file));
       expect(existsSync(join(site, decodeURIComponent(target))), `${path} -> ${link}`).toBe(true);
-      if (anchor && target.endsWith('.html')) {
+      // with a `=` it asks the finder something
+      if (anchor && !anchor.includes('=') && target.endsWith('.html')) {
         expect(read(target), `${path} -> ${link}`).toContain(`id="${anchor}"`);
       }
     }

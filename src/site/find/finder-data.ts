@@ -7,7 +7,7 @@ import { NUMBER_PROPERTIES } from './number-properties.ts';
 /** Acids below this in every formula are traces of the standards' ranges. [percent of the fatty acids] */
 const LEAST_ACID = 0.5;
 
-/** All that the finder knows of a formulary. Properties and traits that no formula has are left out. */
+/** All that the finder knows of a formulary. */
 export function finderData(formulary: Formulary): FinderData {
   const { formulas } = formulary;
   const properties = NUMBER_PROPERTIES.map(
@@ -24,17 +24,15 @@ export function finderData(formulary: Formulary): FinderData {
   return {
     codes: formulas.map(({ document }) => document.code),
     names: formulas.map(({ document }) => document.name),
-    properties: [...properties, ...acidProperties(formulary)].filter(({ values }) =>
-      values.some((value) => value !== null),
-    ),
-    traits: traitsOf(formulary).filter(({ choices }) => choices.length > 0),
+    properties: [...properties, ...acidProperties(formulary)],
+    traits: traitsOf(formulary),
   };
 }
 
 function acidProperties({ formulas, reference }: Formulary): readonly Property[] {
   const acids = [
     ...new Set(formulas.flatMap(({ document }) => Object.keys(document.profile?.acids ?? {}))),
-  ].sort((a, b) => (a < b ? -1 : 1));
+  ].sort((a, b) => carbons(a) - carbons(b) || (a < b ? -1 : 1));
   return acids
     .map((acid): Property => {
       const values = formulas.map(({ document }) =>
@@ -55,3 +53,6 @@ function acidProperties({ formulas, reference }: Formulary): readonly Property[]
 
 const rounded = (value: number | null, decimals: number) =>
   value === null ? null : Number(value.toFixed(decimals)) + 0;
+
+/** 18 of `C18:1-OH`. */
+const carbons = (acid: string) => Number(/^C(\d+)/.exec(acid)?.[1] ?? 0);

@@ -8,43 +8,59 @@ interface TraitSource {
   readonly id: keyof typeof findWords.traits;
   readonly holds: 'one' | 'many';
   readonly only?: true;
+  /** Known beside those in use, so that a kept search stays valid when the last formula with one goes. */
+  readonly known?: Iterable<string>;
   readonly of: (computed: ComputedFormula) => readonly string[];
   readonly name: (id: string) => string;
 }
 
-/** What every formula of the formulary is or has; choices that no formula has are left out. */
+/** What every formula of the formulary is or has. */
 export function traitsOf({ formulas, reference }: Formulary): readonly Trait[] {
   const material = (id: string) => nameOf(reference, id);
-  const labels = new Map(
-    formulas.flatMap(({ document }) =>
-      document.batches.map(({ id, label }) => [id, label] as const),
-    ),
-  );
+  const labels = new Map(reference.shop.batches.map(({ id, label }) => [id, label]));
   const sources: readonly TraitSource[] = [
     {
       id: 'kind',
       holds: 'one',
+      known: Object.keys(frame.kinds),
       of: ({ document }) => [document.kind],
       name: (id) => frame.kinds[id as keyof typeof frame.kinds],
     },
     {
       id: 'process',
       holds: 'one',
+      known: Object.keys(frame.processes),
       of: ({ document }) => [document.process],
       name: (id) => frame.processes[id as keyof typeof frame.processes],
     },
-    { id: 'fats', holds: 'many', only: true, of: fatsOf, name: material },
+    {
+      id: 'fats',
+      holds: 'many',
+      only: true,
+      known: reference.fats.keys(),
+      of: fatsOf,
+      name: material,
+    },
     {
       id: 'additives',
       holds: 'many',
+      known: [...reference.additives.keys(), ...reference.liquids.keys()],
       of: ({ document }) => [...document.additives, ...document.liquids].map(({ id }) => id),
       name: material,
     },
     {
       id: 'batches',
       holds: 'many',
+      known: reference.shop.batches.map(({ id }) => id),
       of: ({ document }) => document.batches.filter(({ refused }) => !refused).map(({ id }) => id),
       name: (id) => labels.get(id) ?? id,
+    },
+    {
+      id: 'lots',
+      holds: 'many',
+      known: [...reference.lots.fats, ...reference.lots.alkalis].map(({ lot }) => lot),
+      of: lotsOf,
+      name: (id) => id,
     },
     { id: 'tags', holds: 'many', of: ({ formula }) => formula.tags, name: (id) => id },
     {
@@ -60,9 +76,9 @@ export function traitsOf({ formulas, reference }: Formulary): readonly Trait[] {
       name: (id) => id.replaceAll('-', ' '),
     },
   ];
-  return sources.map(({ id, holds, only = false, of, name }) => {
+  return sources.map(({ id, holds, only = false, known = [], of, name }) => {
     const ids = formulas.map((computed) => [...new Set(of(computed))]);
-    const choices = [...new Set(ids.flat())]
+    const choices = [...new Set([...known, ...ids.flat()])]
       .map((choice) => ({ id: choice, name: name(choice) }))
       .sort((a, b) => (a.name < b.name ? -1 : 1));
     const place = new Map(choices.map((choice, i) => [choice.id, i]));
@@ -79,6 +95,13 @@ export function traitsOf({ formulas, reference }: Formulary): readonly Trait[] {
 
 const fatsOf = ({ document }: ComputedFormula) =>
   [...document.fats, ...document.afterCookFats].map(({ id }) => id);
+
+const lotsOf = ({ document }: ComputedFormula) => [
+  ...[...document.fats, ...document.afterCookFats].flatMap(
+    ({ saponificationValue: { lot } }) => lot ?? [],
+  ),
+  ...document.alkali.flatMap(({ assay: { lot } }) => lot ?? []),
+];
 
 function allergensOf({ document }: ComputedFormula, reference: Formulary['reference']) {
   const ids = [

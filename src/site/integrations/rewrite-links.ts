@@ -24,7 +24,10 @@ export function rewriteLinks(
     const [path = '', anchor] = link.split('#');
     const target = path === '' ? file : path.slice(1);
     if (!files.has(target)) missing.push(link);
-    else if (anchor && !hasAnchor(texts.get(target) ?? '', anchor)) missing.push(link);
+    // with a `=` it asks the finder something
+    else if (anchor && !anchor.includes('=') && !hasAnchor(texts.get(target) ?? '', anchor)) {
+      missing.push(link);
+    }
     const hash = anchor === undefined ? '' : `#${anchor}`;
     return path === '' ? hash : posix.relative(from, target) + hash;
   };
