@@ -5,7 +5,12 @@ import type { Fraction, Grams, Moles } from './quantity.ts';
 export interface Formulation {
   readonly process: 'cold' | 'hot';
   /** Shares of the fats that the alkali is reckoned on; they sum to 1. */
-  readonly fats: readonly { readonly fat: Fat; readonly share: Fraction }[];
+  readonly fats: readonly {
+    readonly fat: Fat;
+    readonly share: Fraction;
+    /** Of a part of a blend that stands ready: its id. The parts of one blend are weighed as one. */
+    readonly blend?: string;
+  }[];
   /** Added after the cook, mass per mass of `fats`; not counted in the alkali. */
   readonly afterCookFats: readonly { readonly fat: Fat; readonly perFats: Fraction }[];
   readonly alkali: readonly { readonly supply: AlkaliSupply; readonly share: Fraction }[];
@@ -39,7 +44,7 @@ export type WaterRule =
 /** Masses for a stated mass of fats, unrounded. */
 export interface Charge {
   readonly formulation: Formulation;
-  readonly fats: readonly { readonly fat: Fat; readonly mass: Grams }[];
+  readonly fats: readonly { readonly fat: Fat; readonly mass: Grams; readonly blend?: string }[];
   readonly afterCookFats: readonly { readonly fat: Fat; readonly mass: Grams }[];
   readonly alkali: readonly {
     readonly supply: AlkaliSupply;

@@ -1,3 +1,4 @@
+import { massByFat } from './blend.ts';
 import type { Charge } from './charge.ts';
 import type { Constants } from './constants.ts';
 import type { Fat } from './materials.ts';
@@ -7,7 +8,10 @@ import { type Equivalents, equivalentsOf, type Reading, superfatFrom } from './s
 
 /** What the scale may add to each weighing. [g] */
 export interface WeighingError {
-  /** Largest error of one weighing, half-width, on top of half a step. Per line, in the charge's order. */
+  /**
+   * Largest error of one weighing, half-width, on top of half a step. Per line, in the charge's order; of a
+   * blend each part has its share of the one error.
+   */
   readonly fats: readonly number[];
   readonly alkali: readonly number[];
   readonly additives: readonly number[];
@@ -93,7 +97,8 @@ function spreadAround(
     const equivalents = expandedHalfWidth(range) / (1000 * constants.hydroxide.K);
     budget.push({ id, halfWidth: perEquivalent * mass * equivalents });
   };
-  for (const { fat, mass } of charge.fats) addFat(`fat:${fat.id}`, fat, mass);
+  // a fat by itself and in a blend has one saponification value, so its lines err together
+  for (const { fat, mass } of massByFat(charge.fats)) addFat(`fat:${fat.id}`, fat, mass);
   for (const { liquid, mass, at: stage } of charge.liquids) {
     if (liquid.fatData && isBeforeSaponification(stage)) {
       addFat(`liquid:${liquid.id}`, liquid.fatData, mass * liquid.fat);
@@ -131,10 +136,14 @@ function scaleHalfWidth(
   const add = (sensitivity: number, error: number) => {
     squares += (sensitivity * error) ** 2;
   };
-  charge.fats.forEach(({ fat }, i) => {
+  const blends = new Map<string, number>();
+  charge.fats.forEach(({ fat, blend }, i) => {
     const e = equivalentsPerGram(valueAt(fat, 'middle', reading.waxAsAcids), constants);
-    add((keptBack * e) / at.saponifiable, weighing.fats[i] ?? 0);
+    const moved = ((keptBack * e) / at.saponifiable) * (weighing.fats[i] ?? 0);
+    if (blend === undefined) add(moved, 1);
+    else blends.set(blend, (blends.get(blend) ?? 0) + moved);
   });
+  for (const moved of blends.values()) add(moved, 1);
   charge.alkali.forEach(({ supply }, i) => {
     const assay = (supply.assay.low + supply.assay.high) / 2;
     add(assay / constants.hydroxide[supply.cation] / at.saponifiable, weighing.alkali[i] ?? 0);

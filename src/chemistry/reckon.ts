@@ -20,7 +20,10 @@ export function reckon(
   constants: Constants,
 ): Outcome<Charge> {
   const { superfat, water: rule, liquids } = formulation;
-  const fats = formulation.fats.map(({ fat, share }) => ({ fat, mass: grams(massOfFats * share) }));
+  const fats = formulation.fats.map(({ share, ...line }) => ({
+    ...line,
+    mass: grams(massOfFats * share),
+  }));
   const additives = formulation.additives.map(({ additive, perFats, at }) => ({
     additive,
     at,

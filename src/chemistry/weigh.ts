@@ -1,3 +1,4 @@
+import { massWeighedWith } from './blend.ts';
 import type { Charge } from './charge.ts';
 import type { Constants } from './constants.ts';
 import type { WeighingError } from './margin.ts';
@@ -12,7 +13,7 @@ export interface ScaleReading {
   readonly error: Grams;
 }
 
-/** A charge whose masses are all whole steps of a scale, the steps beside it, and its superfat. */
+/** A charge whose weighings are all whole steps of a scale, the steps beside it, and its superfat. */
 export interface WeighedCharge {
   readonly charge: Charge;
   /** The fats that the alkali is reckoned on, before rounding. */
@@ -32,8 +33,8 @@ export interface WeighedCharge {
 }
 
 /**
- * Rounds a charge to what a scale can show, on the side of less free alkali: fats, liquids and water to the
- * nearest step, acids that the alkali compensates up, alkali down, and then further down, step by step,
+ * Rounds a charge to what a scale can show, on the side of less free alkali: fats (a blend as one), liquids and
+ * water to the nearest step, acids that the alkali compensates up, alkali down, and then further down, step by step,
  * until the superfat of the rounded weights is not below the one written.
  *
  * Refuses `size-too-small-for-scale` where that moves the superfat by more than `largestShift` [1], and
@@ -46,7 +47,11 @@ export function weigh(
   constants: Constants,
 ): Outcome<WeighedCharge> {
   const nearest = (mass: Grams) => round(mass, scaleFor(mass), Math.round);
-  const fats = charge.fats.map((line) => ({ line, ...nearest(line.mass) }));
+  // the parts of a blend are on the scale together and share its rounding
+  const fats = charge.fats.map((line) => {
+    const together = massWeighedWith(line, charge.fats);
+    return { line, part: line.mass / together, ...nearest(together) };
+  });
   const afterCookFats = charge.afterCookFats.map((line) => ({ line, ...nearest(line.mass) }));
   const acidsUp = (acidity: number, at: Stage) =>
     acidity > 0 && isBeforeSaponification(at) ? ceilOfSteps : Math.round;
@@ -73,7 +78,7 @@ export function weigh(
 
   const rounded = (): Charge => ({
     ...charge,
-    fats: fats.map((entry) => ({ ...entry.line, mass: massOf(entry) })),
+    fats: fats.map((entry) => ({ ...entry.line, mass: partOf(entry) })),
     afterCookFats: afterCookFats.map((entry) => ({ ...entry.line, mass: massOf(entry) })),
     liquids: liquids.map((entry) => ({ ...entry.line, mass: massOf(entry) })),
     additives: additives.map((entry) => ({ ...entry.line, mass: massOf(entry) })),
@@ -123,7 +128,7 @@ export function weigh(
     },
     superfat,
     weighing: {
-      fats: fats.map(({ doubt }) => doubt),
+      fats: fats.map(({ doubt, part }) => doubt * part),
       alkali: alkali.map(({ doubt }) => doubt),
       additives: additives.map(({ doubt }) => doubt),
       liquids: liquids.map(({ doubt }) => doubt),
@@ -150,6 +155,9 @@ function round(exact: Grams, scale: ScaleReading, how: (steps: number) => number
 
 /** 3 x 0.1 is 0.30000000000000004 in binary; the sheet says 0.3 and so does the mass. */
 const massOf = ({ steps, step }: Rounded): Grams => grams(Number((steps * step).toPrecision(12)));
+
+const partOf = (entry: Rounded & { readonly part: number }): Grams =>
+  grams(Number((massOf(entry) * entry.part).toPrecision(12)));
 
 // a mass that is a whole number of steps but for the last bit must not lose or gain one
 const floorOfSteps = (steps: number) => Math.floor(steps + 1e-9);

@@ -15,7 +15,7 @@ export type LoadedSite =
 
 /** From a shop's folders to all that the pages are made from, or to every problem that stands against it. */
 export function loadSite(folders: ShopFolders, asOf: string): LoadedSite {
-  const loaded = loadFormulary(folders);
+  const loaded = loadFormulary(folders, { asOf });
   if (!loaded.ok) return loaded;
   const { reference, formulas } = withDigests(withCautions(loaded.formulary, asOf));
   const evidence = readEvidence(packagedData(), reference);

@@ -3,10 +3,11 @@ import type { Fat } from '../chemistry/materials.ts';
 import type { Range } from '../chemistry/quantity.ts';
 import type { Formula } from '../formulary/formula.ts';
 import { prepareFormulation } from '../formulary/formulation.ts';
+import { withoutLots } from '../formulary/lots.ts';
 import type { Reference } from '../reference/reference.ts';
 import type { Canonical } from './canonical-text.ts';
 import { normalisedText } from './normalised-text.ts';
-import { publishedCharge, withoutLots } from './published-charge.ts';
+import { publishedCharge } from './published-charge.ts';
 import { sixDigits, weightsOfCharge } from './weights-per-kilogram.ts';
 
 /** Raised by hand when a model changes its meaning without moving a weight by six digits. */
@@ -36,7 +37,7 @@ function formulaContent(formula: Formula): Canonical {
     kind: formula.kind,
     process: formula.process,
     revision: formula.revision,
-    fats: formula.fats.map(({ fat, share }) => ({ fat, share })),
+    fats: formula.fats.map(({ fat, share, blend }) => ({ fat, share, blend })),
     'after-cook-fats': unlessEmpty(
       formula.afterCookFats.map(({ fat, percentOfFats }) => ({
         fat,

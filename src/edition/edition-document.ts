@@ -82,7 +82,7 @@ export function currentEntry(
     digests: Object.fromEntries(document.batches.map(({ id, digest }) => [id, digest])),
     lots,
     weights: weightsOfDocument(document),
-    shares: document.fats.map(({ id, share }) => ({ id, share: sixDigits(share) })),
+    shares: sharesByFat(document.fats),
     superfat: {
       written: superfat.written,
       expanded: ends(superfat.expanded),
@@ -94,6 +94,13 @@ export function currentEntry(
         ) as ProfileSummary)
       : null,
   };
+}
+
+/** A fat that stands there by itself and in a blend is one fat. */
+function sharesByFat(fats: FormulaDocument['fats']): CurrentEntry['shares'] {
+  const shares = new Map<string, number>();
+  for (const { id, share } of fats) shares.set(id, (shares.get(id) ?? 0) + share);
+  return [...shares].map(([id, share]) => ({ id, share: sixDigits(share) }));
 }
 
 const ends = ([low, high]: readonly [number, number]) => [sixDigits(low), sixDigits(high)] as const;

@@ -3,13 +3,8 @@ import { grams, type Outcome } from '../chemistry/quantity.ts';
 import { reckon } from '../chemistry/reckon.ts';
 import type { Formula } from '../formulary/formula.ts';
 import { prepareFormulation } from '../formulary/formulation.ts';
+import { withoutLots } from '../formulary/lots.ts';
 import type { Reference } from '../reference/reference.ts';
-
-/** The same data as if the shop had no lots: every value is the published or trade range's. */
-export const withoutLots = (reference: Reference): Reference => ({
-  ...reference,
-  lots: { fats: [], alkalis: [] },
-});
 
 /**
  * A formula for 1000 g of fats with published values, which is what an approval is of: a new lot does not

@@ -1,3 +1,4 @@
+import { fatWeighings } from '../chemistry/blend.ts';
 import type { Charge } from '../chemistry/charge.ts';
 import type { FormulaDocument } from '../formulary/document.ts';
 
@@ -30,7 +31,7 @@ export const sixDigits = (value: number): number => Number(value.toPrecision(DIG
 /** From a charge of 1000 g of fats, to six significant digits. */
 export function weightsOfCharge(charge: Charge): WeightsPerKilogram {
   return {
-    fats: charge.fats.map(({ fat, mass }) => weight(fat.id, mass)),
+    fats: fatWeighings(charge.fats).map(({ id, mass }) => weight(id, mass)),
     afterCookFats: charge.afterCookFats.map(({ fat, mass }) => weight(fat.id, mass)),
     alkali: charge.alkali.map(({ supply, weighedMass }) => weight(supply.id, weighedMass)),
     water: sixDigits(charge.water),
@@ -46,7 +47,7 @@ export function weightsOfCharge(charge: Charge): WeightsPerKilogram {
 /** From a document, which holds the weights with the lots in force; to six significant digits. */
 export function weightsOfDocument(document: FormulaDocument): WeightsPerKilogram {
   return {
-    fats: document.fats.map(({ id, mass }) => weight(id, mass)),
+    fats: weighingsOf(document.fats),
     afterCookFats: document.afterCookFats.map(({ id, mass }) => weight(id, mass)),
     alkali: document.alkali.map(({ id, weighedMass }) => weight(id, weighedMass)),
     water: sixDigits(document.water),
@@ -54,6 +55,13 @@ export function weightsOfDocument(document: FormulaDocument): WeightsPerKilogram
     liquids: document.liquids.map(({ id, mass, at }) => ({ ...weight(id, mass), at })),
     additives: document.additives.map(({ id, mass, at }) => ({ ...weight(id, mass), at })),
   };
+}
+
+/** Parts of one blend are one weight, under the id of the blend. */
+function weighingsOf(fats: FormulaDocument['fats']): readonly Weight[] {
+  const masses = new Map<string, number>();
+  for (const { id, blend = id, mass } of fats) masses.set(blend, (masses.get(blend) ?? 0) + mass);
+  return [...masses].map(([id, mass]) => weight(id, mass));
 }
 
 const weight = (id: string, mass: number): Weight => ({ id, mass: sixDigits(mass) });

@@ -20,13 +20,16 @@ export function amountNames(
 ): AmountNames {
   const ids = [
     ...idsOf(value.fats, 'fat'),
+    ...idsOf(value.fats, 'blend'),
     ...idsOf(value['after-cook-fats'], 'fat'),
     ...idsOf(value.additives, 'additive'),
     ...idsOf(value.liquids, 'liquid'),
   ];
   const weights = new Map<string, number>();
   for (const id of ids) weights.set(id, (weights.get(id) ?? 0) + 1);
-  const candidates = known ? [...known.fats, ...known.additives, ...known.liquids] : [];
+  const candidates = known
+    ? [...known.fats, ...known.blends, ...known.additives, ...known.liquids]
+    : [];
   const exact = new Set(candidates.map(([id]) => id));
   const misspelt = ids
     .filter((id) => !exact.has(id))

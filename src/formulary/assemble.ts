@@ -1,12 +1,14 @@
 import type { Root } from 'mdast';
 import type { Formula } from './formula.ts';
+import type { Known } from './known.ts';
 import type { Frontmatter } from './schema.ts';
 import { parseTarget } from './target.ts';
 
-/** A checked frontmatter and its text, in the project's own terms. */
+/** A checked frontmatter and its text, in the project's own terms, with blends as their parts. */
 export function assembleFormula(
   file: string,
   front: Frontmatter,
+  blends: Known['blends'],
   text: { readonly method: Root; readonly methodText: string; readonly places: Formula['places'] },
 ): Formula {
   const { alkali, release, approval } = front;
@@ -19,7 +21,7 @@ export function assembleFormula(
     process: front.process,
     revision: front.revision,
     summary: front.summary ?? null,
-    fats: front.fats,
+    fats: front.fats.flatMap((entry) => partsOf(entry, blends)),
     afterCookFats: (front['after-cook-fats'] ?? []).map((entry) => ({
       fat: entry.fat,
       percentOfFats: entry['percent-of-fats'],
@@ -67,6 +69,18 @@ export function assembleFormula(
     withdrawn: front.withdrawn ?? null,
     ...text,
   };
+}
+
+function partsOf(
+  { fat, blend, share }: Frontmatter['fats'][number],
+  blends: Known['blends'],
+): Formula['fats'] {
+  if (fat !== undefined) return [{ fat, share }];
+  const parts = blend === undefined ? undefined : blends.get(blend)?.parts;
+  if (blend === undefined || !parts) {
+    throw new RangeError('a blend that is not known is refused before the formula is assembled');
+  }
+  return parts.map((part) => ({ fat: part.fat, share: (share * part.share) / 100, blend }));
 }
 
 function waterOf(water: Frontmatter['water']): Formula['water'] {

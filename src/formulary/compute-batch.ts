@@ -1,5 +1,6 @@
 import { massBalance, massIn } from '../chemistry/balance.ts';
 import { massOfFatsFor } from '../chemistry/batch-size.ts';
+import { fatWeighings } from '../chemistry/blend.ts';
 import type { Charge } from '../chemistry/charge.ts';
 import { superfatMargin } from '../chemistry/margin.ts';
 import {
@@ -37,7 +38,9 @@ export function computeBatch(
     id: batch.id,
     label: batch.label,
     digest: null,
-    fats: rounded.fats.map(({ fat, mass }, i) => line(fat.id, mass, steps.fats[i])),
+    fats: fatWeighings(rounded.fats).map(({ id, mass, lines: [first = 0] }) =>
+      line(id, mass, steps.fats[first]),
+    ),
     afterCookFats: rounded.afterCookFats.map(({ fat, mass }, i) =>
       line(fat.id, mass, steps.afterCookFats[i]),
     ),
@@ -116,7 +119,7 @@ function heaviestWeighing(charge: Charge): Grams {
   return grams(
     Math.max(
       charge.water,
-      ...charge.fats.map(({ mass }) => mass),
+      ...fatWeighings(charge.fats).map(({ mass }) => mass),
       ...charge.alkali.map(({ weighedMass }) => weighedMass),
       ...charge.liquids.map(({ mass }) => mass),
     ),

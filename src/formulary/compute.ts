@@ -22,6 +22,7 @@ import { alkaliLines, fatLine, profileDocument } from './document-lines.ts';
 import type { Formula } from './formula.ts';
 import type { ComputedFormula } from './formulary.ts';
 import { prepareFormulation } from './formulation.ts';
+import { marginWithoutLots } from './margin-without-lots.ts';
 import { percentRange } from './percent-range.ts';
 import type { Problem } from './problem.ts';
 import { checkRelease } from './release.ts';
@@ -133,6 +134,7 @@ function documentOf(formula: Formula, charge: Charge, reference: Reference): For
       written: formula.superfat,
       ...superfat,
       final: finalSuperfat(charge, constants) * 100,
+      withoutLots: marginWithoutLots(formula, charge, reference),
       ifAcidForgotten: equivalents.acid > 0 ? superfatIfAcidForgotten(equivalents) * 100 : null,
       budget: margin.budget.map(({ id, halfWidth }) => ({ id, halfWidth: halfWidth * 100 })),
     },

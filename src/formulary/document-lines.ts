@@ -2,25 +2,27 @@ import type { Charge } from '../chemistry/charge.ts';
 import type { AcidProfile } from '../chemistry/profile.ts';
 import type { Reference } from '../reference/reference.ts';
 import type { AlkaliLine, FatLine, Profile } from './document.ts';
-import { alkaliInForce, fatInForce } from './lots.ts';
+import { alkaliInForce, decidingValue, fatInForce } from './lots.ts';
 
 export function fatLine(
-  { fat, mass }: Charge['fats'][number],
+  { fat, mass, blend }: Charge['fats'][number],
   massOfFats: number,
   reference: Reference,
 ): FatLine {
   const record = reference.fats.get(fat.id);
   const lot = record?.core ? fatInForce(record.core, reference).lot : null;
+  const deciding = lot && decidingValue(lot, fat.kind);
   const { value, low, high } = fat.saponificationValue;
   return {
     id: fat.id,
+    ...(blend !== undefined && { blend }),
     mass,
     share: (100 * mass) / massOfFats,
     saponificationValue: {
       value,
       low,
       high,
-      source: lot ? lot.method : (record?.chosen.saponificationValue?.source ?? ''),
+      source: deciding?.method ?? record?.chosen.saponificationValue?.source ?? '',
       ...(lot && { lot: lot.lot }),
     },
   };

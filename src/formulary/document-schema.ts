@@ -10,6 +10,7 @@ const list = <T extends z.ZodType>(item: T) => z.array(item).readonly();
 const fatLine = z
   .strictObject({
     id: z.string(),
+    blend: z.string().exactOptional(),
     mass: number,
     share: number,
     saponificationValue: z
@@ -171,6 +172,7 @@ export const documentSchema: z.ZodType<FormulaDocument> = z
         expanded: pair,
         worstCase: pair,
         final: number,
+        withoutLots: z.strictObject({ expanded: pair, worstCase: pair }).readonly().nullable(),
         ifAcidForgotten: number.nullable(),
         budget: list(z.strictObject({ id: z.string(), halfWidth: number }).readonly()),
       })

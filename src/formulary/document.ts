@@ -66,6 +66,14 @@ export interface FormulaDocument {
     readonly worstCase: readonly [number, number];
     /** With after-cook fats and later acids. */
     readonly final: number;
+    /**
+     * Reckoned anew by published and trade ranges, as if no lot were released; `null` where no lot decides
+     * or where the formula could not be made so.
+     */
+    readonly withoutLots: {
+      readonly expanded: readonly [number, number];
+      readonly worstCase: readonly [number, number];
+    } | null;
     /** Where alkali compensates an acid: the superfat with the acid left out. */
     readonly ifAcidForgotten: number | null;
     /** Contributions to the expanded interval, largest first; half-widths at k = 2 in percentage points. */
@@ -99,6 +107,8 @@ export interface ReleaseCheck {
 
 export interface FatLine {
   readonly id: string;
+  /** Of a part of a blend: the blend, which is weighed as one. The fat may stand here a second time. */
+  readonly blend?: string;
   readonly mass: number;
   readonly share: number;
   readonly saponificationValue: {
@@ -166,7 +176,7 @@ export interface BatchDocument {
   readonly id: string;
   readonly label: string;
   readonly digest: string | null;
-  /** g between two marks of the scale, per line below as `step`. */
+  /** g between two marks of the scale, per line below as `step`. A blend is one line, under its own id. */
   readonly fats: readonly WeighedLine[];
   readonly afterCookFats: readonly WeighedLine[];
   readonly alkali: readonly WeighedLine[];

@@ -10,8 +10,12 @@ export interface Formula {
   readonly process: 'cold' | 'hot';
   readonly revision: number;
   readonly summary: string | null;
-  /** Percent; they sum to 100. */
-  readonly fats: readonly { readonly fat: string; readonly share: number }[];
+  /** Percent; they sum to 100. A blend stands here as its parts, each with the blend's id beside it. */
+  readonly fats: readonly {
+    readonly fat: string;
+    readonly share: number;
+    readonly blend?: string;
+  }[];
   readonly afterCookFats: readonly { readonly fat: string; readonly percentOfFats: number }[];
   /** Percent of each alkali; `basis` matters only where both are there. */
   readonly alkali: {

@@ -32,8 +32,12 @@ export function prepareFormulation(formula: Formula, reference: Reference): Prep
 
   const formulation: Formulation = {
     process: formula.process,
-    fats: formula.fats.flatMap(({ fat: id, share }, i) =>
-      fat(id, `fats.${i}.fat`).map((fat) => ({ fat, share: percent(share) })),
+    fats: formula.fats.flatMap(({ fat: id, share, blend }, i) =>
+      fat(id, `fats.${i}.fat`).map((fat) => ({
+        fat,
+        share: percent(share),
+        ...(blend !== undefined && { blend }),
+      })),
     ),
     afterCookFats: formula.afterCookFats.flatMap(({ fat: id, percentOfFats }, i) =>
       fat(id, `after-cook-fats.${i}.fat`).map((fat) => ({ fat, perFats: percent(percentOfFats) })),

@@ -7,12 +7,15 @@ import { computeFormula } from './compute.ts';
 import type { ComputedFormula, Loaded, ShopFolders } from './formulary.ts';
 import { type FormulasRead, readFormulas } from './formulas-fs.ts';
 import { knownFrom } from './known.ts';
+import { lotProblems } from './lot-problems.ts';
 import type { Problem } from './problem.ts';
 import { releaseProblems } from './release.ts';
 
 export interface LoadOptions {
   /** The reference data that the shop's own lies over; without it the one that comes with the code. */
   readonly packagedData?: string;
+  /** The day, `2026-12-01`, on which lots must not be past their retest; `null` asks nothing of dates. */
+  readonly asOf?: string | null;
 }
 
 /** The reference data that comes with the code. */
@@ -39,7 +42,7 @@ export function loadFormulary(folders: ShopFolders, options: LoadOptions = {}): 
  */
 export function loadParts(
   folders: ShopFolders,
-  { packagedData = PACKAGED_DATA }: LoadOptions = {},
+  { packagedData = PACKAGED_DATA, asOf = null }: LoadOptions = {},
 ): {
   readonly reference: Reference | null;
   /** Sorted by code, by code point. */
@@ -52,6 +55,7 @@ export function loadParts(
   const problems: Problem[] = [...dataProblems, ...read.problems];
   const formulas: ComputedFormula[] = [];
   if (reference) {
+    if (asOf !== null) problems.push(...lotProblems(reference, read.formulas, asOf));
     for (const formula of read.formulas) {
       const result = computeFormula(formula, reference);
       problems.push(...result.problems);

@@ -1,22 +1,55 @@
 import type { AlkaliSupply, Fat } from '../chemistry/materials.ts';
-import { fraction, mgKohPerGram, type Range } from '../chemistry/quantity.ts';
-import type { AlkaliLot, AlkaliRecord, FatLot, Reference } from '../reference/reference.ts';
+import { fraction, type MgKohPerGram, mgKohPerGram, type Range } from '../chemistry/quantity.ts';
+import type {
+  AlkaliLot,
+  AlkaliRecord,
+  FatLot,
+  Measured,
+  Reference,
+} from '../reference/reference.ts';
 
-/** A fat as it will be weighed: with the released lot's measured value, or as published. */
+/** The same data as if the shop had no lots: every value is the published or trade range's. */
+export const withoutLots = (reference: Reference): Reference => ({
+  ...reference,
+  lots: { fats: [], alkalis: [] },
+});
+
+/**
+ * The measured value that takes the place of the published saponification value: of a free acid its acid
+ * value, where that was measured. `null` where the lot has none.
+ */
+export const decidingValue = (lot: FatLot, kind: Fat['kind']): Measured | null =>
+  (kind === 'free-acid' ? lot.acidValue : null) ?? lot.saponificationValue;
+
+/**
+ * A fat as it will be weighed: with the released lot's measured values, or as published. `lot` is null where
+ * no lot decides the saponification value.
+ *
+ * Free acidity adds nothing to the alkali, because a saponification value counts the free acids already. Of a
+ * wax it replaces the published acid value, which is all that lower ends count in cold process.
+ */
 export function fatInForce(
   fat: Fat,
   reference: Reference,
 ): { readonly fat: Fat; readonly lot: FatLot | null } {
-  const lot =
-    reference.lots.fats.find((lot) => lot.fat === fat.id && lot.status === 'released') ?? null;
-  if (!lot) return { fat, lot };
-  return { fat: { ...fat, saponificationValue: measured(lot, mgKohPerGram) }, lot };
+  const lot = reference.lots.fats.find((lot) => lot.fat === fat.id && lot.status === 'released');
+  if (!lot) return { fat, lot: null };
+  const deciding = decidingValue(lot, fat.kind);
+  return {
+    fat: {
+      ...fat,
+      saponificationValue: deciding ? measured(deciding) : fat.saponificationValue,
+      acidValue: lot.acidValue ? measured(lot.acidValue) : fat.acidValue,
+    },
+    lot: deciding ? lot : null,
+  };
 }
 
-const measured = <Q extends number>(lot: FatLot, typed: (x: number) => Q): Range<Q> => ({
-  value: typed(lot.saponificationValue),
-  low: typed(lot.saponificationValue - lot.uncertainty),
-  high: typed(lot.saponificationValue + lot.uncertainty),
+/** No acid value is below zero, however wide its interval. */
+const measured = ({ value, uncertainty }: Measured): Range<MgKohPerGram> => ({
+  value: mgKohPerGram(value),
+  low: mgKohPerGram(Math.max(0, value - uncertainty)),
+  high: mgKohPerGram(value + uncertainty),
   spread: 'expanded',
 });
 

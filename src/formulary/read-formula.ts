@@ -23,7 +23,10 @@ import { type Path, type Report, reportOn } from './report.ts';
 import type { Frontmatter } from './schema.ts';
 import { checkSchema } from './schema-problems.ts';
 
-/** A formula file as read by itself. `formula` is null where there is any error. */
+/**
+ * A formula file as read by itself. `formula` is null where there is any error, and where it names a blend
+ * while there are no data to say what is in it.
+ */
 export interface FormulaRead {
   readonly formula: Formula | null;
   /** In the order of the file. */
@@ -80,8 +83,8 @@ export function readFormula(
     links,
     code: typeof code === 'string' ? { text: code, place: yaml.placeOf(['code']) } : null,
     formula:
-      front && method && problems.length === 0
-        ? assembleFormula(file, front.sound as Frontmatter, {
+      front && method && problems.length === 0 && (known || !namesBlend(front.sound))
+        ? assembleFormula(file, front.sound as Frontmatter, known?.blends ?? NO_BLENDS, {
             method,
             methodText: parts.bodyText,
             places: placesOf(yaml),
@@ -89,6 +92,10 @@ export function readFormula(
         : null,
   };
 }
+
+const NO_BLENDS: Known['blends'] = new Map();
+const namesBlend = ({ fats = [] }: Partial<Frontmatter>) =>
+  fats.some(({ blend }) => blend !== undefined);
 
 const NO_PLACES = {
   placeOf: () => ({ line: 1, column: 1 }),

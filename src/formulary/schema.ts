@@ -32,15 +32,28 @@ export const frontmatterSchema = z.strictObject({
   summary: line('summary', 300).optional(),
   fats: filled(
     'fats',
-    z.strictObject({
-      fat: z.string(),
-      share: within(
-        'formula/share-range',
-        'share',
-        { low: 0, high: 100, above: true },
-        'leave out a fat that is not used',
-      ),
-    }),
+    demanding(
+      z.strictObject({
+        fat: z.string().optional(),
+        blend: z.string().optional(),
+        share: within(
+          'formula/share-range',
+          'share',
+          { low: 0, high: 100, above: true },
+          'leave out a fat that is not used',
+        ),
+      }),
+      ({ fat, blend }) =>
+        (fat === undefined) === (blend === undefined)
+          ? {
+              rule: 'formula/fat-or-blend',
+              found:
+                fat === undefined ? 'an entry without "fat"' : 'an entry with "fat" and "blend"',
+              expected: 'either "fat" or "blend"',
+              advice: 'write the blend in an entry of its own',
+            }
+          : null,
+    ),
   ),
   'after-cook-fats': z
     .array(

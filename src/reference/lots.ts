@@ -1,7 +1,7 @@
 import type { KnownFats } from './materials.ts';
 import { didYouMean } from './nearest.ts';
 import { ALKALIS } from './raw-data.ts';
-import type { Reference } from './reference.ts';
+import type { FatLot, Measured, Reference } from './reference.ts';
 import type { DataReport } from './report.ts';
 import type { RawLots } from './schema/lots.ts';
 
@@ -27,13 +27,27 @@ export function lotsFrom(
       return;
     }
     const published = fat?.core?.saponificationValue;
-    const value = lot['saponification-value'];
-    if (lot.status !== 'released' || !published) return;
-    if (value < published.low * (1 - TOLERANCE) || value > published.high * (1 + TOLERANCE)) {
-      report.in(['fats', index, 'saponification-value'], 'data/lot-outside-range', {
-        found: `saponification value ${value}`,
+    const kind = fat?.core?.kind;
+    if (lot.status !== 'released' || !published || !kind) return;
+    const key = kind === 'free-acid' && lot['acid-value'] !== undefined ? 'acid-value' : VALUE;
+    const value = lot[key];
+    if (
+      value !== undefined &&
+      (value < published.low * (1 - TOLERANCE) || value > published.high * (1 + TOLERANCE))
+    ) {
+      report.in(['fats', index, key], 'data/lot-outside-range', {
+        found: `${key.replace('-', ' ')} ${value}`,
         expected: `about ${published.low} to ${published.high}, the published range`,
         advice: 'measure again before the lot is released; it may be another fat',
+      });
+    }
+    const acid = lot['acid-value'];
+    const most = lot[VALUE] ?? published.high;
+    if (kind !== 'free-acid' && acid !== undefined && acid > most) {
+      report.in(['fats', index, 'acid-value'], 'data/lot-acid-value', {
+        found: `acid value ${acid}`,
+        expected: `less than the saponification value, ${most}`,
+        advice: 'the saponification value counts the free acids too; measure both again',
       });
     }
   });
@@ -48,18 +62,24 @@ export function lotsFrom(
   });
   reportTwice(fatLots, 'fats', ({ fat }) => fat, report);
   reportTwice(alkaliLots, 'alkalis', ({ alkali }) => alkali, report);
+  const placeOf = (key: 'fats' | 'alkalis', index: number) => ({
+    file: report.file,
+    ...report.placeOf([key, index, 'retest-by']),
+  });
   return {
-    fats: fatLots.map((lot) => ({
-      fat: lot.fat,
-      lot: lot.lot,
-      saponificationValue: lot['saponification-value'],
-      uncertainty: lot.uncertainty,
-      method: lot.method,
-      status: lot.status,
-      opened: lot.opened ?? null,
-      retestBy: lot['retest-by'],
-    })),
-    alkalis: alkaliLots.map((lot) => ({
+    fats: fatLots.map(
+      (lot, index): FatLot => ({
+        fat: lot.fat,
+        lot: lot.lot,
+        saponificationValue: measured(lot[VALUE], lot.uncertainty, lot.method),
+        acidValue: measured(lot['acid-value'], lot['acid-uncertainty'], lot['acid-method']),
+        status: lot.status,
+        opened: lot.opened ?? null,
+        retestBy: lot['retest-by'],
+        place: placeOf('fats', index),
+      }),
+    ),
+    alkalis: alkaliLots.map((lot, index) => ({
       alkali: lot.alkali,
       lot: lot.lot,
       form: lot.form,
@@ -69,9 +89,22 @@ export function lotsFrom(
       status: lot.status,
       opened: lot.opened ?? null,
       retestBy: lot['retest-by'],
+      place: placeOf('alkalis', index),
     })),
   };
 }
+
+const VALUE = 'saponification-value';
+
+/** The schema has seen to it that the three stand together. */
+const measured = (
+  value: number | undefined,
+  uncertainty: number | undefined,
+  method: string | undefined,
+): Measured | null =>
+  value === undefined || uncertainty === undefined || method === undefined
+    ? null
+    : { value, uncertainty, method };
 
 /** One lot number may stand there once; one material may have one released lot, or nobody knows which decides. */
 function reportTwice<Lot extends { readonly lot: string; readonly status: string }>(

@@ -4,6 +4,7 @@ import { type OpenedFile, openFile } from './open-file.ts';
 import type { Problem } from './problem.ts';
 import type { AlkaliRecord } from './reference.ts';
 import { dataProblem } from './report.ts';
+import { blendsSchema } from './schema/blends.ts';
 import { cautionsSchema } from './schema/cautions.ts';
 import {
   acidsSchema,
@@ -40,6 +41,8 @@ export interface RawData {
   readonly shop: Raw<typeof shopSchema>;
   /** `undefined` where the shop keeps no lots. */
   readonly lots: Raw<typeof lotsSchema> | undefined;
+  /** `undefined` where the shop keeps no blends. */
+  readonly blends: Raw<typeof blendsSchema> | undefined;
   readonly alkalis: readonly {
     readonly id: AlkaliRecord['id'];
     readonly opened: Raw<typeof alkaliSchema>;
@@ -84,6 +87,7 @@ export function openAll(files: readonly DataFile[], folder: string, problems: Pr
     soapGrades: open('soap-grades.yaml', soapGradesSchema),
     shop: open('shop.yaml', shopSchema),
     lots: byName.has('lots.yaml') ? open('lots.yaml', lotsSchema) : undefined,
+    blends: byName.has('blends.yaml') ? open('blends.yaml', blendsSchema) : undefined,
     alkalis: ALKALIS.map((id) => ({ id, opened: open(`alkalis/${id}.yaml`, alkaliSchema) })),
     tables: Object.fromEntries(
       Object.keys(TABLES).map((name) => [name, open(`tables/${name}.yaml`, tableSchema)]),

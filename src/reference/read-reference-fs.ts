@@ -9,7 +9,7 @@ const START = { line: 1, column: 1 };
 
 /**
  * Reads the data folders, which lie over one another: a file of a later folder replaces the one of the same
- * name; `shop.yaml`, `lots.yaml` and `prices.yaml` count in the last folder only. Never throws for what
+ * name; `shop.yaml`, `lots.yaml`, `blends.yaml` and `prices.yaml` count in the last folder only. Never throws for what
  * stands in the files. `reference` is `null` where there is any error.
  */
 export function readReference(folders: readonly string[]): ReadReference {

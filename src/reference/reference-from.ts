@@ -2,6 +2,7 @@ import { constantsFrom } from '../chemistry/constants.ts';
 import type { AtomicWeights } from '../chemistry/molar-mass.ts';
 import { acidRecords } from './acids.ts';
 import { alkaliRecord } from './alkali.ts';
+import { blendsFrom } from './blends.ts';
 import { cautionThresholdsFrom } from './caution-thresholds.ts';
 import type { DataFile } from './data-files.ts';
 import { fatRecord } from './fat.ts';
@@ -71,6 +72,11 @@ function assemble(raw: RawData): Reference | null {
   const lots = raw.lots
     ? lotsFrom(raw.lots.value, { fats, fatIds }, raw.lots.report)
     : { fats: [], alkalis: [] };
+  const taken = new Set([...fatIds, ...alkalis.keys(), ...(additives?.keys() ?? [])]);
+  for (const id of liquids?.keys() ?? []) taken.add(id);
+  const blends = raw.blends
+    ? blendsFrom(raw.blends.value, { fats, fatIds }, taken, raw.blends.report)
+    : new Map<string, never>();
   const tables = everyTable(raw.tables) ? modelTables(raw.tables, sources) : null;
   if (!additives || !liquids || !shop || !tables || !raw.cautions || !raw.soapGrades) return null;
   const cautionThresholds = cautionThresholdsFrom(
@@ -98,6 +104,7 @@ function assemble(raw: RawData): Reference | null {
     sources,
     shop,
     lots,
+    blends,
     cautionThresholds,
   };
 }

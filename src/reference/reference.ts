@@ -211,6 +211,8 @@ export interface BatchSize {
 export interface Shop {
   readonly name: string;
   readonly invented: boolean;
+  /** Where the handbook is served, with a slash at its end; `null` where it has no address. */
+  readonly siteAddress: string | null;
   readonly batches: readonly BatchSize[];
   readonly scales: readonly Scale[];
   /** Lye water and fats start from here. [degC] */
@@ -233,15 +235,46 @@ export interface ReleaseLimit {
   readonly floor: number;
 }
 
+/** Fats that the shop keeps mixed and weighs as one. */
+export interface Blend {
+  readonly id: string;
+  readonly name: string;
+  /** Percent by mass of the blend; they sum to 100. */
+  readonly parts: readonly { readonly fat: string; readonly share: number }[];
+  readonly notes: readonly string[];
+}
+
+export type LotStatus = 'quarantine' | 'released' | 'rejected';
+
+/** Where an entry stands, for problems that are only found once formulas are read. */
+export interface DataPlace {
+  readonly file: string;
+  readonly line: number;
+  readonly column: number;
+}
+
+/** A value of a lot with the half-width of its k = 2 interval. */
+export interface Measured {
+  readonly value: number;
+  readonly uncertainty: number;
+  readonly method: string;
+}
+
+/** A lot of a fat. At least one of its two values was measured. */
 export interface FatLot {
   readonly fat: string;
   readonly lot: string;
-  readonly saponificationValue: number;
-  readonly uncertainty: number;
-  readonly method: string;
-  readonly status: 'quarantine' | 'released' | 'rejected';
+  /** [mg KOH/g] Decides the weights of a released lot. */
+  readonly saponificationValue: Measured | null;
+  /**
+   * Free acidity. [mg KOH/g] A saponification value counts the free acids already, so this adds no alkali.
+   * It is the saponification value of a free acid, and of a wax what is sure to react in cold process.
+   */
+  readonly acidValue: Measured | null;
+  readonly status: LotStatus;
   readonly opened: string | null;
   readonly retestBy: string;
+  readonly place: DataPlace;
 }
 
 export interface AlkaliLot {
@@ -252,9 +285,10 @@ export interface AlkaliLot {
   readonly assay: number;
   readonly uncertainty: number;
   readonly carbonate: number;
-  readonly status: 'quarantine' | 'released' | 'rejected';
+  readonly status: LotStatus;
   readonly opened: string | null;
   readonly retestBy: string;
+  readonly place: DataPlace;
 }
 
 /** One set of points that one source gives for one curve. */
@@ -293,6 +327,8 @@ export interface Reference {
     readonly lyeHeat: Readonly<Record<Cation, LyeHeatTables>>;
     /** Density at 20 degC [g/mL] by mass percent of hydroxide. */
     readonly lyeDensity: Readonly<Record<Cation, Curve>>;
+    /** Temperature at which a stock lye begins to crystallise [degC] by mass percent; empty without data. */
+    readonly crystallisation: Readonly<Record<Cation, Curve>>;
     /** Where the heats of solution and the heat capacities come from, in words for the working. */
     readonly lyeHeatSources: Readonly<Record<Cation, readonly string[]>>;
     readonly heatCapacitySources: Readonly<Record<Cation, readonly string[]>>;
@@ -308,6 +344,8 @@ export interface Reference {
   readonly liquids: ReadonlyMap<string, LiquidRecord>;
   readonly sources: ReadonlyMap<string, Source>;
   readonly shop: Shop;
+  /** Empty where the shop keeps none. */
+  readonly blends: ReadonlyMap<string, Blend>;
   readonly lots: { readonly fats: readonly FatLot[]; readonly alkalis: readonly AlkaliLot[] };
   /** From `cautions.yaml`, by `cautionsSchema` and `cautionThresholdsFrom`. */
   readonly cautionThresholds: CautionThresholds;

@@ -23,6 +23,8 @@ export interface DataReport {
   in(path: YamlPath, rule: DataRule, parts: ProblemParts): void;
   /** At the key at the end of a path. */
   inKey(path: YamlPath, rule: DataRule, parts: ProblemParts): void;
+  /** Where the value of a path stands, for a problem that is found later. */
+  placeOf(path: YamlPath): Place;
 }
 
 export function reportOn(
@@ -35,6 +37,7 @@ export function reportOn(
   };
   return {
     file,
+    placeOf: yaml.placeOf,
     in: (path, rule, parts) => add(yaml.placeOf(path), rule, parts),
     inKey: (path, rule, parts) => add(yaml.placeOfKey(path), rule, parts),
   };

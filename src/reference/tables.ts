@@ -88,6 +88,7 @@ export function modelTables(
   return {
     lyeHeat: { Na: heat('Na'), K: heat('K') },
     lyeDensity: { Na: first('density', 'Na'), K: first('density', 'K') },
+    crystallisation: { Na: first('crystallisation', 'Na'), K: first('crystallisation', 'K') },
     lyeHeatSources: { Na: cited(heats('Na')), K: cited(heats('K')) },
     heatCapacitySources: { Na: cited(capacities('Na')), K: cited(capacities('K')) },
     sets: {

@@ -20,6 +20,7 @@ export const alkaliLot = (wish: Partial<AlkaliLot> = {}): AlkaliLot => ({
   status: 'released',
   opened: null,
   retestBy: '2027-03-01',
+  place: { file: 'data/lots.yaml', line: 1, column: 1 },
   ...wish,
 });
 

@@ -12,6 +12,18 @@ export const KNOWN: Known = {
     ['shea', { name: 'Shea butter', core: {} }],
     ['mystery', { name: 'Mystery butter', core: null }],
   ]),
+  blends: new Map([
+    [
+      'quick',
+      {
+        name: 'Quick base',
+        parts: [
+          { fat: 'coconut', share: 60 },
+          { fat: 'shea', share: 40 },
+        ],
+      },
+    ],
+  ]),
   additives: named({ kaolin: 'Kaolin', 'sodium-lactate-60': 'Sodium lactate, 60 %' }),
   liquids: named({ 'goat-milk': 'Goat milk' }),
   batches: new Map([

@@ -157,5 +157,22 @@ export const BROKEN: readonly {
     rule: 'data/lot-outside-range',
     files: withChange('lots.yaml', 'saponification-value: 190.4', 'saponification-value: 209.4'),
   },
+  {
+    rule: 'data/lot-acid-value',
+    files: withChange(
+      'lots.yaml',
+      'saponification-value: 190.4,',
+      'acid-value: 197, acid-uncertainty: 0.5, acid-method: ISO 660, saponification-value: 190.4,',
+    ),
+  },
+  { rule: 'data/blend-id', files: withChange('blends.yaml', 'firm:', 'palm:') },
+  {
+    rule: 'data/blend-part',
+    files: [
+      ...withChange('blends.yaml', 'fat: shea', 'fat: trial'),
+      file('fats/trial.yaml', SMALL_FAT),
+    ],
+  },
+  { rule: 'data/blend-sum', files: withChange('blends.yaml', 'share: 40', 'share: 30') },
   { rule: 'data/lot-sum', files: withChange('lots.yaml', 'carbonate: 0.4', 'carbonate: 1.6') },
 ];

@@ -28,15 +28,23 @@ alkalis:
   - { alkali: sodium-hydroxide, lot: N-1, form: solid, assay: 98.5, uncertainty: 0.3, carbonate: 0.4, status: released, opened: 2026-10-12, retest-by: 2027-03-01 }
 `;
 
+const BLENDS = `firm:
+  name: Firm base
+  parts:
+    - { fat: coconut, share: 60 }
+    - { fat: shea, share: 40 }
+`;
+
 /** The packaged data with a shop of the tests' own, so that the demonstration shop may change freely. */
 export const PACKAGED: readonly DataFile[] = [
   ...readdirSync('data', { recursive: true, encoding: 'utf8' })
     .map((name) => name.replaceAll('\\', '/'))
-    .filter((name) => name.endsWith('.yaml') && !/^(shop|lots|prices|evidence)\.yaml$/.test(name))
+    .filter((name) => name.endsWith('.yaml') && !/^(shop|lots|blends|prices|evidence)\.yaml$/.test(name))
     .sort()
     .map((name) => file(name, readFileSync(`data/${name}`, 'utf8'))),
   file('shop.yaml', SHOP),
   file('lots.yaml', LOTS),
+  file('blends.yaml', BLENDS),
 ];
 
 export function file(name: string, text: string): DataFile {

@@ -3,7 +3,7 @@ import type { Known } from '../known.ts';
 import type { Path, Report } from '../report.ts';
 
 /**
- * Looks up every id, in the raw frontmatter so that a slip beside it hides nothing: fats, additives,
+ * Looks up every id, in the raw frontmatter so that a slip beside it hides nothing: fats, blends, additives,
  * liquids and batch sizes exist, and none stands twice in its list. With `known` null only the latter.
  */
 export function checkIds(
@@ -15,6 +15,7 @@ export function checkIds(
     ...unrepeated(value, 'fats', 'fat', report),
     ...unrepeated(value, 'after-cook-fats', 'fat', report),
   ];
+  const blends = unrepeated(value, 'fats', 'blend', report);
   const additives = unrepeated(value, 'additives', 'additive', report);
   const liquids = unrepeated(value, 'liquids', 'liquid', report);
   const batches = unrepeated(value, 'batches', null, report);
@@ -31,6 +32,7 @@ export function checkIds(
       });
     }
   }
+  for (const blend of blends) isKnown(blend, BLEND, known.blends, report);
   for (const additive of additives) isKnown(additive, ADDITIVE, known.additives, report);
   for (const liquid of liquids) isKnown(liquid, LIQUID, known.liquids, report);
   for (const batch of batches) {
@@ -51,6 +53,11 @@ interface Named {
 }
 
 const FAT = { rule: 'formula/unknown-fat', noun: 'fat', where: 'an id from data/fats' } as const;
+const BLEND = {
+  rule: 'formula/unknown-blend',
+  noun: 'blend',
+  where: "the id of one of the shop's blends, in blends.yaml",
+} as const;
 const ADDITIVE = {
   rule: 'formula/unknown-additive',
   noun: 'additive',
@@ -69,7 +76,7 @@ const BATCH = {
 
 function isKnown(
   { id, path }: Named,
-  { rule, noun, where }: typeof FAT | typeof ADDITIVE | typeof LIQUID | typeof BATCH,
+  { rule, noun, where }: typeof FAT | typeof BLEND | typeof ADDITIVE | typeof LIQUID | typeof BATCH,
   candidates: ReadonlyMap<string, { readonly name: string }>,
   report: Report,
 ): boolean {

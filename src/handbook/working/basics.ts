@@ -1,5 +1,6 @@
 import type { GramsPerMole } from '../../chemistry/quantity.ts';
 import { isBeforeSaponification } from '../../chemistry/saponification.ts';
+import { decidingValue } from '../../formulary/lots.ts';
 import { cited, named, type Working } from './context.ts';
 import { type Section, type Step, step } from './step.ts';
 import { exact, figure, fractionOf, minus, product, sumOf, symbol, type Term } from './term.ts';
@@ -141,8 +142,11 @@ function saponificationSources(
 ): string[] {
   const lotName = document.fats.find((line) => line.id === id)?.saponificationValue.lot;
   const lot = reference.lots.fats.find((lot) => lot.fat === id && lot.lot === lotName);
-  if (lot)
-    return [`${lot.lot}: ${lot.saponificationValue} ± ${lot.uncertainty} mg KOH/g, ${lot.method}`];
+  const kind = reference.fats.get(id)?.kind;
+  const deciding = lot && kind ? decidingValue(lot, kind) : null;
+  if (lot && deciding) {
+    return [`${lot.lot}: ${deciding.value} ± ${deciding.uncertainty} mg KOH/g, ${deciding.method}`];
+  }
   const chosen = reference.fats.get(id)?.chosen;
   return [chosen?.saponificationValue, chosen?.loweredBy].flatMap((record) =>
     record ? [cited(reference, record)] : [],

@@ -1,3 +1,4 @@
+import { fatWeighings } from '../../chemistry/blend.ts';
 import { isBeforeSaponification } from '../../chemistry/saponification.ts';
 import { AS_USED, equivalentsOf, superfatFrom } from '../../chemistry/superfat.ts';
 import { weighBatch } from '../../formulary/compute-batch.ts';
@@ -9,7 +10,7 @@ import { superfatStep } from './weights.ts';
 
 /** From the masses per 1000 g to what the scale shows, for each batch size that has weights. */
 export function batches(working: Working): readonly Section[] {
-  const { charge, document, reference } = working;
+  const { weighedCharge: charge, document, reference } = working;
   return document.batches.flatMap(({ id, label, refused, superfat }): Section[] => {
     const batch = reference.shop.batches.find((batch) => batch.id === id);
     if (refused || !superfat || !batch) return [];
@@ -39,6 +40,7 @@ export function batches(working: Working): readonly Section[] {
         digits: 9,
         unit: 'g',
       });
+    const onScales = fatWeighings(rounded.fats);
     const koh = reference.constants.hydroxide.K;
     const amounts = equivalentsOf(rounded, AS_USED, reference.constants);
     const saponified = [
@@ -74,9 +76,9 @@ export function batches(working: Working): readonly Section[] {
         value: fats,
         unit: 'g',
       }),
-      ...charge.fats.flatMap(({ fat, mass }, i) => [
-        scaled('exact-weight', fat.id, named(working, fat.id), mass),
-        onScale(fat.id, rounded.fats[i]?.mass, steps.fats[i]),
+      ...fatWeighings(charge.fats).flatMap((weighing, i) => [
+        scaled('exact-weight', weighing.id, named(working, weighing.id), weighing.mass),
+        onScale(weighing.id, onScales[i]?.mass, steps.fats[weighing.lines[0] ?? 0]),
       ]),
       ...charge.alkali.flatMap(({ supply, weighedMass }, i) => [
         scaled('exact-weight', supply.id, named(working, supply.id), weighedMass),

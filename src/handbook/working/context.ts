@@ -1,3 +1,5 @@
+import { massByFat } from '../../chemistry/blend.ts';
+import type { Charge } from '../../chemistry/charge.ts';
 import type { Equivalents } from '../../chemistry/superfat.ts';
 import { AS_USED, equivalentsOf } from '../../chemistry/superfat.ts';
 import type { ComputedFormula } from '../../formulary/formulary.ts';
@@ -9,10 +11,14 @@ import { nameOf, sourceName } from '../names.ts';
 export interface Working extends ComputedFormula {
   readonly reference: Reference;
   readonly equivalents: Equivalents;
+  /** `charge` has each fat once; this has it as weighed, by itself and in blends. */
+  readonly weighedCharge: Charge;
 }
 
 export const workingOf = (computed: ComputedFormula, reference: Reference): Working => ({
   ...computed,
+  charge: { ...computed.charge, fats: massByFat(computed.charge.fats) },
+  weighedCharge: computed.charge,
   reference,
   equivalents: equivalentsOf(computed.charge, AS_USED, reference.constants),
 });

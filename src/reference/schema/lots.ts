@@ -14,12 +14,29 @@ const common = {
 const fatLot = z
   .strictObject({
     fat: z.string(),
-    'saponification-value': z.number().gte(60).lte(400),
-    uncertainty: z.number().gt(0).lte(10),
-    method: line,
+    'saponification-value': z.number().gte(60).lte(400).optional(),
+    uncertainty: z.number().gt(0).lte(10).optional(),
+    method: line.optional(),
+    'acid-value': z.number().gte(0).lte(400).optional(),
+    'acid-uncertainty': z.number().gt(0).lte(10).optional(),
+    'acid-method': line.optional(),
     ...common,
   })
-  .superRefine((lot, context) => checkDates(lot, context));
+  .superRefine((lot, context) => {
+    checkDates(lot, context);
+    checkMeasured(lot, ['saponification-value', 'uncertainty', 'method'], context);
+    checkMeasured(lot, ['acid-value', 'acid-uncertainty', 'acid-method'], context);
+    if (lot['saponification-value'] === undefined && lot['acid-value'] === undefined) {
+      context.addIssue(
+        broken({
+          rule: 'data/missing-key',
+          found: 'a lot without a measured value',
+          expected: '"saponification-value" or "acid-value"',
+          advice: 'a lot enters the list when something of it was measured',
+        }),
+      );
+    }
+  });
 
 const alkaliLot = z
   .strictObject({
@@ -45,6 +62,25 @@ export type RawLots = z.infer<typeof lotsSchema>;
 
 interface Context {
   addIssue(issue: ReturnType<typeof broken>): void;
+}
+
+/** A measured value stands with its uncertainty and its method, or not at all. */
+function checkMeasured(
+  lot: Readonly<Record<string, unknown>>,
+  keys: readonly string[],
+  context: Context,
+): void {
+  const absent = keys.filter((key) => lot[key] === undefined);
+  if (absent.length === 0 || absent.length === keys.length) return;
+  const quoted = (names: readonly string[]) => names.map((name) => `"${name}"`).join(' and ');
+  context.addIssue(
+    broken({
+      rule: 'data/missing-key',
+      found: `a lot without ${quoted(absent)}`,
+      expected: `${quoted(keys)} together`,
+      advice: 'add what is missing; a value without its uncertainty says nothing of the margin',
+    }),
+  );
 }
 
 function checkDates(

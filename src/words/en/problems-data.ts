@@ -47,6 +47,11 @@ export const DATA_PROBLEMS = {
   'data/two-released-lots': { title: 'Two released lots of one material' },
   'data/lot-dates': { title: 'A lot that was opened after its retest date' },
   'data/lot-outside-range': { title: 'A measured lot far outside the published range' },
+  'data/lot-acid-value': { title: 'A lot with more free acid than it can have' },
+  'data/lot-past-retest': { title: 'A released lot past its retest date' },
+  'data/blend-id': { title: 'A blend under the id of another material' },
+  'data/blend-part': { title: 'A blend of a fat that cannot be computed with' },
+  'data/blend-sum': { title: 'A blend whose shares do not sum to 100 %' },
   'data/lot-sum': { title: 'A lot whose parts sum to more than 100 %' },
 } as const satisfies Readonly<Record<string, { readonly title: string }>>;
 
