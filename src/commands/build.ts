@@ -2,6 +2,8 @@ import { mkdirSync, mkdtempSync, readdirSync, rmSync } from 'node:fs';
 import { isAbsolute, join, relative, resolve } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { build } from 'astro';
+import { APPROVAL_RULES } from '../edition/approval.ts';
+import { sealEdition } from '../edition/seal-fs.ts';
 import {
   dropPrevious,
   healSwap,
@@ -34,6 +36,8 @@ export async function main(args: readonly string[]): Promise<number> {
       ...FOLDERS,
       out: { value: 'DIR', about: 'folder to write (dist)' },
       'as-of': { value: 'DATE', about: 'the date the edition is of (today)' },
+      last: { value: 'DIR', about: 'the edition before, for the page of changes' },
+      drafts: { value: null, about: 'a proof edition, with what is not approved' },
     },
   });
   if (!read.ok) {
@@ -61,10 +65,16 @@ export async function main(args: readonly string[]): Promise<number> {
   }
 
   const start = performance.now();
-  const loaded = loadSite({ formulas, data }, asOf);
+  const loaded = loadSite(
+    { formulas, data },
+    { asOf, drafts: read.given.drafts !== undefined, last: read.given.last ?? null },
+  );
   for (const problem of loaded.problems) console.error(problemText(problem));
   if (!loaded.ok) {
     console.error(`${problemSummary(loaded.problems)}. Nothing was built.`);
+    if (loaded.problems.some(({ rule }) => APPROVAL_RULES.has(rule))) {
+      console.error('To see it all the same: --drafts builds a proof edition, not for use.');
+    }
     return 1;
   }
   const count = loaded.input.formulary.formulas.length;
@@ -76,6 +86,7 @@ export async function main(args: readonly string[]): Promise<number> {
     // Astro looks at the folder it runs in to choose where its own output goes
     process.chdir(PROJECT);
     await build({ root: PROJECT, outDir: work, logLevel: 'error', vite: { logLevel: 'error' } });
+    sealEdition(work, loaded.input.edition.document);
     moveFolder(work, folders.next);
   } catch (error) {
     healSwap(folders);
@@ -92,6 +103,8 @@ export async function main(args: readonly string[]): Promise<number> {
     String(file).endsWith('.html'),
   ).length;
   const seconds = ((performance.now() - start) / 1000).toFixed(1);
+  const { id, proof } = loaded.input.edition;
+  console.log(`${proof ? 'Proof edition, not for use,' : 'Edition'} of ${asOf}: ${id}`);
   console.log(`${out}: ${counted(count, 'formula')}, ${counted(pages, 'page')}, ${seconds} s`);
   return 0;
 }

@@ -48,7 +48,7 @@ export async function main(args: readonly string[]): Promise<number | undefined>
 
   let problems: readonly Problem[] = [];
   const load = () => {
-    const loaded = loadSite({ formulas, data }, asOf);
+    const loaded = loadSite({ formulas, data }, { asOf, drafts: true });
     if (loaded.ok) handOver(loaded.input);
     problems = loaded.ok ? [] : loaded.problems;
     for (const problem of loaded.problems) console.error(problemText(problem));

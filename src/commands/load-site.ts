@@ -1,8 +1,7 @@
 import { resolve } from 'node:path';
-import { withCautions } from '../cautions/with-cautions.ts';
-import { withDigests } from '../edition/with-digests.ts';
+import { type EditionOptions, loadEdition } from '../edition/load-edition-fs.ts';
 import type { ShopFolders } from '../formulary/formulary.ts';
-import { loadFormulary, packagedData } from '../formulary/load.ts';
+import { packagedData } from '../formulary/load.ts';
 import type { Problem } from '../formulary/problem.ts';
 import { readEvidence } from '../reference/evidence/read-evidence-fs.ts';
 import { finderData } from '../site/find/finder-data.ts';
@@ -14,25 +13,21 @@ export type LoadedSite =
   | { readonly ok: false; readonly problems: readonly Problem[] };
 
 /** From a shop's folders to all that the pages are made from, or to every problem that stands against it. */
-export function loadSite(folders: ShopFolders, asOf: string): LoadedSite {
-  const loaded = loadFormulary(folders, { asOf });
+export function loadSite(folders: ShopFolders, options: EditionOptions): LoadedSite {
+  const loaded = loadEdition(folders, options);
   if (!loaded.ok) return loaded;
-  const { reference, formulas } = withDigests(withCautions(loaded.formulary, asOf));
-  const evidence = readEvidence(packagedData(), reference);
-  if (evidence.problems.length > 0) {
-    return { ok: false, problems: [...loaded.problems, ...evidence.problems] };
-  }
-  // what is withdrawn reaches no page and no file
-  const inUse = { reference, formulas: formulas.filter(({ formula }) => !formula.withdrawn) };
-  const kept = readSavedSearches(folders.data, finderData(inUse));
-  if (kept.problems.length > 0) {
-    return { ok: false, problems: [...loaded.problems, ...kept.problems] };
-  }
+  const { edition, problems } = loaded;
+  const { formulary, asOf } = edition;
+  const evidence = readEvidence(packagedData(), formulary.reference);
+  const kept = readSavedSearches(folders.data, finderData(formulary));
+  const more = [...evidence.problems, ...kept.problems];
+  if (more.length > 0) return { ok: false, problems: [...problems, ...more] };
   return {
     ok: true,
-    problems: loaded.problems,
+    problems,
     input: {
-      formulary: inUse,
+      edition,
+      formulary,
       evidence: evidence.rows,
       searches: kept.searches,
       asOf,

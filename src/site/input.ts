@@ -1,9 +1,13 @@
+import type { Edition } from '../edition/edition.ts';
 import type { Formulary } from '../formulary/formulary.ts';
 import type { EvidenceRow } from '../reference/evidence/evidence.ts';
 import type { SavedSearch } from '../search/saved/saved-search.ts';
 
 /** Everything that the pages are made from. */
 export interface SiteInput {
+  /** Approval states, withdrawn formulas, changes, and the list that sheets are checked against. */
+  readonly edition: Edition;
+  /** That of the edition: formulas in use only. */
   readonly formulary: Formulary;
   /** Computed against published, for the models and the fats. */
   readonly evidence: readonly EvidenceRow[];

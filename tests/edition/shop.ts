@@ -27,9 +27,9 @@ release-limits:
 
 /** A lot of sodium hydroxide and one of olive oil, both inside their ranges. */
 export const LOTS = `fats:
-  - { fat: olive, lot: O-1, saponification-value: 190.4, uncertainty: 0.8, method: ISO 3657, status: released, retest-by: 2027-06-01 }
+  - { fat: olive, lot: O-1, saponification-value: 190.4, uncertainty: 0.8, method: ISO 3657, status: released, retest-by: 2029-06-01 }
 alkalis:
-  - { alkali: sodium-hydroxide, lot: N-1, form: solid, assay: 98.5, uncertainty: 0.3, carbonate: 0.4, status: released, retest-by: 2027-03-01 }
+  - { alkali: sodium-hydroxide, lot: N-1, form: solid, assay: 98.5, uncertainty: 0.3, carbonate: 0.4, status: released, retest-by: 2029-06-01 }
 `;
 
 export const FORMULA = `---

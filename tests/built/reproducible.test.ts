@@ -1,0 +1,55 @@
+import { execFileSync } from 'node:child_process';
+import {
+  cpSync,
+  mkdirSync,
+  mkdtempSync,
+  readFileSync,
+  rmSync,
+  symlinkSync,
+  writeFileSync,
+} from 'node:fs';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
+import { fileURLToPath } from 'node:url';
+import { afterAll, expect, inject, test } from 'vitest';
+
+const ROOT = fileURLToPath(new URL('../..', import.meta.url));
+const PARTS = ['src', 'data', 'formulas', 'package.json', 'tsconfig.json', 'astro.config.mjs'];
+
+/** Runs before the command and puts its clock 400 days forward. */
+const CLOCK = `const Real = Date;
+const shift = 400 * 864e5;
+globalThis.Date = class extends Real {
+  constructor(...given) {
+    given.length > 0 ? super(...given) : super(Real.now() + shift);
+  }
+  static now() {
+    return Real.now() + shift;
+  }
+};
+`;
+
+const elsewhere = mkdtempSync(join(tmpdir(), 'another folder '));
+afterAll(() => rmSync(elsewhere, { recursive: true, force: true }));
+
+test('the same inputs give the same bytes in another folder, time zone and year', () => {
+  const site = inject('site');
+  const { asOf } = JSON.parse(readFileSync(join(site, 'edition.json'), 'utf8')) as { asOf: string };
+  const copy = join(elsewhere, 'x');
+  mkdirSync(copy);
+  for (const part of PARTS) cpSync(join(ROOT, part), join(copy, part), { recursive: true });
+  symlinkSync(join(ROOT, 'node_modules'), join(copy, 'node_modules'), 'junction');
+  writeFileSync(join(copy, 'clock.mjs'), CLOCK);
+  const clock = new URL(`file://${join(copy, 'clock.mjs')}`).href;
+  execFileSync(
+    process.execPath,
+    ['--import', clock, 'src/commands/run.js', 'build', '--drafts', '--as-of', asOf],
+    {
+      cwd: copy,
+      env: { ...process.env, TZ: 'Pacific/Kiritimati' },
+      stdio: ['ignore', 'ignore', 'pipe'],
+    },
+  );
+  const sums = (folder: string) => readFileSync(join(folder, 'sha256sums.txt'), 'utf8');
+  expect(sums(join(copy, 'dist')).split('\n')).toEqual(sums(site).split('\n'));
+});
