@@ -55,7 +55,7 @@ export interface EditionInputs {
 export function editionProblems(
   { formulas, reference }: Formulary,
   { asOf, drafts, ledger }: EditionInputs,
-  names: { readonly ledger: string; readonly lots: string },
+  ledgerFile: string,
 ): readonly Problem[] {
   const severity = drafts ? 'warning' : 'error';
   const printed = formulas.map(({ formula }) => ({
@@ -67,7 +67,6 @@ export function editionProblems(
     ...lotWindowProblems(
       inUse.map(({ formula }) => formula),
       reference,
-      names.lots,
     ),
     ...inUse.flatMap(({ formula, fingerprint }) =>
       approvalProblems(formula, fingerprint, asOf, severity),
@@ -81,7 +80,7 @@ export function editionProblems(
         placeOf: (path) => ({ file: formula.file, ...formula.places.get(path) }),
       })),
       ledger,
-      { file: names.ledger, severity },
+      { file: ledgerFile, severity },
     ),
   ];
 }

@@ -41,7 +41,7 @@ export function loadEdition(
     });
     return { ok: false, problems: [problem] };
   }
-  const loaded = loadFormulary(folders, { packagedData });
+  const loaded = loadFormulary(folders, { packagedData, asOf });
   const ledgerFile = ledgerPath(folders.data);
   const ledger = readLedger(ledgerFile);
   const found = [...loaded.problems, ...ledger.problems];
@@ -59,10 +59,7 @@ export function loadEdition(
   const problems = [
     ...found,
     ...(before?.ok === false ? before.problems : []),
-    ...editionProblems(formulary, inputs, {
-      ledger: ledgerFile,
-      lots: `${folders.data.replace(/[/\\]+$/, '')}/lots.yaml`,
-    }),
+    ...editionProblems(formulary, inputs, ledgerFile),
   ];
   if (problems.some(({ severity }) => severity === 'error')) return { ok: false, problems };
   return { ok: true, edition: editionOf(withCautions(formulary, asOf), inputs), problems };

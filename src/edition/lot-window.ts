@@ -1,8 +1,9 @@
 import type { Formula } from '../formulary/formula.ts';
+import { usersOfLot } from '../formulary/lot-users.ts';
+import { decidingValue } from '../formulary/lots.ts';
 import type { Problem } from '../reference/problem.ts';
 import type { AlkaliLot, FatLot, Reference } from '../reference/reference.ts';
 import { editionProblem } from './edition-problem.ts';
-import { materialsUsed } from './materials-used.ts';
 
 /**
  * Released lots whose measured value lies outside the range that formulas were approved for: the published
@@ -12,26 +13,26 @@ import { materialsUsed } from './materials-used.ts';
 export function lotWindowProblems(
   formulas: readonly Formula[],
   reference: Reference,
-  file: string,
 ): readonly Problem[] {
-  const usersOf = (id: string) =>
-    formulas.filter((formula) => materialsUsed(formula, reference).has(id));
   return [
     ...reference.lots.fats.filter(isReleased).flatMap((lot) => {
-      const window = reference.fats.get(lot.fat)?.core?.saponificationValue;
-      const users = usersOf(lot.fat);
-      if (!window || users.length === 0 || isWithin(lot.saponificationValue, window)) return [];
-      const found = `lot ${lot.lot} of ${lot.fat} with a saponification value of ${lot.saponificationValue}`;
-      return [outside(file, found, `${window.low} to ${window.high}`, users)];
+      const core = reference.fats.get(lot.fat)?.core;
+      const measured = core ? decidingValue(lot, core.kind) : null;
+      const users = usersOfLot(lot, formulas);
+      if (!core || !measured || users.length === 0) return [];
+      const { low, high } = core.saponificationValue;
+      if (isWithin(measured.value, { low, high })) return [];
+      const found = `lot ${lot.lot} of ${lot.fat} with a value of ${measured.value} mg KOH/g (${measured.method})`;
+      return [outside(lot, found, `${low} to ${high}`, users)];
     }),
     ...reference.lots.alkalis.filter(isReleased).flatMap((lot) => {
       const assay = reference.alkalis.get(lot.alkali)?.trade.assay;
-      const users = usersOf(lot.alkali);
+      const users = usersOfLot(lot, formulas);
       if (!assay || lot.form === 'solution' || users.length === 0) return [];
       const window = { low: assay.low * 100, high: assay.high * 100 };
       if (isWithin(lot.assay, window)) return [];
       const found = `lot ${lot.lot} of ${lot.alkali} with an assay of ${lot.assay} %`;
-      return [outside(file, found, `${plain(window.low)} to ${plain(window.high)} %`, users)];
+      return [outside(lot, found, `${plain(window.low)} to ${plain(window.high)} %`, users)];
     }),
   ];
 }
@@ -46,8 +47,13 @@ const isWithin = (value: number, { low, high }: { readonly low: number; readonly
 
 const plain = (value: number) => String(Number(value.toPrecision(9)));
 
-function outside(file: string, found: string, window: string, users: readonly Formula[]): Problem {
-  return editionProblem({ file }, 'edition/lot-outside-window', {
+function outside(
+  { place }: FatLot | AlkaliLot,
+  found: string,
+  window: string,
+  users: readonly Formula[],
+): Problem {
+  return editionProblem(place, 'edition/lot-outside-window', {
     found,
     expected: `${window}, which is what ${users.map(({ code }) => code).join(', ')} ${users.length === 1 ? 'was' : 'were'} approved for`,
     advice: 'have the lot measured again, or set its status to quarantine',

@@ -1,9 +1,9 @@
 import type { BatchDocument } from '../formulary/document.ts';
 import type { Formula } from '../formulary/formula.ts';
+import { usersOfLot } from '../formulary/lot-users.ts';
 import type { Reference } from '../reference/reference.ts';
 import type { Canonical } from './canonical-text.ts';
 import { digestOf } from './digest.ts';
-import { materialsUsed } from './materials-used.ts';
 
 /**
  * The digest of what one sheet prints to weigh, or `null` for a batch without weights. It changes with the
@@ -53,14 +53,10 @@ export interface LotInForce {
   readonly lot: string;
 }
 
-/** The released lots of what a formula uses, the fat in its liquids among it; sorted by material. */
-export function lotsInForce(formula: Formula, reference: Reference): readonly LotInForce[] {
-  const used = materialsUsed(formula, reference);
-  return [
-    ...reference.lots.fats.map(({ fat, lot, status }) => ({ material: fat, lot, status })),
-    ...reference.lots.alkalis.map(({ alkali, lot, status }) => ({ material: alkali, lot, status })),
-  ]
-    .filter(({ material, status }) => status === 'released' && used.has(material))
-    .map(({ material, lot }) => ({ material, lot }))
+/** The released lots of what a formula weighs; sorted by material. */
+export function lotsInForce(formula: Formula, { lots }: Reference): readonly LotInForce[] {
+  return [...lots.fats, ...lots.alkalis]
+    .filter((lot) => lot.status === 'released' && usersOfLot(lot, [formula]).length > 0)
+    .map((lot) => ({ material: 'fat' in lot ? lot.fat : lot.alkali, lot: lot.lot }))
     .sort((a, b) => (a.material < b.material ? -1 : 1));
 }
