@@ -16,10 +16,13 @@ export interface FatUse {
 export function usesOf(fat: string, { formulas }: Formulary): readonly FatUse[] {
   return formulas.flatMap(({ formula }) => {
     const { code, name } = formula;
+    // by itself and in blends together
+    const share = formula.fats.reduce(
+      (sum, each) => (each.fat === fat ? sum + each.share : sum),
+      0,
+    );
     return [
-      ...formula.fats
-        .filter((each) => each.fat === fat)
-        .map(({ share }) => ({ code, name, share, afterCook: false })),
+      ...(share > 0 ? [{ code, name, share, afterCook: false }] : []),
       ...formula.afterCookFats
         .filter((each) => each.fat === fat)
         .map(({ percentOfFats }) => ({ code, name, share: percentOfFats, afterCook: true })),

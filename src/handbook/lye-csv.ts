@@ -3,7 +3,7 @@ import { csv } from './csv.ts';
 
 /**
  * What goes into the lye of every formula at one batch size: one line per thing to weigh, rounded to its
- * scale's step. A refused size has one line that names the rule and has no mass.
+ * scale's step; a stock lye ends in `-solution`, and the water is what is added to it. A refused size has one line that names the rule and has no mass.
  */
 export function lyeCsv({ formulas }: Formulary, batchId: string): string {
   const rows = formulas.flatMap(({ document }) => {
@@ -13,7 +13,10 @@ export function lyeCsv({ formulas }: Formulary, batchId: string): string {
     if (batch.refused) return [[...start, null, null, null, batch.refused.rule]];
     const heldBack = batch.weighedHeldBack ?? 0;
     const lines: (readonly [string, number, number])[] = batch.alkali.map(
-      ({ id, weighedMass, step }) => [id, weighedMass, step],
+      ({ id, weighedMass, step }) => {
+        const isStock = document.alkali.some((line) => line.id === id && line.form === 'solution');
+        return [isStock ? `${id}-solution` : id, weighedMass, step];
+      },
     );
     if (batch.weighedWater !== null) {
       // the difference of two whole numbers of steps, without the last bits of the subtraction

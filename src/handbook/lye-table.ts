@@ -3,6 +3,7 @@ import type { Formulary } from '../formulary/formulary.ts';
 import { words } from '../words/catalogue.ts';
 import { decimalsOf, weight } from '../words/numbers.ts';
 import { nameOf } from './names.ts';
+import { alkaliName } from './weights.ts';
 
 /** One formula's line at one batch size. Cells are in the order of the table's columns. */
 export interface LyeRow {
@@ -23,6 +24,8 @@ export interface LyeTable {
   readonly batch: string;
   readonly label: string;
   readonly alkalis: readonly { readonly id: string; readonly name: string }[];
+  /** Of a stock lye in the table: its own water is counted. */
+  readonly notes: readonly string[];
   readonly hasHeldBack: boolean;
   readonly hasAlso: boolean;
   readonly decimals: number;
@@ -38,7 +41,13 @@ export function lyeTable({ reference, formulas }: Formulary, batchId: string): L
   const used = new Set(entries.flatMap(({ document }) => document.alkali.map(({ id }) => id)));
   const alkalis = [...reference.alkalis.values()]
     .filter(({ id }) => used.has(id))
-    .map(({ id, name }) => ({ id, name }));
+    .map(({ id }) => {
+      // every formula weighs an alkali from the one lot in force, so one name holds for the column
+      const [user] = entries.filter(({ document }) =>
+        document.alkali.some((line) => line.id === id),
+      );
+      return { id, name: user ? alkaliName(user.document, id, reference) : nameOf(reference, id) };
+    });
   const rows = entries.map(({ document, batch }): LyeRow => {
     const { code, name, revision } = document;
     return {
@@ -57,6 +66,13 @@ export function lyeTable({ reference, formulas }: Formulary, batchId: string): L
     batch: batchId,
     label: reference.shop.batches.find(({ id }) => id === batchId)?.label ?? batchId,
     alkalis,
+    notes: alkalis
+      .filter(({ id }) =>
+        entries.some(({ document }) =>
+          document.alkali.some((line) => line.id === id && line.form === 'solution'),
+        ),
+      )
+      .map(({ id }) => words.formulaPage.stockNote(nameOf(reference, id))),
     hasHeldBack: rows.some(({ heldBack }) => heldBack !== null),
     hasAlso: rows.some(({ also }) => also.length > 0),
     decimals: Math.max(0, ...steps.map(decimalsOf)),

@@ -8,6 +8,8 @@ import { nameOf, sourceName } from './names.ts';
 export interface ProvenanceRow {
   readonly id: string;
   readonly name: string;
+  /** The blend that it comes in. */
+  readonly blend: string | null;
   readonly share: string;
   readonly value: string;
   readonly range: string;
@@ -21,11 +23,8 @@ export function fatProvenance(
   document: FormulaDocument,
   reference: Reference,
 ): readonly ProvenanceRow[] {
-  return document.fats.map(({ id, share, saponificationValue: used }) => {
+  return document.fats.map(({ id, blend, share, saponificationValue: used }) => {
     const record = reference.fats.get(id);
-    const lot = used.lot
-      ? reference.lots.fats.find((each) => each.fat === id && each.lot === used.lot)
-      : undefined;
     const chosen = record?.chosen.saponificationValue ?? null;
     const lowered = record?.chosen.loweredBy ?? null;
     const published = [sourceName(reference, used.source), chosen?.at ?? ''].filter(Boolean);
@@ -35,14 +34,12 @@ export function fatProvenance(
     return {
       id,
       name: nameOf(reference, id),
+      blend: blend === undefined ? null : nameOf(reference, blend),
       share: `${plain(share, 2)} %`,
       value: fixed(used.value, 1),
       range: range(used.low, used.high, 1),
       source: used.lot
-        ? words.formulaPage.provenance.lot(
-            used.lot,
-            (lot?.saponificationValue ?? lot?.acidValue)?.method ?? used.source,
-          )
+        ? words.formulaPage.provenance.lot(used.lot, used.source)
         : published.join('; '),
       how: used.lot ? words.frame.how.measured : chosen ? words.frame.how[chosen.how] : '',
     };
@@ -53,7 +50,7 @@ export function fatProvenance(
 export function alkaliProvenance(
   document: FormulaDocument,
   reference: Reference,
-): readonly Omit<ProvenanceRow, 'share'>[] {
+): readonly Omit<ProvenanceRow, 'share' | 'blend'>[] {
   return document.alkali.map(({ id, assay }) => {
     const records = reference.alkalis.get(id)?.assays ?? [];
     return {

@@ -10,7 +10,7 @@ export interface WeightLine {
   readonly name: string;
   /** To the scale's step, without unit. */
   readonly text: string;
-  /** Lot that the weight was reckoned for, where a lot decides. */
+  /** Lot that the weight was reckoned for, where a lot decides; of a blend the lots of its parts. */
   readonly lot: string | null;
 }
 
@@ -28,6 +28,8 @@ export interface WeightsTable {
   /** Most digits after the point in any line, so that the column can align on it. */
   readonly decimals: number;
   readonly steps: readonly number[];
+  /** What a reader must know of the lines: what a blend is of, what a stock lye brings. */
+  readonly notes: readonly string[];
 }
 
 const ORDER: readonly GroupName[] = ['lye', 'fats', 'trace', 'after-cook', 'dilution'];
@@ -52,26 +54,18 @@ export function weightsTable(
   };
 
   for (const { id, weighedMass, step } of batch.alkali) {
-    const line = document.alkali.find((alkali) => alkali.id === id);
-    const name = nameOf(reference, id);
-    put(
-      'lye',
-      {
-        id,
-        name: line?.form === 'solution' ? words.formulaPage.stock(name) : name,
-        lot: line?.assay.lot ?? null,
-      },
-      weighedMass,
-      step,
-    );
+    const lot = document.alkali.find((alkali) => alkali.id === id)?.assay.lot ?? null;
+    put('lye', { id, name: alkaliName(document, id, reference), lot }, weighedMass, step);
   }
+  const fromStock = batch.alkali.some(({ id }) => stockOf(document, id));
   const heldBack = batch.weighedHeldBack ?? 0;
   if (batch.weighedWater !== null) {
-    const water = { id: 'water', name: words.formulaPage.batch.water, lot: null };
+    const { water: all, waterBesideStock } = words.formulaPage.batch;
+    const water = { id: 'water', name: fromStock ? waterBesideStock : all, lot: null };
     put('lye', water, batch.weighedWater - heldBack, batch.waterStep);
   }
   for (const { id, weighedMass, step } of batch.fats) {
-    const lot = document.fats.find((fat) => fat.id === id)?.saponificationValue.lot ?? null;
+    const lot = lotsOf(document.fats.filter(({ id: fat, blend = fat }) => blend === id));
     put('fats', { id, name: nameOf(reference, id), lot }, weighedMass, step);
   }
   if (heldBack > 0) {
@@ -93,5 +87,38 @@ export function weightsTable(
     }),
     decimals: Math.max(0, ...[...steps].map(decimalsOf)),
     steps: [...steps].sort((a, b) => a - b),
+    notes: [
+      ...batch.alkali.flatMap(({ id }) =>
+        stockOf(document, id) ? [words.formulaPage.stockNote(nameOf(reference, id))] : [],
+      ),
+      ...batch.fats.flatMap(({ id }) => blendNote(id, reference)),
+    ],
   };
+}
+
+const stockOf = ({ alkali }: Pick<FormulaDocument, 'alkali'>, id: string) =>
+  alkali.find((line) => line.id === id && line.form === 'solution');
+
+/** An alkali as it stands on a sheet: a stock lye says what it is and how strong, so that nobody weighs solid. */
+export function alkaliName(
+  document: Pick<FormulaDocument, 'alkali'>,
+  id: string,
+  reference: Reference,
+): string {
+  const name = nameOf(reference, id);
+  const stock = stockOf(document, id);
+  return stock ? words.formulaPage.stock(name, stock.assay.value) : name;
+}
+
+function lotsOf(fats: FormulaDocument['fats']): string | null {
+  const lots = fats.flatMap(({ saponificationValue: { lot } }) => lot ?? []);
+  return lots.length === 0 ? null : lots.join(', ');
+}
+
+/** What a blend is mixed from, so that its tub can be held against the sheet. */
+function blendNote(id: string, reference: Reference): readonly string[] {
+  const blend = reference.blends.get(id);
+  if (!blend) return [];
+  const parts = blend.parts.map(({ fat, share }) => ({ name: nameOf(reference, fat), share }));
+  return [words.formulaPage.blendNote(blend.name, parts)];
 }

@@ -32,6 +32,7 @@ export const formulaPage = {
     what: 'Weigh',
     howMuch: 'Weight',
     water: 'Water',
+    waterBesideStock: 'Water, besides the solution',
     waterHeldBack: 'Water held back',
     total: (grams: number) => `${kilograms(grams)} kg`,
     totalLabel: 'All together',
@@ -48,7 +49,11 @@ export const formulaPage = {
     refusedTitle: 'No weights at this size',
     refusedAdvice: 'Do not scale another size by hand. Ask the formulator.',
   },
-  stock: (name: string) => `${name}, solution`,
+  stock: (name: string, percent: number) => `${name}, solution of ${plain(percent, 1)} %`,
+  stockNote: (name: string) =>
+    `${name} comes as a solution: weigh the solution as it stands, no solid. Its own water is counted, and only what is missing is added. The lye concentration counts the hydroxide dissolved in it.`,
+  blendNote: (name: string, parts: readonly { readonly name: string; readonly share: number }[]) =>
+    `${name} stands ready mixed: ${parts.map((part) => `${plain(part.share, 2)} % ${part.name}`).join(', ')}. Its parts are not weighed again.`,
   lot: (lot: string) => `lot ${lot}`,
   noLot: 'no lot released: reckoned on the trade range',
   methodAmounts: (label: string) =>
@@ -86,6 +91,7 @@ export const formulaPage = {
     `The cook is reckoned at ${plain(written, 1)} %; with what joins after it the superfat is ${fixed(final, 1)} %.`,
   provenance: {
     lead: 'The alkali is reckoned on these saponification values, in mg KOH per g.',
+    inBlend: (name: string) => `in ${name}`,
     columns: { fat: 'Fat', share: 'Share', value: 'Used', range: 'Range', source: 'Source' },
     alkali: 'Alkali',
     assay: 'Assay used',
