@@ -1,4 +1,5 @@
 import { defineConfig } from 'astro/config';
+import { benchCards } from './src/site/integrations/bench-cards.ts';
 import { formulaPictures } from './src/site/integrations/formula-pictures.ts';
 import { relativeLinks } from './src/site/integrations/relative-links.ts';
 import { searchIndex } from './src/site/integrations/search-index.ts';
@@ -14,6 +15,6 @@ export default defineConfig({
   build: { format: 'preserve', assets: 'assets', inlineStylesheets: 'never' },
   devToolbar: { enabled: false },
   // pictures first: the links are checked against what is there
-  integrations: [formulaPictures(), relativeLinks(), searchIndex()],
+  integrations: [formulaPictures(), benchCards(), relativeLinks(), searchIndex()],
   vite: { build: { assetsInlineLimit: 0 } },
 });

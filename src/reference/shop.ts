@@ -4,6 +4,9 @@ import type { BatchSize, Shop } from './reference.ts';
 import type { DataReport } from './report.ts';
 import type { RawShop } from './schema/shop.ts';
 
+/** Lye tables are named after their size; this name is taken by the table over the fats. */
+const ALL_FATS = 'fats';
+
 /** The shop's settings. Percentages of losses become fractions, masses grams. */
 export function shopFrom(raw: RawShop, report: DataReport): Shop {
   reportRepeated(raw.batches, 'batches', report);
@@ -17,6 +20,13 @@ export function shopFrom(raw: RawShop, report: DataReport): Shop {
   }));
   const known = scales.map(({ id }) => id);
   const batches = raw.batches.map((batch, index): BatchSize => {
+    if (batch.id === ALL_FATS) {
+      report.in(['batches', index, 'id'], 'data/text-form', {
+        found: `the id "${ALL_FATS}"`,
+        expected: 'another one',
+        advice: 'the table of alkali for each fat has that address',
+      });
+    }
     for (const key of ['scale', 'fine-scale'] as const) {
       const scale = batch[key];
       if (scale === undefined || known.includes(scale)) continue;
@@ -40,6 +50,7 @@ export function shopFrom(raw: RawShop, report: DataReport): Shop {
   return {
     name: raw.name,
     invented: raw.invented ?? false,
+    siteAddress: raw['site-address']?.replace(/\/*$/, '/') ?? null,
     batches,
     scales,
     startTemperature: raw['start-temperature'],

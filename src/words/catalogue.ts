@@ -1,4 +1,5 @@
 import { breachText } from './en/breaches.ts';
+import { cardWords } from './en/card.ts';
 import { contentsPage } from './en/contents-page.ts';
 import { evidencePage } from './en/evidence-page.ts';
 import { fatPages } from './en/fat-pages.ts';
@@ -11,11 +12,13 @@ import { methodWords } from './en/methods.ts';
 import { methodsPage } from './en/methods-page.ts';
 import { profileWords, propertyNames, propertyUnits } from './en/profile.ts';
 import { safetyPage } from './en/safety.ts';
+import { standingWords } from './en/standing.ts';
 import { workingWords } from './en/working.ts';
 
 /** Every word that a page shows. Pages take their text from here and nowhere else. */
 export const words = {
   breachText,
+  cardWords,
   contentsPage,
   evidencePage,
   fatPages,
@@ -30,5 +33,6 @@ export const words = {
   propertyNames,
   propertyUnits,
   safetyPage,
+  standingWords,
   workingWords,
 } as const;

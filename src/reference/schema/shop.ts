@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { date } from './date.ts';
 import { measure } from './measure.ts';
 import { broken, line } from './value.ts';
 
@@ -10,6 +11,20 @@ const id = z.string().superRefine((text, context) => {
         found: `the id "${text}"`,
         expected: 'small letters, digits and single hyphens',
         advice: 'ids become addresses of pages; the label may be anything',
+      }),
+    );
+  }
+});
+
+/** Ends up in pictures that are printed, so it must be a plain address. */
+const siteAddress = line.superRefine((text, context) => {
+  if (!/^https?:\/\/[^\s?#]+$/.test(text) || !URL.canParse(text) || text.length > 200) {
+    context.addIssue(
+      broken({
+        rule: 'data/text-form',
+        found: `the address "${text}"`,
+        expected: 'where the handbook is served, like https://example.org/handbook/',
+        advice: 'leave the key out where the handbook has no address',
       }),
     );
   }
@@ -53,34 +68,54 @@ const batch = z
   });
 
 /** `data/shop.yaml`. */
-export const shopSchema = z.strictObject({
-  name: line,
-  invented: z.boolean().optional(),
-  batches: z.array(batch).min(1),
-  scales: z
-    .array(
-      z.strictObject({
-        id,
-        name: line,
-        step: measure('mass', 0.001, 1000),
-        error: measure('mass', 0, 1000),
-        capacity: measure('mass', 1, 5_000_000),
-      }),
-    )
-    .min(1),
-  'start-temperature': measure('temperature', 0, 40),
-  'release-moisture': z.number().gte(0).lte(40),
-  'largest-superfat-shift': z.number().gt(0).lte(5),
-  emergency: z.array(z.strictObject({ label: line, value: line })),
-  rules: z.array(line).optional(),
-  'release-limits': z.array(
-    z.strictObject({
-      kind: z.enum([...KINDS, 'any']),
-      process: z.enum(['cold', 'hot', 'any']),
-      end: z.enum(['expanded', 'worst-case']),
-      floor: z.number().gte(-10).lte(25),
+/** The day of an invented shop stands still, so that a demonstration does not expire; no other shop's may. */
+function checkFixedDay(
+  { invented, 'as-of': asOf }: { invented?: boolean | undefined; 'as-of'?: string | undefined },
+  context: { addIssue(issue: ReturnType<typeof broken>): void },
+): void {
+  if (asOf === undefined || invented) return;
+  context.addIssue(
+    broken({
+      rule: 'data/fixed-day',
+      found: `the day ${asOf} for a shop that is not invented`,
+      expected: 'the day of the build, or the one given with --as-of',
+      advice: 'take "as-of" out: approvals and lots must be able to expire',
     }),
-  ),
-});
+  );
+}
+
+export const shopSchema = z
+  .strictObject({
+    name: line,
+    invented: z.boolean().optional(),
+    'as-of': date.optional(),
+    'site-address': siteAddress.optional(),
+    batches: z.array(batch).min(1),
+    scales: z
+      .array(
+        z.strictObject({
+          id,
+          name: line,
+          step: measure('mass', 0.001, 1000),
+          error: measure('mass', 0, 1000),
+          capacity: measure('mass', 1, 5_000_000),
+        }),
+      )
+      .min(1),
+    'start-temperature': measure('temperature', 0, 40),
+    'release-moisture': z.number().gte(0).lte(40),
+    'largest-superfat-shift': z.number().gt(0).lte(5),
+    emergency: z.array(z.strictObject({ label: line, value: line })),
+    rules: z.array(line).optional(),
+    'release-limits': z.array(
+      z.strictObject({
+        kind: z.enum([...KINDS, 'any']),
+        process: z.enum(['cold', 'hot', 'any']),
+        end: z.enum(['expanded', 'worst-case']),
+        floor: z.number().gte(-10).lte(25),
+      }),
+    ),
+  })
+  .superRefine(checkFixedDay);
 
 export type RawShop = z.infer<typeof shopSchema>;

@@ -1,0 +1,274 @@
+import { words } from '../words/catalogue.ts';
+import type { CardCaution, CardContent, CardLine } from './card-content.ts';
+
+/** An element as satori takes it; `key` names the boxes that are measured. */
+export interface Box {
+  readonly type: 'div';
+  readonly key: string | null;
+  readonly props: {
+    readonly style: Readonly<Record<string, string | number>>;
+    readonly children?: string | readonly Box[];
+  };
+}
+
+/** One side is A6, drawn in tenths of a millimetre, because words are set to whole units. */
+export const SIDE = { width: 1050, height: 1480, perMillimetre: 10 } as const;
+
+/** The measures of this file are quarters of a millimetre. */
+const UNITS = SIDE.perMillimetre / 4;
+
+/** How much is shown and how large; a card takes the first that fits. */
+export interface CardScale {
+  /** Of weights and names; 1 is 5 mm of type for a weight. */
+  readonly text: number;
+  readonly cautions: number;
+}
+
+/** The smallest weights are 3.9 mm (11 point), the smallest sentences 2.9 mm (8 point). */
+export const SCALES: readonly CardScale[] = [
+  { text: 1.2, cautions: 3 },
+  { text: 1.1, cautions: 3 },
+  { text: 1, cautions: 3 },
+  { text: 0.9, cautions: 3 },
+  { text: 0.9, cautions: 2 },
+  { text: 0.8, cautions: 2 },
+  { text: 0.8, cautions: 1 },
+];
+
+/** Of a card that takes several sides. */
+export const SIDES_SCALE: CardScale = { text: 0.9, cautions: 3 };
+
+/** A side's parts between its head and its foot, in order; each is measured and stays whole. */
+export interface Block {
+  readonly key: string;
+  readonly box: Box;
+  /** Of the group that a line to weigh belongs to; `null` for a caution. */
+  readonly group: string | null;
+}
+
+const INK = '#000';
+const PAPER = '#fff';
+const PADDING = 16;
+const LENGTHS = /^(width|height|maxWidth|minWidth|flexBasis|fontSize|margin.*|padding.*|border)$/;
+const QR = 104;
+
+const box = (
+  style: Box['props']['style'],
+  children?: string | readonly Box[],
+  key: string | null = null,
+): Box => ({
+  type: 'div',
+  key,
+  props: {
+    style: { display: 'flex', boxSizing: 'border-box', flexShrink: 0, ...inUnits(style) },
+    ...(children === undefined ? {} : { children }),
+  },
+});
+
+/** Quarters of a millimetre into the drawing's units. */
+const inUnits = (style: Box['props']['style']): Box['props']['style'] =>
+  Object.fromEntries(
+    Object.entries(style).map(([name, value]) => {
+      if (!LENGTHS.test(name)) return [name, value];
+      if (typeof value === 'number') return [name, value * UNITS];
+      return [name, value.replaceAll(/[\d.]+(?=px)/g, (length) => String(Number(length) * UNITS))];
+    }),
+  );
+
+/** Text that may run over several lines; a word longer than a line is broken. */
+const paragraph = (text: string, style: Box['props']['style']) =>
+  box({ display: 'block', lineHeight: 1.18, wordBreak: 'break-word', ...style }, text);
+
+const rule = (height: number) => box({ width: '100%', height, backgroundColor: INK });
+
+/** What stands between head and foot: groups of weights, then cautions. */
+export function blocksOf(content: CardContent, scale: CardScale): readonly Block[] {
+  const shown = content.cautions.slice(0, Math.max(scale.cautions, content.dangers));
+  const more = content.moreCautions + content.cautions.length - shown.length;
+  const lines = content.groups.flatMap(({ title, lines }, group) =>
+    lines.map((line, index) => ({
+      key: `line-${group}-${index}`,
+      group: title,
+      box: lineBox(line, content, scale),
+    })),
+  );
+  const cautions = shown.map((caution, index) => ({
+    key: `caution-${index}`,
+    group: null,
+    box: cautionBox(caution, index),
+  }));
+  const text = words.cardWords;
+  const rest = more > 0 ? text.more(more) : shown.length === 0 ? text.noCautions : null;
+  const small = (key: string, text: string) => ({
+    key,
+    group: null,
+    box: paragraph(text, { fontSize: 12, marginTop: 6, width: '100%' }),
+  });
+  return [
+    ...lines,
+    ...content.notes.map((note, index) => small(`note-${index}`, note)),
+    ...cautions,
+    ...(rest === null ? [] : [small('more', rest)]),
+  ].map((block) => ({ ...block, box: box({ width: '100%' }, [block.box], block.key) }));
+}
+
+function lineBox({ name, whole, rest }: CardLine, content: CardContent, { text }: CardScale): Box {
+  const size = 24 * text;
+  const weight = { fontSize: size, fontWeight: 600, lineHeight: 1.1 };
+  // room after the point, the same in every line, so that the points stand under one another
+  const tail = content.decimals === 0 ? 0 : size * (0.28 + 0.54 * content.decimals);
+  return box({ flexDirection: 'column', width: '100%' }, [
+    box({ width: '100%', alignItems: 'flex-end', paddingTop: 3 * text, paddingBottom: 3 * text }, [
+      paragraph(name, {
+        flexGrow: 1,
+        flexShrink: 1,
+        flexBasis: 0,
+        minWidth: 0,
+        fontSize: 19 * text,
+      }),
+      box({ marginLeft: 10, ...weight }, whole),
+      box({ width: tail, ...weight }, rest),
+      box(
+        { width: 14 * text, fontSize: 17 * text, lineHeight: 1.2, justifyContent: 'flex-end' },
+        content.unit,
+      ),
+    ]),
+    box({ width: '100%', height: 1, backgroundColor: '#777' }),
+  ]);
+}
+
+/** The head of a group of weights, measured like a block. */
+export function groupBox(title: string, continued: boolean, { text }: CardScale): Box {
+  return box(
+    { flexDirection: 'column', width: '100%', paddingTop: 7 * text },
+    [
+      paragraph(continued ? words.cardWords.continued(title) : title, {
+        fontSize: 14 * text,
+        fontWeight: 600,
+        paddingBottom: 2,
+      }),
+      rule(2),
+    ],
+    `group-${title}`,
+  );
+}
+
+function cautionBox({ word, text, action }: CardCaution, index: number): Box {
+  return box({ flexDirection: 'column', width: '100%', paddingTop: index === 0 ? 8 : 5 }, [
+    ...(index === 0 ? [rule(2)] : []),
+    box({ width: '100%', paddingTop: index === 0 ? 6 : 0, alignItems: 'flex-start' }, [
+      box(
+        {
+          fontSize: 13,
+          fontWeight: 600,
+          lineHeight: 1.18,
+          padding: '1px 5px',
+          marginRight: 7,
+          backgroundColor: INK,
+          color: PAPER,
+        },
+        word,
+      ),
+      box({ flexDirection: 'column', flexGrow: 1, flexShrink: 1, flexBasis: 0, minWidth: 0 }, [
+        paragraph(text, { fontSize: 12 }),
+        paragraph(action, { fontSize: 12, fontWeight: 600 }),
+      ]),
+    ]),
+  ]);
+}
+
+/** A whole side. Without a height it is as high as it needs to be, for measuring. */
+export function sideBox(
+  content: CardContent,
+  blocks: readonly Box[],
+  { number, of, after }: { readonly number: number; readonly of: number; readonly after: number },
+  height: number | null,
+): Box {
+  return box(
+    {
+      width: SIDE.width / UNITS,
+      flexDirection: 'column',
+      backgroundColor: PAPER,
+      color: INK,
+      fontFamily: 'Figures',
+      fontWeight: 400,
+      ...(height === null ? {} : { height: height / UNITS }),
+    },
+    [
+      headBox(content, number, of),
+      box(
+        { flexDirection: 'column', flexGrow: 1, width: '100%', padding: `0 ${PADDING}px` },
+        blocks,
+      ),
+      footBox(content, after),
+    ],
+    `side-${number}`,
+  );
+}
+
+function headBox({ code, name, label, proof }: CardContent, number: number, of: number): Box {
+  const side = of > 1 ? [box({ fontSize: 20 }, words.cardWords.side(number, of))] : [];
+  return box(
+    { flexDirection: 'column', width: '100%' },
+    [
+      box(
+        {
+          flexDirection: 'column',
+          width: '100%',
+          padding: `9px ${PADDING}px 10px`,
+          backgroundColor: INK,
+          color: PAPER,
+        },
+        [
+          box({ width: '100%', alignItems: 'flex-end', justifyContent: 'space-between' }, [
+            paragraph(code, { fontSize: 34, fontWeight: 600, lineHeight: 1, flexShrink: 1 }),
+            paragraph(label, {
+              fontSize: 22,
+              fontWeight: 600,
+              lineHeight: 1.1,
+              flexShrink: 1,
+              marginLeft: 12,
+              maxWidth: 220,
+              textAlign: 'right',
+            }),
+            ...side,
+          ]),
+          paragraph(name, { fontSize: nameSize(name), width: '100%' }),
+        ],
+      ),
+      ...(proof === null
+        ? []
+        : [
+            box({ width: '100%', padding: `5px ${PADDING}px`, border: `3px solid ${INK}` }, [
+              paragraph(proof, { fontSize: 15, fontWeight: 600, width: '100%' }),
+            ]),
+          ]),
+    ],
+    `head-${number}`,
+  );
+}
+
+/** Long names are set smaller, so that they leave room for what is weighed. */
+const nameSize = (name: string) => (name.length > 80 ? 14 : name.length > 36 ? 17 : 20);
+
+function footBox({ foot, address }: CardContent, after: number): Box {
+  return box(
+    { flexDirection: 'column', width: '100%', padding: `6px ${PADDING}px 12px` },
+    [
+      rule(2),
+      box({ width: '100%', paddingTop: 6, alignItems: 'flex-end' }, [
+        box({ flexDirection: 'column', flexGrow: 1, flexShrink: 1, flexBasis: 0, minWidth: 0 }, [
+          ...(after > 0
+            ? [paragraph(words.cardWords.goesOn(after), { fontSize: 16, fontWeight: 600 })]
+            : []),
+          paragraph(words.cardWords.order, { fontSize: 14, fontWeight: 600, paddingBottom: 3 }),
+          ...foot.map((line) => paragraph(line, { fontSize: 12, width: '100%' })),
+        ]),
+        ...(address === null
+          ? []
+          : [box({ width: QR, height: QR, marginLeft: 10, flexShrink: 0 }, [], 'qr')]),
+      ]),
+    ],
+    'foot',
+  );
+}
