@@ -25,7 +25,9 @@ export type Basis =
   | typeof COMMON_PRACTICE
   | typeof RECKONED
   | { readonly limit: LimitName }
-  | { readonly materials: MaterialListName };
+  | { readonly materials: MaterialListName }
+  /** The source of the one set of a table that is used. */
+  | { readonly table: keyof Reference['tables']['sets'] };
 
 /** All that a rule may look at. */
 export interface CautionContext {

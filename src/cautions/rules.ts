@@ -30,6 +30,7 @@ import { rule as potassiumLye } from './rules/potassium-lye.ts';
 import { rule as rapeseedShare } from './rules/rapeseed-share.ts';
 import { rule as saltSetsFast } from './rules/salt-sets-fast.ts';
 import { rule as slowTrace } from './rules/slow-trace.ts';
+import { rule as stockCrystallises } from './rules/stock-crystallises.ts';
 import { rule as stockLye } from './rules/stock-lye.ts';
 import { rule as stripsSkin } from './rules/strips-skin.ts';
 import { rule as superfatHigh } from './rules/superfat-high.ts';
@@ -57,6 +58,7 @@ export const RULES: { readonly [Id in CautionId]: CautionRule<Id> } = {
   'lye-near-saturation': lyeNearSaturation,
   'potassium-lye': potassiumLye,
   'stock-lye': stockLye,
+  'stock-crystallises': stockCrystallises,
   'batch-too-small': batchTooSmall,
   'batch-above-vessel': batchAboveVessel,
   'fragrance-above-maximum': fragranceAboveMaximum,

@@ -1,6 +1,5 @@
 import type { CautionDocument } from '../formulary/document.ts';
 import type { ComputedFormula, Formulary } from '../formulary/formulary.ts';
-import type { CautionThresholds } from '../reference/caution-thresholds.ts';
 import type { Reference } from '../reference/reference.ts';
 import { type CautionId, cautionTexts } from '../words/en/cautions.ts';
 import { type Basis, type CautionContext, SEVERITIES } from './rule.ts';
@@ -42,11 +41,16 @@ function applied<Id extends CautionId>(id: Id, context: CautionContext): Caution
     severity,
     numbers: { ...numbers },
     ...cautionTexts[id](numbers),
-    basis: basisText(basis, context.thresholds),
+    basis: basisText(basis, context.reference),
   }));
 }
 
-function basisText(basis: Basis, { limits, materials }: CautionThresholds): string {
+function basisText(basis: Basis, { cautionThresholds, tables }: Reference): string {
+  const { limits, materials } = cautionThresholds;
   if (typeof basis === 'string') return basis;
+  if ('table' in basis) {
+    const sources = tables.sets[basis.table].filter(({ used }) => used).map(({ source }) => source);
+    return [...new Set(sources)].join(', ');
+  }
   return 'limit' in basis ? limits[basis.limit].basis : materials[basis.materials].basis;
 }

@@ -61,6 +61,14 @@ export const LYE_CASES: Cases<keyof typeof lyeCautions> = {
     says: ['T-1', '50.0 %', 'Sodium hydroxide'],
     silent: { reference: sodiumLot() },
   },
+  'stock-crystallises': {
+    // the table's own point, 50 % and 12 degC
+    fires: { reference: sodiumLot({ form: 'solution', assay: 50, carbonate: 0.1 }) },
+    numbers: { lot: 'T-1', assay: 50, crystals: 12 },
+    says: ['T-1', '50.0 %', '12 °C', 'from memory'],
+    // beyond the last point of the table
+    silent: { reference: sodiumLot({ form: 'solution', assay: 50.1, carbonate: 0.1 }) },
+  },
   'alkali-without-lot': {
     fires: { reference: sodiumLot({ status: 'quarantine' }) },
     numbers: { low: 98, high: 99.5, reckoned: 99.5 },

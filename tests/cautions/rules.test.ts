@@ -8,7 +8,7 @@ import { LYE_CASES } from './cases-lye.ts';
 import { SOAP_CASES } from './cases-soap.ts';
 import { SUPERFAT_CASES } from './cases-superfat.ts';
 import { WORK_CASES } from './cases-work.ts';
-import { computedWith, type Wish } from './context.ts';
+import { computedWith, REFERENCE, type Wish } from './context.ts';
 
 // the types ask for a case of every caution there is
 const CASES = { ...LYE_CASES, ...SUPERFAT_CASES, ...WORK_CASES, ...SOAP_CASES };
@@ -30,7 +30,10 @@ describe.each(Object.entries(CASES) as [CautionId, Case<CautionId>][])('%s', (id
 
   test('says whether a source or common practice stands behind it', () => {
     const { basis } = cautions(example.fires).find((caution) => caution.id === id) ?? {};
-    expect(['common practice, no source', 'reckoned here, see methods']).toContain(basis);
+    const sources = [...REFERENCE.sources.keys()];
+    expect(['common practice, no source', 'reckoned here, see methods', ...sources]).toContain(
+      basis,
+    );
   });
 
   const { silent } = example;

@@ -42,6 +42,17 @@ export const lyeCautions = {
     action:
       'Goggles and gloves before the cap comes off. Do not weigh from it while there are crystals; warm it only as its safety data sheet allows.',
   }),
+  'stock-crystallises': (n: {
+    name: string;
+    lot: string;
+    assay: number;
+    crystals: number;
+    how: string;
+  }) => ({
+    text: `${n.name}, lot ${n.lot}, at ${fixed(n.assay, 1)} % begins to crystallise at about ${fixed(n.crystals, 0)} °C (${n.how}).`,
+    action:
+      'Keep it warmer than that, on the way here too. If it has been colder, look for crystals, and weigh none of it until it is whole again.',
+  }),
   'alkali-without-lot': (n: { name: string; low: number; high: number; reckoned: number }) => ({
     text: `No lot of ${n.name} is released. It is reckoned at ${fixed(n.reckoned, 1)} %, the strong end of ${fixed(n.low, 1)} to ${fixed(n.high, 1)} %.`,
     action:
