@@ -2,7 +2,7 @@ import { completeApproval, prepareApproval } from '../edition/approve-fs.ts';
 import { approvalLines } from '../words/en/approval-lines.ts';
 import { problemText } from '../words/problem-text.ts';
 import { FOLDERS, readArguments } from './arguments.ts';
-import { today } from './load-site.ts';
+import { asOfFor } from './as-of.ts';
 
 /**
  * Shows what changed in a formula since it was last approved, then writes the approval into its file and
@@ -25,7 +25,8 @@ export function main(args: readonly string[]): number {
     console.error(read.text);
     return read.status;
   }
-  const { formulas = 'formulas', data = 'data', by = '', until = '', on = today() } = read.given;
+  const { formulas = 'formulas', data = 'data', by = '', until = '' } = read.given;
+  const on = asOfFor(read.given.on, data);
   const prepared = prepareApproval(
     { formulas, data },
     { code: read.files[0] ?? '', by, until, on },

@@ -16,7 +16,8 @@ import { isCalendarDate } from '../formulary/calendar-date.ts';
 import { handOver } from '../site/input.ts';
 import { counted, problemSummary, problemText } from '../words/problem-text.ts';
 import { FOLDERS, readArguments } from './arguments.ts';
-import { loadSite, today } from './load-site.ts';
+import { asOfFor } from './as-of.ts';
+import { loadSite } from './load-site.ts';
 
 // the build must not tell anybody that it ran
 process.env.ASTRO_TELEMETRY_DISABLED = '1';
@@ -38,6 +39,7 @@ export async function main(args: readonly string[]): Promise<number> {
       'as-of': { value: 'DATE', about: 'the date the edition is of (today)' },
       last: { value: 'DIR', about: 'the edition before, for the page of changes' },
       drafts: { value: null, about: 'a proof edition, with what is not approved' },
+      'with-costs': { value: null, about: 'costs on the shopping page, by data/prices.yaml' },
     },
   });
   if (!read.ok) {
@@ -45,7 +47,7 @@ export async function main(args: readonly string[]): Promise<number> {
     return read.status;
   }
   const { formulas = 'formulas', data = 'data', out = 'dist' } = read.given;
-  const asOf = read.given['as-of'] ?? today();
+  const asOf = asOfFor(read.given['as-of'], data);
   if (!isCalendarDate(asOf)) {
     console.error(`--as-of: "${asOf}" is no date. Write it like 2026-12-01.`);
     return 1;
@@ -67,7 +69,12 @@ export async function main(args: readonly string[]): Promise<number> {
   const start = performance.now();
   const loaded = loadSite(
     { formulas, data },
-    { asOf, drafts: read.given.drafts !== undefined, last: read.given.last ?? null },
+    {
+      asOf,
+      drafts: read.given.drafts !== undefined,
+      last: read.given.last ?? null,
+      withCosts: read.given['with-costs'] !== undefined,
+    },
   );
   for (const problem of loaded.problems) console.error(problemText(problem));
   if (!loaded.ok) {

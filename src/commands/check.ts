@@ -1,13 +1,14 @@
 import { loadFormulary } from '../formulary/load.ts';
 import { counted, problemSummary, problemText } from '../words/problem-text.ts';
 import { FOLDERS, readArguments } from './arguments.ts';
+import { asOfFor } from './as-of.ts';
 
 /** Finds all problems of formulas and data, without building anything. Status 1 where there is an error. */
 export function main(args: readonly string[]): number {
   const read = readArguments(args, {
     command: 'check',
     about: 'Finds all problems of the formulas and the data.',
-    options: FOLDERS,
+    options: { ...FOLDERS, 'as-of': { value: 'DATE', about: 'the date of the check (today)' } },
   });
   if (!read.ok) {
     console.error(read.text);
@@ -15,7 +16,7 @@ export function main(args: readonly string[]): number {
   }
   const start = performance.now();
   const { formulas = 'formulas', data = 'data' } = read.given;
-  const loaded = loadFormulary({ formulas, data });
+  const loaded = loadFormulary({ formulas, data }, { asOf: asOfFor(read.given['as-of'], data) });
   for (const problem of loaded.problems) console.error(problemText(problem));
   const counts = loaded.ok
     ? [

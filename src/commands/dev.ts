@@ -7,7 +7,8 @@ import { handOver } from '../site/input.ts';
 import { previewProblems } from '../site/integrations/preview-problems.ts';
 import { counted, problemSummary, problemText } from '../words/problem-text.ts';
 import { FOLDERS, readArguments } from './arguments.ts';
-import { loadSite, today } from './load-site.ts';
+import { asOfFor } from './as-of.ts';
+import { loadSite } from './load-site.ts';
 
 // the preview must not tell anybody that it ran
 process.env.ASTRO_TELEMETRY_DISABLED = '1';
@@ -35,7 +36,7 @@ export async function main(args: readonly string[]): Promise<number | undefined>
     return read.status;
   }
   const { formulas = 'formulas', data = 'data' } = read.given;
-  const asOf = read.given['as-of'] ?? today();
+  const asOf = asOfFor(read.given['as-of'], data);
   const port = Number(read.given.port ?? 4321);
   if (!isCalendarDate(asOf)) {
     console.error(`--as-of: "${asOf}" is no date. Write it like 2026-12-01.`);

@@ -4,6 +4,7 @@ import type { ShopFolders } from '../formulary/formulary.ts';
 import { packagedData } from '../formulary/load.ts';
 import type { Problem } from '../formulary/problem.ts';
 import { readEvidence } from '../reference/evidence/read-evidence-fs.ts';
+import { readPrices } from '../reference/prices-fs.ts';
 import { finderData } from '../site/find/finder-data.ts';
 import { readSavedSearches } from '../site/find/saved-searches-fs.ts';
 import type { SiteInput } from '../site/input.ts';
@@ -12,15 +13,21 @@ export type LoadedSite =
   | { readonly ok: true; readonly input: SiteInput; readonly problems: readonly Problem[] }
   | { readonly ok: false; readonly problems: readonly Problem[] };
 
+export interface SiteOptions extends EditionOptions {
+  /** Costs on the shopping page. Never for an edition that hangs at the bench. */
+  readonly withCosts?: boolean;
+}
+
 /** From a shop's folders to all that the pages are made from, or to every problem that stands against it. */
-export function loadSite(folders: ShopFolders, options: EditionOptions): LoadedSite {
+export function loadSite(folders: ShopFolders, options: SiteOptions): LoadedSite {
   const loaded = loadEdition(folders, options);
   if (!loaded.ok) return loaded;
   const { edition, problems } = loaded;
   const { formulary, asOf } = edition;
   const evidence = readEvidence(packagedData(), formulary.reference);
   const kept = readSavedSearches(folders.data, finderData(formulary));
-  const more = [...evidence.problems, ...kept.problems];
+  const priced = readPrices(folders.data, formulary.reference);
+  const more = [...evidence.problems, ...kept.problems, ...priced.problems];
   if (more.length > 0) return { ok: false, problems: [...problems, ...more] };
   return {
     ok: true,
@@ -30,11 +37,9 @@ export function loadSite(folders: ShopFolders, options: EditionOptions): LoadedS
       formulary,
       evidence: evidence.rows,
       searches: kept.searches,
+      prices: options.withCosts ? priced.prices : null,
       asOf,
       formulasFolder: resolve(folders.formulas),
     },
   };
 }
-
-/** Today in UTC, `2026-12-01`, for builds that are given no date. */
-export const today = (): string => new Date().toISOString().slice(0, 10);

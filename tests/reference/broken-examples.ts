@@ -50,6 +50,10 @@ export const BROKEN: readonly {
       `${SMALL_FAT}saponification-value:\n  - { min: 18.4, max: 196, unit: mg KOH/g, source: bailey, at: here, how: handbook }\n`,
     ),
   },
+  {
+    rule: 'data/fixed-day',
+    files: withChange('shop.yaml', 'name: Test shop', 'name: Test shop\nas-of: 2026-12-01'),
+  },
   { rule: 'data/text-form', files: withChange('shop.yaml', 'id: pilot', 'id: ../pilot') },
   { rule: 'data/measure-form', files: withChange('shop.yaml', 'fats: 1 kg', 'fats: 1') },
   { rule: 'data/date', files: withChange('lots.yaml', 'opened: 2026-10-12', 'opened: 2026-02-30') },

@@ -39,7 +39,9 @@ const BLENDS = `firm:
 export const PACKAGED: readonly DataFile[] = [
   ...readdirSync('data', { recursive: true, encoding: 'utf8' })
     .map((name) => name.replaceAll('\\', '/'))
-    .filter((name) => name.endsWith('.yaml') && !/^(shop|lots|blends|prices|evidence)\.yaml$/.test(name))
+    .filter(
+      (name) => name.endsWith('.yaml') && !/^(shop|lots|blends|prices|evidence)\.yaml$/.test(name),
+    )
     .sort()
     .map((name) => file(name, readFileSync(`data/${name}`, 'utf8'))),
   file('shop.yaml', SHOP),

@@ -44,6 +44,7 @@ export const DATA_PROBLEMS = {
   'data/table-order': { title: 'Points of a table that do not rise' },
   'data/batch-size': { title: 'A batch size that is not stated in exactly one way' },
   'data/repeated-entry': { title: 'The same thing listed twice' },
+  'data/fixed-day': { title: 'A fixed day for a shop that is not invented' },
   'data/two-released-lots': { title: 'Two released lots of one material' },
   'data/lot-dates': { title: 'A lot that was opened after its retest date' },
   'data/lot-outside-range': { title: 'A measured lot far outside the published range' },
