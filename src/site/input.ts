@@ -1,6 +1,7 @@
 import type { Edition } from '../edition/edition.ts';
 import type { Formulary } from '../formulary/formulary.ts';
 import type { EvidenceRow } from '../reference/evidence/evidence.ts';
+import type { Prices } from '../reference/prices-fs.ts';
 import type { SavedSearch } from '../search/saved/saved-search.ts';
 
 /** Everything that the pages are made from. */
@@ -12,6 +13,8 @@ export interface SiteInput {
   /** Computed against published, for the models and the fats. */
   readonly evidence: readonly EvidenceRow[];
   readonly searches: readonly SavedSearch[];
+  /** Only where the build was asked for costs: what is not here can reach no page. */
+  readonly prices: Prices | null;
   /** The one date that comparisons use and that pages show, `2026-12-01`. */
   readonly asOf: string;
   /** Folder of the formula files, for the pictures that they show. */

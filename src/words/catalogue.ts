@@ -1,6 +1,8 @@
 import { breachText } from './en/breaches.ts';
 import { cardWords } from './en/card.ts';
 import { contentsPage } from './en/contents-page.ts';
+import { contradictionsPage } from './en/contradictions-page.ts';
+import { declaration } from './en/declaration.ts';
 import { evidencePage } from './en/evidence-page.ts';
 import { fatPages } from './en/fat-pages.ts';
 import { formulaPage } from './en/formula-page.ts';
@@ -9,10 +11,12 @@ import { lostPage } from './en/lost-page.ts';
 import { lyePage } from './en/lye-page.ts';
 import { marginWords } from './en/margin.ts';
 import { methodWords } from './en/methods.ts';
+import { materialPages } from './en/material-pages.ts';
 import { methodsPage } from './en/methods-page.ts';
 import { profileWords, propertyNames, propertyUnits } from './en/profile.ts';
 import { safetyPage } from './en/safety.ts';
 import { standingWords } from './en/standing.ts';
+import { shopping } from './en/shopping.ts';
 import { workingWords } from './en/working.ts';
 
 /** Every word that a page shows. Pages take their text from here and nowhere else. */
@@ -23,6 +27,9 @@ export const words = {
   evidencePage,
   fatPages,
   formulaPage,
+  contradictionsPage,
+  declaration,
+  dilutionWords,
   frame,
   lostPage,
   lyePage,
@@ -31,8 +38,10 @@ export const words = {
   methodsPage,
   profileWords,
   propertyNames,
+  materialPages,
   propertyUnits,
   safetyPage,
   standingWords,
   workingWords,
 } as const;
+  shopping,
