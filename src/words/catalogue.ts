@@ -17,6 +17,7 @@ import { profileWords, propertyNames, propertyUnits } from './en/profile.ts';
 import { safetyPage } from './en/safety.ts';
 import { standingWords } from './en/standing.ts';
 import { shopping } from './en/shopping.ts';
+import { withdrawnPage } from './en/withdrawn-page.ts';
 import { workingWords } from './en/working.ts';
 
 /** Every word that a page shows. Pages take their text from here and nowhere else. */
@@ -42,6 +43,7 @@ export const words = {
   propertyUnits,
   safetyPage,
   standingWords,
+  withdrawnPage,
   workingWords,
 } as const;
   shopping,

@@ -14,6 +14,7 @@ export const contentsPage = {
     'liquid cold': 'Liquids, cold process',
     'liquid hot': 'Liquids, hot process',
   } as Readonly<Record<string, string>>,
+  withdrawn: 'Withdrawn',
   columns: { code: 'Code', formula: 'Formula', superfat: 'Superfat', lowest: 'Lowest' },
   superfat: (percent: number) => `${plain(percent, 1)} %`,
   lowest: (percent: number) => `${fixed(percent, 1)} %`,

@@ -2,7 +2,8 @@ import { fixed, kilograms, plain } from '../numbers.ts';
 
 export const formulaPage = {
   revision: (n: number) => `Revision ${n}`,
-  notApproved: 'Not approved yet',
+  notApproved: 'not approved',
+  fingerprint: 'Fingerprint',
   approved: (by: string, on: string, until: string) =>
     `Approved by ${by} on ${on}, to be reviewed by ${until}`,
   concession: (reason: string, by: string, on: string) =>
@@ -45,6 +46,7 @@ export const formulaPage = {
       steps.length === 1
         ? `Rounded to steps of ${plain(steps[0] ?? 0)} g.`
         : `Rounded to steps of ${steps.map((step) => `${plain(step)} g`).join(' and ')}, as printed.`,
+    digest: (digest: string) => `Weights ${digest}`,
     end: (label: string) => `End of ${label}`,
     refusedTitle: 'No weights at this size',
     refusedAdvice: 'Do not scale another size by hand. Ask the formulator.',

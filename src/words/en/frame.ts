@@ -13,6 +13,8 @@ export const frame = {
   safety: 'Safety',
   methods: 'Methods',
   asOf: (date: string) => `As of ${date}`,
+  edition: (id: string) => `Edition ${id}`,
+  proof: 'Proof edition, not for use: it holds formulas that are not approved.',
   invented: 'Demonstration: an invented workshop, not a formulary to work from.',
   foot: 'Not a substitute for the supplier’s safety data sheet, for local rules, or for a licensed practitioner’s advice. Those come first.',
   home: 'Contents of the handbook',
