@@ -1,3 +1,4 @@
+import { BATCH_EQUATIONS } from './equations-batch.ts';
 import {
   brackets,
   display,
@@ -201,6 +202,7 @@ export const EQUATIONS = {
       ),
     ),
   ],
+  ...BATCH_EQUATIONS,
 } as const satisfies Readonly<Record<string, readonly string[]>>;
 
 export type ModelId = keyof typeof EQUATIONS;

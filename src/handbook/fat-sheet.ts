@@ -1,4 +1,5 @@
 import type { Formulary } from '../formulary/formulary.ts';
+import { firstClosedRange } from '../reference/choice.ts';
 import type { FatRecord, Reference, ValueRecord } from '../reference/reference.ts';
 import { words } from '../words/catalogue.ts';
 import { plain, range } from '../words/numbers.ts';
@@ -67,7 +68,7 @@ export function recordRows(fat: FatRecord): readonly RecordRow[] {
   const { chosen } = fat;
   const lists: readonly (readonly [string, readonly ValueRecord[], ValueRecord | null])[] = [
     [measures.saponificationValue, fat.saponificationValues, chosen.saponificationValue],
-    [measures.acidValue, fat.acidValues, null],
+    [measures.acidValue, fat.acidValues, acidValueUsed(fat)],
     [measures.iodineValue, fat.iodineValues, chosen.iodineValue],
     [measures.relativeDensity, fat.relativeDensities, chosen.density],
     [measures.unsaponifiable, fat.unsaponifiableMatter, chosen.unsaponifiable],
@@ -82,6 +83,14 @@ export function recordRows(fat: FatRecord): readonly RecordRow[] {
     })),
   );
 }
+
+/** A free acid is reckoned by its acid value; a wax's lowest superfat counts its acid value alone. */
+const acidValueUsed = ({ kind, acidValues, chosen }: FatRecord): ValueRecord | null =>
+  kind === 'free-acid'
+    ? chosen.saponificationValue
+    : kind === 'wax'
+      ? firstClosedRange(acidValues)
+      : null;
 
 export interface AcidRow {
   readonly id: string;

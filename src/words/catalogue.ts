@@ -8,6 +8,7 @@ import { fatPages } from './en/fat-pages.ts';
 import { formulaPage } from './en/formula-page.ts';
 import { frame } from './en/frame.ts';
 import { lostPage } from './en/lost-page.ts';
+import { lyeHeatWords } from './en/lye-heat.ts';
 import { lyePage } from './en/lye-page.ts';
 import { marginWords } from './en/margin.ts';
 import { methodWords } from './en/methods.ts';
@@ -19,6 +20,7 @@ import { standingWords } from './en/standing.ts';
 import { shopping } from './en/shopping.ts';
 import { withdrawnPage } from './en/withdrawn-page.ts';
 import { workingWords } from './en/working.ts';
+import { dilutionWords, yieldWords } from './en/yields.ts';
 
 /** Every word that a page shows. Pages take their text from here and nowhere else. */
 export const words = {
@@ -33,6 +35,7 @@ export const words = {
   dilutionWords,
   frame,
   lostPage,
+  lyeHeatWords,
   lyePage,
   marginWords,
   methodWords,
@@ -45,5 +48,6 @@ export const words = {
   standingWords,
   withdrawnPage,
   workingWords,
+  yieldWords,
 } as const;
   shopping,

@@ -26,6 +26,7 @@ export const fatPages = {
     alkali: 'Alkali for 100 g',
     values: 'Values used',
     acids: 'Fatty acids',
+    compositions: 'Fatty acids, source by source',
     records: 'All published values',
     notes: 'Notes',
     used: 'Where it is used',
@@ -45,7 +46,6 @@ export const fatPages = {
     unsaponifiable: 'Unsaponifiable matter',
     composition: 'Fatty acids',
   },
-  notKnown: 'not known',
   atMost: (value: number) => `at most ${plain(value)}`,
   atLeast: (value: number) => `at least ${plain(value)}`,
   mean: (samples: number | null) => (samples ? `mean of ${samples}` : 'mean'),
@@ -54,6 +54,11 @@ export const fatPages = {
   lowersValue: 'lowers the value used',
   lot: (lot: string, measure: string, value: number, uncertainty: number, method: string) =>
     `Lot ${lot}, ${measure}: ${plain(value, 2)} ± ${plain(uncertainty, 2)} mg KOH/g, ${method}. Formulas are reckoned on it.`,
+  compositionsLead:
+    'Percent of all fatty acids. Sources are kept apart and stand in the order of choice; one is used as a whole, and none is mixed with another.',
+  recordsLead: (order: readonly string[]) =>
+    `In the order of choice by the kind of the source: ${order.join(', ')}. Within a kind, what was read stands before what is known from memory.`,
+  notListed: '–',
   computedFrom: 'Shares used are the middles of the range, brought to 100 %.',
   notUsed: 'No formula uses it.',
   asAfterCook: 'after the cook',

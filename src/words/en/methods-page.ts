@@ -2,6 +2,8 @@ export const methodsPage = {
   title: 'Methods',
   lead: 'Every number in this handbook comes from one of the models below. Each has a range; outside it the pages give a reason and no number. Masses are in grams, amounts in moles, and nothing is rounded before it is weighed or printed.',
   contents: 'Models',
+  evidence: 'Evidence: what the models give, beside published values',
+  contradictions: 'Contradictions: where the sources do not agree',
   symbols: 'Symbols',
   range: 'Range',
   ignores: 'What it leaves out',

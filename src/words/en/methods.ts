@@ -1,3 +1,6 @@
+import { batchMethods } from './methods-batch.ts';
+import { materialMethods } from './methods-materials.ts';
+
 /** One model in words: symbols as [symbol, meaning, unit]. Its equations stand in `src/handbook/equations.ts`. */
 export interface MethodText {
   readonly id: string;
@@ -9,7 +12,7 @@ export interface MethodText {
   readonly source: string;
 }
 
-export const methodWords = [
+const basicMethods = [
   {
     id: 'molar-mass',
     title: 'Molar masses',
@@ -195,16 +198,19 @@ export const methodWords = [
   {
     id: 'lye-heat',
     title: 'Temperature of the lye',
-    text: 'The temperature that the lye would reach from a stated start if no heat were lost: heat of solution at its dilution and heat of neutralising acids, over its heat capacity. Where data sets differ, the hotter one is shown.',
+    text: 'The temperature that the lye would reach from a stated start if no heat were lost: heat of solution at its dilution and heat of neutralising acids, over its heat capacity. Where data sets differ, the hotter one is shown, with the cooler beside it. Water that is held back is not in the pot: the lye is stronger and hotter, and the page says by how much against all the water.',
     symbols: [
       ['T_0', 'start temperature of water and alkali', '°C'],
       ['q(r)', 'integral heat of solution at r moles of water per mole', 'kJ/mol'],
       ['c', 'heat capacity of the lye', 'kJ/(kg K)'],
     ],
     range:
-      'Sodium lye within the tables. No number for potassium lye, mixed lye or stock; take those as boiling hot.',
+      'Sodium lye within the tables. No number for potassium lye, mixed lye or stock; take those as boiling hot. The heat of solution at the strength of a lye is known from an older set alone; what a newer set puts on top at infinite dilution is added at every strength.',
     ignores: 'Heat lost to jug and air, so the real lye stays cooler. Ice and frozen liquids.',
     source:
-      'Tables in the reference data, each row with its source; parts from memory and marked so there.',
+      'Tables in the reference data: Felder and Rousseau, Table B.11, with the limit of Parker 1965 on top; heat capacities by Laliberté 2009 and the CRC Handbook. The value at 4 mol of water was read in print; the other heats are from memory.',
   },
 ] as const satisfies readonly MethodText[];
+
+/** Every model of this handbook, from the materials to the finished batch. */
+export const methodWords = [...basicMethods, ...materialMethods, ...batchMethods] as const;

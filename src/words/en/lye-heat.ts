@@ -1,0 +1,46 @@
+import { fixed } from '../numbers.ts';
+
+/** The heat of the lye on a formula's page. */
+export const lyeHeatWords = {
+  title: 'Heat of the lye',
+  rows: {
+    start: 'Water and alkali at the start',
+    strength: 'Hydroxide in the pot, pure, of hydroxide and water',
+    peak: 'Hottest, by the hotter of the data sets',
+    coolest: 'The same by the cooler',
+    allWater: 'Hottest if no water were held back',
+    extra: 'Holding water back makes the pot hotter by',
+    boiling: 'Boils at',
+    saturationAtStart: 'A saturated lye at the start temperature holds',
+    saturationAtPeak: 'A saturated lye at the hottest holds',
+  },
+  celsius: (value: number) => `${fixed(value, 0)} °C`,
+  percent: (value: number) => `${fixed(value, 1)} %`,
+  noNumber: 'No number',
+  tableEnds: (celsius: number) => `not known: the table ends at ${fixed(celsius, 0)} °C`,
+  noLoss:
+    'With no heat lost to jug and air. A real pot stays somewhat cooler; nothing here says by how much, so plan for the figure.',
+  boils:
+    'The lye reaches its boiling point by this reckoning. It can spit and boil over: add the alkali in small portions with cooling between them.',
+  crystals:
+    'The lye holds more than dissolves at the start temperature. What dissolves hot comes out as crystals on cooling: use it warm, and look at the bottom of the jug before you pour.',
+  strongest:
+    'No number means the strongest caution, not a mild lye. Take it as boiling hot: alkali into the water in small portions, cold water, cooling round the jug, a vessel that stands heat and is no more than half full, face shield, nobody leaning over it, and a thermometer before anything else is done with it.',
+  ofStock:
+    'Stock lye still warms when water is added. Pour the stock into the water slowly, measure, and take it as hot until the thermometer says otherwise.',
+  limitOnly: (material: string, kilojoules: readonly number[]) =>
+    `${material}: at infinite dilution one mole sets free ${kilojoules.map((each) => fixed(each, 1)).join(' or ')} kJ, by source. At the strength of a lye nothing was found, and the limit gives no temperature.`,
+  newerAdds: (kilojoules: number) =>
+    `At the strength of a lye only the older set has figures. A newer set, known at infinite dilution alone, lies ${fixed(kilojoules, 2)} kJ/mol higher; the hotter reading adds that at every strength.`,
+  memoryOnly: (table: string) =>
+    `Only figures from memory stand behind the ${table} at this strength.`,
+  partlyMemory: (table: string) =>
+    `Some of the figures behind the ${table} at this strength are from memory.`,
+  tables: {
+    'heat-of-solution': 'heat of solution',
+    'heat-capacity': 'heat capacity',
+    solubility: 'solubility',
+    'boiling-point': 'boiling point',
+  },
+  sourcesTitle: 'Where the tables come from',
+} as const;
