@@ -10,8 +10,9 @@ import { type ApprovalState, approvalOf } from './approval.ts';
 import { type ApprovalRequest, requestProblems } from './approval-request.ts';
 import { editionProblem } from './edition-problem.ts';
 import { fingerprintOf } from './fingerprint.ts';
-import { type ApprovedEntry, lastApproval } from './ledger.ts';
+import { type ApprovedEntry, lastApproval, publishedIn } from './ledger.ts';
 import { appendToLedger, ledgerPath, readLedger } from './ledger-fs.ts';
+import { candidateOf, revisionProblems } from './ledger-rules.ts';
 import { publishedCharge } from './published-charge.ts';
 import { replaceFile } from './replace-file-fs.ts';
 import { soundFormula } from './sound-formula.ts';
@@ -88,6 +89,12 @@ export function prepareApproval(
     );
   }
   const fingerprint = fingerprintOf(formula, reference);
+  const used = revisionProblems(
+    candidateOf(formula, fingerprint),
+    publishedIn(ledger.entries),
+    'error',
+  );
+  if (used.length > 0) return refused(...used);
   const approval = {
     by: request.by.trim(),
     on: request.on,

@@ -15,7 +15,7 @@ import {
 import { fingerprintOf } from './fingerprint.ts';
 import type { InputFile } from './inputs-fs.ts';
 import type { LedgerEntry } from './ledger.ts';
-import { ledgerProblems } from './ledger-rules.ts';
+import { candidateOf, ledgerProblems } from './ledger-rules.ts';
 import { lotWindowProblems } from './lot-window.ts';
 import { pastSheets, sheetList } from './sheet-list.ts';
 import { lotsInForce } from './weights-digest.ts';
@@ -72,13 +72,7 @@ export function editionProblems(
       approvalProblems(formula, fingerprint, asOf, severity),
     ),
     ...ledgerProblems(
-      printed.map(({ formula, fingerprint }) => ({
-        code: formula.code,
-        revision: formula.revision,
-        fingerprint: formula.withdrawn ? null : fingerprint,
-        approvedOn: formula.approval?.on ?? null,
-        placeOf: (path) => ({ file: formula.file, ...formula.places.get(path) }),
-      })),
+      printed.map(({ formula, fingerprint }) => candidateOf(formula, fingerprint)),
       ledger,
       { file: ledgerFile, severity },
     ),

@@ -1,3 +1,4 @@
+import type { Formula } from '../formulary/formula.ts';
 import type { Problem } from '../reference/problem.ts';
 import { editionProblem, type ProblemPlace } from './edition-problem.ts';
 import { type LedgerEntry, type PublishedEntry, publishedIn } from './ledger.ts';
@@ -12,6 +13,15 @@ export interface Candidate {
   /** Where a key of its file stands. */
   readonly placeOf: (path: string) => ProblemPlace;
 }
+
+/** A formula of the shop's files as a candidate. */
+export const candidateOf = (formula: Formula, fingerprint: string): Candidate => ({
+  code: formula.code,
+  revision: formula.revision,
+  fingerprint: formula.withdrawn ? null : fingerprint,
+  approvedOn: formula.approval?.on ?? null,
+  placeOf: (path) => ({ file: formula.file, ...formula.places.get(path) }),
+});
 
 /**
  * Holds formulas against what was published: a revision says one thing for ever, revisions do not go back,
@@ -45,7 +55,8 @@ export function ledgerProblems(
   ];
 }
 
-function revisionProblems(
+/** What a candidate's revision has against it; also asked before it is approved. */
+export function revisionProblems(
   { code, revision, fingerprint, placeOf }: Candidate,
   published: readonly PublishedEntry[],
   severity: Problem['severity'],

@@ -12,7 +12,6 @@ export const EDITION_PROBLEMS = {
   'edition/as-of-date': { title: 'An as-of date that does not exist' },
   'edition/ledger-unreadable': { title: 'The ledger cannot be read' },
   'edition/ledger-line': { title: 'A line of the ledger that cannot be understood' },
-  'edition/ledger-of-another-shop': { title: "Another shop's entry in the ledger" },
   'edition/not-an-edition': { title: 'No edition where one should be' },
   'edition/edition-unreadable': { title: 'An edition.json that cannot be understood' },
   'edition/edition-of-another-shop': { title: "Another shop's edition" },
