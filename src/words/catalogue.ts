@@ -11,13 +11,13 @@ import { lostPage } from './en/lost-page.ts';
 import { lyeHeatWords } from './en/lye-heat.ts';
 import { lyePage } from './en/lye-page.ts';
 import { marginWords } from './en/margin.ts';
-import { methodWords } from './en/methods.ts';
 import { materialPages } from './en/material-pages.ts';
+import { methodWords } from './en/methods.ts';
 import { methodsPage } from './en/methods-page.ts';
 import { profileWords, propertyNames, propertyUnits } from './en/profile.ts';
 import { safetyPage } from './en/safety.ts';
-import { standingWords } from './en/standing.ts';
 import { shopping } from './en/shopping.ts';
+import { standingWords } from './en/standing.ts';
 import { withdrawnPage } from './en/withdrawn-page.ts';
 import { workingWords } from './en/working.ts';
 import { dilutionWords, yieldWords } from './en/yields.ts';
@@ -27,27 +27,27 @@ export const words = {
   breachText,
   cardWords,
   contentsPage,
-  evidencePage,
-  fatPages,
-  formulaPage,
   contradictionsPage,
   declaration,
   dilutionWords,
+  evidencePage,
+  fatPages,
+  formulaPage,
   frame,
   lostPage,
   lyeHeatWords,
   lyePage,
   marginWords,
+  materialPages,
   methodWords,
   methodsPage,
   profileWords,
   propertyNames,
-  materialPages,
   propertyUnits,
   safetyPage,
+  shopping,
   standingWords,
   withdrawnPage,
   workingWords,
   yieldWords,
 } as const;
-  shopping,
