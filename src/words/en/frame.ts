@@ -3,7 +3,6 @@ import { fixed, plain } from '../numbers.ts';
 /** What stands around every page, and the small words that many pages share. */
 export const frame = {
   language: 'en',
-  title: 'Formulary handbook',
   skip: 'To the content',
   menu: 'Handbook',
   contents: 'Contents',
@@ -17,7 +16,6 @@ export const frame = {
   proof: 'Proof edition, not for use: it holds formulas that are not approved.',
   invented: 'Demonstration: an invented workshop, not a formulary to work from.',
   foot: 'Not a substitute for the supplier’s safety data sheet, for local rules, or for a licensed practitioner’s advice. Those come first.',
-  home: 'Contents of the handbook',
   grams: 'g',
   percent: '%',
   kinds: { bar: 'Bar', paste: 'Paste', liquid: 'Liquid' },

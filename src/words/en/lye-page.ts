@@ -1,6 +1,5 @@
 export const lyePage = {
   title: (label: string) => `Lye table: ${label}`,
-  indexTitle: 'Lye tables',
   lead: 'Weigh the alkali and the water of one line. The code stands at both ends of the line: they must be the same.',
   order: 'Alkali into water, never water onto alkali.',
   columns: {
@@ -13,7 +12,5 @@ export const lyePage = {
   heldBack: 'Water held back',
   none: '—',
   refused: 'No weights at this size:',
-  noRows: 'No formula is made at this size.',
-  otherSizes: 'Other sizes',
   csv: 'This table as CSV',
 } as const;
