@@ -1,6 +1,16 @@
 // Plain JavaScript without types, and with old syntax only: it must run on a Node that is too old for the
 // rest, to say so.
-const NAMES = ['build', 'dev', 'check', 'compute', 'new', 'approve', 'verify', 'publish'];
+const NAMES = [
+  'build',
+  'dev',
+  'check',
+  'compute',
+  'new',
+  'approve',
+  'verify',
+  'publish',
+  'titrate',
+];
 const NEEDED = [22, 18];
 
 const found = process.versions.node.split('.').map(Number);
