@@ -74,12 +74,16 @@ export function lyeHeatNotes(
   if (atStart !== null && lye.pureAsMade > atStart) add(text.crystals, true);
   const adds = newerAdds(document, reference);
   if (!breach && adds > 0) add(text.newerAdds(adds));
-  for (const [table, sets] of tablesRead(document, reference)) {
-    const remembered = sets.filter(({ how }) => how === 'from memory').length;
-    if (remembered === 0) continue;
-    const say = remembered === sets.length ? text.memoryOnly : text.partlyMemory;
-    add(say(text.tables[table]));
-  }
+  const read = tablesRead(document, reference).map(([table, sets]) => ({
+    name: text.tables[table],
+    remembered: sets.filter(({ how }) => how === 'from memory').length / sets.length,
+  }));
+  const names = (wanted: (remembered: number) => boolean) =>
+    read.filter(({ remembered }) => wanted(remembered)).map(({ name }) => name);
+  const whole = names((remembered) => remembered === 1);
+  const part = names((remembered) => remembered > 0 && remembered < 1);
+  if (whole.length > 0) add(text.fromMemory(whole));
+  if (part.length > 0) add(text.partlyFromMemory(part));
   return notes;
 }
 

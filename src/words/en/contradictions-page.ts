@@ -52,7 +52,6 @@ export const contradictionsPage = {
     samples: (count: number) =>
       count === 1 ? 'one sample' : `what ${count} samples spanned or gave on average`,
     file: 'of the same rank, and listed later',
-    composition: 'the first composition is used as a whole',
   },
   apart: (distance: number) => (distance === 0 ? 'meets it' : plain(distance, 3)),
   tableNames: {

@@ -32,10 +32,10 @@ export const lyeHeatWords = {
     `${material}: at infinite dilution one mole sets free ${kilojoules.map((each) => fixed(each, 1)).join(' or ')} kJ, by source. At the strength of a lye nothing was found, and the limit gives no temperature.`,
   newerAdds: (kilojoules: number) =>
     `At the strength of a lye only the older set has figures. A newer set, known at infinite dilution alone, lies ${fixed(kilojoules, 2)} kJ/mol higher; the hotter reading adds that at every strength.`,
-  memoryOnly: (table: string) =>
-    `Only figures from memory stand behind the ${table} at this strength.`,
-  partlyMemory: (table: string) =>
-    `Some of the figures behind the ${table} at this strength are from memory.`,
+  fromMemory: (tables: readonly string[]) =>
+    `At this strength nothing but figures from memory stands behind: ${tables.join(', ')}.`,
+  partlyFromMemory: (tables: readonly string[]) =>
+    `Partly from memory at this strength: ${tables.join(', ')}.`,
   tables: {
     'heat-of-solution': 'heat of solution',
     'heat-capacity': 'heat capacity',

@@ -55,19 +55,19 @@ export const dilutionWords = {
   title: 'Dilution of the paste',
   lead: 'By the paste as weighed: a cook boils off water that no calculation knows, while the soap stays. The first column of figures is theory, as if nothing had boiled away; the others are the same paste found lighter on the scale.',
   soapIn: (percent: number) => `soap ${fixed(percent, 1)} %`,
-  asWeighed: (part: number) =>
-    part === 1 ? 'Theory' : `Weighed at ${fixed(part * 100, 0)} % of theory`,
-  caption: 'Water for 1000 g of paste, g',
+  asWeighed: (part: number) => (part === 1 ? 'Theory' : `${fixed(part * 100, 0)} % of theory`),
+  caption: 'Water for 1000 g of paste, by what the paste weighs against theory',
   target: 'Soap content wanted',
   percent: (value: number) => `${fixed(value, 0)} %`,
   none: 'not weaker',
   joins: (percent: number) =>
     `What the formula adds at dilution is part of that water’s mass: ${fixed(percent, 1)} g for 1000 g of paste by theory. Subtract it before you weigh the water.`,
   bySize: 'Finished mass by size',
+  bySizeCaption: 'Finished mass by soap content',
   bySizeLead:
     'Whatever the paste weighs, the soap in it is the same. Bring the whole to the mass below: water to add is that mass less the paste as weighed, less what else joins at dilution. Losses of the shop are taken off already; if more stuck to the pot, there is less soap.',
   columns: { size: 'Size', soap: 'Soap in it', theory: 'Paste by theory' },
-  finished: (percent: number) => `Finished at ${fixed(percent, 0)} %`,
+  finished: (percent: number) => `${fixed(percent, 0)} %`,
   grams: (mass: number) => `${fixed(mass, 0)} g`,
   clear: 'How weak a liquid may be and stay clear is found by a trial on 100 g, not by this table.',
 } as const;
