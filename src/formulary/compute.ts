@@ -134,7 +134,7 @@ function documentOf(formula: Formula, charge: Charge, reference: Reference): For
       written: formula.superfat,
       ...superfat,
       final: finalSuperfat(charge, constants) * 100,
-      withoutLots: marginWithoutLots(formula, charge, reference),
+      withoutLots: marginWithoutLots(formula, superfat, reference),
       ifAcidForgotten: equivalents.acid > 0 ? superfatIfAcidForgotten(equivalents) * 100 : null,
       budget: margin.budget.map(({ id, halfWidth }) => ({ id, halfWidth: halfWidth * 100 })),
     },

@@ -1,4 +1,3 @@
-import type { Charge } from '../chemistry/charge.ts';
 import { superfatMargin } from '../chemistry/margin.ts';
 import { type Grams, grams } from '../chemistry/quantity.ts';
 import { reckon } from '../chemistry/reckon.ts';
@@ -6,39 +5,37 @@ import type { Reference } from '../reference/reference.ts';
 import type { FormulaDocument } from './document.ts';
 import type { Formula } from './formula.ts';
 import { prepareFormulation } from './formulation.ts';
-import { alkaliInForce, fatInForce, withoutLots } from './lots.ts';
+import { withoutLots } from './lots.ts';
 import { percentRange } from './percent-range.ts';
+
+type Ends = Pick<FormulaDocument['superfat'], 'expanded' | 'worstCase'>;
 
 const MASS_OF_FATS: Grams = grams(1000);
 
 /**
  * The superfat margin that a formula would have if no lot were released: reckoned anew, weights and all, by
- * published and trade ranges. `null` where no lot moves the margin anyway, or where the formula could not be
- * made of what the trade sells.
+ * published and trade ranges. `null` where that is the margin it has anyway, or where the formula could not
+ * be made of what the trade sells.
  */
 export function marginWithoutLots(
   formula: Formula,
-  charge: Charge,
+  inForce: Ends,
   reference: Reference,
 ): FormulaDocument['superfat']['withoutLots'] {
-  if (!isLotInForce(charge, reference)) return null;
+  const { fats, alkalis } = reference.lots;
+  if (fats.length === 0 && alkalis.length === 0) return null;
   const prepared = prepareFormulation(formula, withoutLots(reference));
   if (!prepared.ok) return null;
   const reckoned = reckon(prepared.formulation, MASS_OF_FATS, reference.constants);
   if (!reckoned.ok) return null;
-  const { expanded, worstCase } = superfatMargin(reckoned.value, reference.constants);
-  return { expanded: percentRange(expanded), worstCase: percentRange(worstCase) };
-}
-
-function isLotInForce({ fats, alkali }: Charge, reference: Reference): boolean {
-  return (
-    fats.some(({ fat: { id } }) => {
-      const core = reference.fats.get(id)?.core;
-      return core ? fatInForce(core, reference).fat !== core : false;
-    }) ||
-    alkali.some(({ supply: { id } }) => {
-      const record = reference.alkalis.get(id);
-      return record ? alkaliInForce(record, reference).lot !== null : false;
-    })
+  const margin = superfatMargin(reckoned.value, reference.constants);
+  const ends = {
+    expanded: percentRange(margin.expanded),
+    worstCase: percentRange(margin.worstCase),
+  };
+  // the same arithmetic on the same numbers, so where no lot decides the bits are the same
+  const same = (['expanded', 'worstCase'] as const).every((name) =>
+    ends[name].every((end, i) => end === inForce[name][i]),
   );
+  return same ? null : ends;
 }
