@@ -154,6 +154,18 @@ describe('approving', () => {
     ]);
   });
 
+  test('refuses frontmatter in a form that it cannot write into', () => {
+    const front = '{ code: TT-001, name: N, kind: bar, process: cold, revision: 1, superfat: 8,';
+    const rest = 'fats: [{ fat: olive, share: 100 }], alkali: { sodium: 100 },';
+    const text = FORMULA.replace(
+      /---\n[\s\S]*?---/,
+      `---\n${front}\n${rest} water: { lye-concentration: 32 } }\n---`,
+    ).replace(':weight[coconut] with ', '');
+    const shop = shopWith({ 'TT-001.md': text });
+    expect(shop.approve()).toMatchObject([{ rule: 'edition/approval-place' }]);
+    expect(shop.textOf('TT-001.md')).toBe(text);
+  });
+
   test('refuses a file that changed after it was shown, and keeps the change', () => {
     const shop = shopWith();
     const request = { code: 'TT-001', by: 'x', on: AS_OF, until: '2027-12-01' };

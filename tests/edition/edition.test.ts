@@ -1,4 +1,4 @@
-import { cpSync, existsSync, readFileSync, writeFileSync } from 'node:fs';
+import { cpSync, existsSync, mkdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { describe, expect, test } from 'vitest';
 import { editionSchema } from '../../src/edition/edition-schema.ts';
@@ -97,6 +97,9 @@ describe('the ledger', () => {
     const shop = approvedShop();
     writeFileSync(shop.ledger, '{"kind":"published"}\n');
     expect(shop.rules()).toEqual(['edition/ledger-line']);
+    rmSync(shop.ledger);
+    mkdirSync(shop.ledger);
+    expect(shop.rules()).toEqual(['edition/ledger-unreadable']);
   });
 
   test('two writers do not lose a line of each other', () => {
