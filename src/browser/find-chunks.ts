@@ -21,11 +21,19 @@ export async function openHandbookSearch(
 ): Promise<{ readonly search: Search; readonly entry: SearchEntry }> {
   const name = `entry.${language}`;
   const text = await carried(name, name);
-  const entry: SearchEntry = JSON.parse(text);
+  const entry = entryFrom(text, name);
   const search = await openSearch(entry, (chunk) =>
     payload(chunk, chunk === entry.contents ? name : chunk),
   );
   return { search, entry };
+}
+
+function entryFrom(text: string, name: string): SearchEntry {
+  try {
+    return JSON.parse(text);
+  } catch {
+    throw new ChunkError(pathOf(name));
+  }
 }
 
 async function payload(chunk: string, script: string): Promise<Uint8Array> {

@@ -11,8 +11,9 @@ export function say(note: Note, text: string): void {
   place.hidden = text === '';
 }
 
-/** Says which file of the search is missing or damaged; anything else is a fault of the page and is thrown on. */
+/** Says which file of the search is missing or damaged; anything else is told too, and thrown on to be mended. */
 export function sayBroken(error: unknown): void {
-  if (!(error instanceof ChunkError)) throw error;
-  say('find-broken', findWords.searchBroken(error.message));
+  const known = error instanceof ChunkError;
+  say('find-broken', findWords.searchBroken(known ? error.message : 'search/'));
+  if (!known) throw error;
 }

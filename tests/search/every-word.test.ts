@@ -17,7 +17,7 @@ describe('every word on every page finds its page', () => {
     const found = new Map<string, ReadonlySet<number> | null>();
     const missed: string[] = [];
     for (const [page, text] of texts.entries()) {
-      for (const word of wordsOfText(text).flatMap(partsToFind)) {
+      for (const word of wordsOfText(text)) {
         if (!found.has(word)) {
           const hits = await search.find(word);
           found.set(word, hits && new Set(hits.map((hit) => hit.page)));
@@ -43,11 +43,3 @@ describe('every word on every page finds its page', () => {
     }
   });
 });
-
-/** Symbols stay in a query but part words in the index, which keeps parts of two letters and more. */
-function partsToFind(token: string): readonly string[] {
-  const parts = token.split(/\p{S}/u);
-  return parts.length === 1
-    ? parts
-    : parts.filter((part) => /[\p{L}\p{N}].*[\p{L}\p{N}]/u.test(part));
-}

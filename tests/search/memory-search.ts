@@ -18,5 +18,5 @@ export async function memorySearch(files: readonly IndexFile[], options: SearchO
   const { texts, words, urls } = await readWholeIndex(bare, load);
   const exceptions = stemExceptions(texts, words, stemmerFor(bare.language, {}));
   const entry = { ...bare, stemExceptions: exceptions };
-  return { search: await openSearch(entry, load, options), entry, texts, urls };
+  return { search: await openSearch(entry, load, options), entry, texts, urls, words };
 }

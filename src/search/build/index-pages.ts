@@ -18,6 +18,8 @@ const MOST_TEXT_FILES = 200;
 export async function indexPages(pages: readonly Page[]): Promise<readonly IndexFile[]> {
   try {
     const { index, errors } = await createIndex({
+      // drawings and equations have no words that anybody looks for
+      excludeSelectors: ['svg', 'math'],
       keepIndexUrl: true,
       maxFragments: MOST_TEXT_FILES,
     });

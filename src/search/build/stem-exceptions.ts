@@ -10,6 +10,9 @@ interface Seen {
   readonly position: number;
 }
 
+/** Words of Latin letters; a stem is not longer than its word by more than one. Codes and numbers have no stem. */
+const STEMMED = /^\p{Script=Latin}+$/u;
+
 /**
  * The words of the indexed texts whose stem in the index is not what `stem` gives, with the stem that the index has.
  * `texts` are the texts of the pages by page number.
@@ -26,7 +29,7 @@ export function stemExceptions(
     const there = stored.get(keyOf(place)) ?? [];
     if (there.includes(stem(word))) continue;
     const nearest = there
-      .filter((each) => commonLength(each, word) >= 2)
+      .filter((each) => commonLength(each, word) >= 2 && each.length <= word.length + 1)
       .toSorted((a, b) => commonLength(b, word) - commonLength(a, word) || a.length - b.length)[0];
     if (nearest !== undefined) exceptions.push([word, nearest]);
   }
@@ -39,7 +42,7 @@ function wordsSeen(texts: readonly string[]): ReadonlyMap<string, Seen> {
   for (const [page, text] of texts.entries()) {
     for (const [position, token] of wordsOfText(text).entries()) {
       for (const part of withoutMarks(token.toLowerCase()).split(/[^\p{L}\p{N}]+/u)) {
-        if (part !== '' && !seen.has(part)) seen.set(part, { page, position });
+        if (STEMMED.test(part) && !seen.has(part)) seen.set(part, { page, position });
       }
     }
   }

@@ -13,12 +13,16 @@ export interface QueryTerm {
   /** Without marks. */
   readonly bare: string;
   readonly stem: string;
+  /** Without symbols such as `+`, which the index drops and the query keeps; `null` where it is the same or empty. */
+  readonly withoutSymbols: string | null;
 }
 
 /** Letters of a query beyond this are left out: enough for any sentence, too few to stall a page. */
 export const LONGEST_QUERY = 1000;
 
 const PUNCTUATION = /^\p{Pd}|[\p{Pe}\p{Pf}\p{Pi}\p{Po}]|\p{Ps}$/u;
+/** Kept in a query by the stock client, though the index drops them: it finds no `P305+P351`. */
+const DROPPED = /[\p{Sm}\p{Sc}\p{Sk}]/gu;
 // voiced kana lose their meaning without these two
 const MARKS = /(?![\u3099\u309A])\p{M}/gu;
 
@@ -37,7 +41,11 @@ export function readQuery(typed: string, include: ReadonlySet<string>, stem: Ste
     .split(' ')
     .map((term) => ({ typed: term.toWellFormed(), bare: withoutMarks(term).toWellFormed() }))
     .filter(({ bare }) => bare !== '')
-    .map(({ typed, bare }) => ({ typed, bare, stem: stem(bare) }));
+    .map(({ typed, bare }) => {
+      const letters = bare.replace(DROPPED, '');
+      const withoutSymbols = letters === bare || letters === '' ? null : stem(letters);
+      return { typed, bare, stem: stem(bare), withoutSymbols };
+    });
   return { phrase: /^\s*".+"\s*$/.test(typed), terms };
 }
 

@@ -74,11 +74,13 @@ export async function openSearch(
       return found ? [found] : [];
     });
 
-  const answering = async ({ stem }: QueryTerm): Promise<readonly IndexedWord[]> => {
-    const chunks = stem.length < shortestBeginning ? chunksAround : chunksOf;
-    const longer = await inChunks(chunks(contents.chunks, stem), (words) =>
-      wordsStarting(words, stem),
-    );
+  const beginning = (start: string) => {
+    const chunks = start.length < shortestBeginning ? chunksAround : chunksOf;
+    return inChunks(chunks(contents.chunks, start), (words) => wordsStarting(words, start));
+  };
+
+  const answering = async (stem: string): Promise<readonly IndexedWord[]> => {
+    const longer = await beginning(stem);
     if (longer.length > 0) return longer;
     for (let length = stem.length - 1; length > 0; length--) {
       const shorter = await exactly(stem.slice(0, length));
@@ -87,14 +89,22 @@ export async function openSearch(
     return [];
   };
 
+  const asIndexed = async (term: QueryTerm): Promise<QueryTerm> =>
+    term.withoutSymbols !== null && (await beginning(term.stem)).length === 0
+      ? { ...term, stem: term.withoutSymbols }
+      : term;
+
   return {
     contents,
     async find(typed) {
       const query = readQuery(typed, include, stem);
       if (query.terms.length === 0) return null;
-      const look = query.phrase ? ({ stem }: QueryTerm) => exactly(stem) : answering;
+      const look = query.phrase ? exactly : answering;
       const terms: readonly TermWords[] = await Promise.all(
-        query.terms.map(async (term) => ({ term, words: await look(term) })),
+        query.terms.map(async (typed) => {
+          const term = await asIndexed(typed);
+          return { term, words: await look(term.stem) };
+        }),
       );
       return query.phrase ? findPhrase(contents, terms) : rank(contents, terms);
     },
