@@ -1,4 +1,5 @@
 import type { Formulary } from '../formulary/formulary.ts';
+import { decidingValue } from '../formulary/lots.ts';
 import { firstClosedRange } from '../reference/choice.ts';
 import type { FatRecord, Reference, ValueRecord } from '../reference/reference.ts';
 import { words } from '../words/catalogue.ts';
@@ -116,19 +117,19 @@ export function acidRows(fat: FatRecord, { reference }: Formulary): readonly Aci
   });
 }
 
-/** What was measured on the released lots of a fat, a sentence each. */
-export function lotLines(fat: string, { lots }: Reference): readonly string[] {
-  const { lot: sentence, measures } = words.fatPages;
-  return lots.fats
-    .filter((lot) => lot.fat === fat && lot.status === 'released')
-    .flatMap(({ lot, saponificationValue, acidValue }) =>
-      (
-        [
-          [measures.saponificationValue, saponificationValue],
-          [measures.acidValue, acidValue],
-        ] as const
-      ).flatMap(([measure, found]) =>
-        found ? [sentence(lot, measure, found.value, found.uncertainty, found.method)] : [],
-      ),
-    );
+/** What was measured on the released lot of a fat, a sentence each, and what it decides. */
+export function lotLines({ id, kind }: FatRecord, { lots }: Reference): readonly string[] {
+  const { lot: sentence, lotDecides, lotShown, lotOfWax, measures } = words.fatPages;
+  const lot = lots.fats.find(({ fat, status }) => fat === id && status === 'released');
+  if (!lot) return [];
+  const deciding = decidingValue(lot, kind);
+  const named = [
+    [measures.saponificationValue, lot.saponificationValue],
+    [measures.acidValue, lot.acidValue],
+  ] as const;
+  return named.flatMap(([measure, found]) => {
+    if (!found) return [];
+    const end = found === deciding ? lotDecides : kind === 'wax' ? lotOfWax : lotShown;
+    return [`${sentence(lot.lot, measure, found.value, found.uncertainty, found.method)} ${end}`];
+  });
 }

@@ -7,7 +7,9 @@ import { evidencePage } from './en/evidence-page.ts';
 import { fatPages } from './en/fat-pages.ts';
 import { formulaPage } from './en/formula-page.ts';
 import { frame } from './en/frame.ts';
+import { hazardWords, STATEMENTS } from './en/hazard-statements.ts';
 import { lostPage } from './en/lost-page.ts';
+import { lotsPage } from './en/lots-page.ts';
 import { lyeHeatWords } from './en/lye-heat.ts';
 import { lyePage } from './en/lye-page.ts';
 import { marginWords } from './en/margin.ts';
@@ -16,6 +18,9 @@ import { methodWords } from './en/methods.ts';
 import { methodsPage } from './en/methods-page.ts';
 import { profileWords, propertyNames, propertyUnits } from './en/profile.ts';
 import { safetyPage } from './en/safety.ts';
+import { safetySections } from './en/safety-sections.ts';
+import { safetyPoster, safetyRecord } from './en/safety-sheets.ts';
+import { sheetWords } from './en/sheet.ts';
 import { shopping } from './en/shopping.ts';
 import { standingWords } from './en/standing.ts';
 import { withdrawnPage } from './en/withdrawn-page.ts';
@@ -34,8 +39,10 @@ export const words = {
   fatPages,
   formulaPage,
   frame,
+  hazardWords,
   lostPage,
   lyeHeatWords,
+  lotsPage,
   lyePage,
   marginWords,
   materialPages,
@@ -45,8 +52,13 @@ export const words = {
   propertyNames,
   propertyUnits,
   safetyPage,
+  safetyPoster,
+  safetyRecord,
+  safetySections,
   shopping,
+  sheetWords,
   standingWords,
+  statements: STATEMENTS,
   withdrawnPage,
   workingWords,
   yieldWords,

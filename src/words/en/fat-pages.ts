@@ -53,7 +53,10 @@ export const fatPages = {
   usedHere: 'used',
   lowersValue: 'lowers the value used',
   lot: (lot: string, measure: string, value: number, uncertainty: number, method: string) =>
-    `Lot ${lot}, ${measure}: ${plain(value, 2)} ± ${plain(uncertainty, 2)} mg KOH/g, ${method}. Formulas are reckoned on it.`,
+    `Lot ${lot}, ${measure}: ${plain(value, 2)} ± ${plain(uncertainty, 2)} mg KOH/g, ${method}.`,
+  lotDecides: 'Formulas are reckoned on it.',
+  lotShown: 'It takes no alkali of its own.',
+  lotOfWax: 'Lower ends of the margin count it in cold process.',
   compositionsLead:
     'Percent of all fatty acids. Sources are kept apart and stand in the order of choice; one is used as a whole, and none is mixed with another.',
   recordsLead: (order: readonly string[]) =>
