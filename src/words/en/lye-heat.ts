@@ -3,6 +3,7 @@ import { fixed } from '../numbers.ts';
 /** The heat of the lye on a formula's page. */
 export const lyeHeatWords = {
   title: 'Heat of the lye',
+  method: 'How the heat of the lye is reckoned',
   rows: {
     start: 'Water and alkali at the start',
     strength: 'Hydroxide in the pot, pure, of hydroxide and water',

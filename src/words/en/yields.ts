@@ -2,6 +2,7 @@ import { fixed, plain } from '../numbers.ts';
 
 /** Yields, the days of cutting and release, and the dilution of a paste. */
 export const yieldWords = {
+  method: 'How the yield is reckoned',
   title: 'Yield and days',
   perKilogram: 'From 1000 g of fats',
   columns: {
@@ -52,6 +53,7 @@ export const yieldWords = {
 } as const;
 
 export const dilutionWords = {
+  method: 'How the dilution is reckoned',
   title: 'Dilution of the paste',
   lead: 'By the paste as weighed: a cook boils off water that no calculation knows, while the soap stays. The first column of figures is theory, as if nothing had boiled away; the others are the same paste found lighter on the scale.',
   soapIn: (percent: number) => `soap ${fixed(percent, 1)} %`,
