@@ -5,7 +5,6 @@ import { batchMasses } from './batch-masses.ts';
 export interface MaterialUse {
   readonly code: string;
   readonly name: string;
-  readonly approved: boolean;
   /** Percent of the fats that the alkali is reckoned on. */
   readonly percentOfFats: number;
   /** All of it joins after the cook. */
@@ -26,7 +25,7 @@ export function materialIds({ document }: ComputedFormula): ReadonlySet<string> 
 export function usesOfMaterial(id: string, { formulas }: Formulary): readonly MaterialUse[] {
   return formulas
     .filter((computed) => materialIds(computed).has(id))
-    .map(({ formula, document }) => {
+    .map(({ document }) => {
       const { fats, afterCookFats, additives, liquids, alkali } = document;
       const whole = fats.reduce((sum, { mass }) => sum + mass, 0);
       const mass =
@@ -39,7 +38,6 @@ export function usesOfMaterial(id: string, { formulas }: Formulary): readonly Ma
       return {
         code: document.code,
         name: document.name,
-        approved: formula.approval !== null,
         percentOfFats: (100 * mass) / whole,
         afterCook:
           afterCookFats.some((line) => line.id === id) && !fats.some((line) => line.id === id),
@@ -51,13 +49,9 @@ export function usesOfMaterial(id: string, { formulas }: Formulary): readonly Ma
     });
 }
 
-/** The formulas that can still be made when a material has run out, by code; the approved ones are marked. */
+/** The formulas that can still be made when a material has run out, by code. */
 export function makeableWithout(id: string, { formulas }: Formulary) {
   return formulas
     .filter((computed) => !materialIds(computed).has(id))
-    .map(({ formula, document: { code, name } }) => ({
-      code,
-      name,
-      approved: formula.approval !== null,
-    }));
+    .map(({ document: { code, name } }) => ({ code, name }));
 }

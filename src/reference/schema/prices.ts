@@ -1,10 +1,22 @@
 import { z } from 'zod';
 import { date } from './date.ts';
+import { broken } from './value.ts';
+
+const currency = z.string().superRefine((code, context) => {
+  if (/^[A-Z]{3}$/.test(code)) return;
+  context.addIssue(
+    broken({
+      rule: 'data/text-form',
+      found: `the currency "${code}"`,
+      expected: 'its code of three capital letters by ISO 4217, such as EUR',
+      advice: 'write the code',
+    }),
+  );
+});
 
 /** `data/prices.yaml`: what the shop pays, per kilogram as bought. */
 export const pricesSchema = z.strictObject({
-  // ISO 4217
-  currency: z.string().regex(/^[A-Z]{3}$/),
+  currency,
   prices: z.array(
     z.strictObject({
       material: z.string(),
