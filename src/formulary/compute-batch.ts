@@ -44,9 +44,10 @@ export function computeBatch(
     afterCookFats: rounded.afterCookFats.map(({ fat, mass }, i) =>
       line(fat.id, mass, steps.afterCookFats[i]),
     ),
-    alkali: rounded.alkali.map(({ supply, weighedMass }, i) =>
-      line(supply.id, weighedMass, steps.alkali[i]),
-    ),
+    alkali: rounded.alkali.map(({ supply, weighedMass }, i) => ({
+      ...line(supply.id, weighedMass, steps.alkali[i]),
+      ...(supply.form === 'solution' && { solution: supply.assay.value * 100 }),
+    })),
     weighedWater: rounded.water,
     waterStep: steps.water,
     weighedHeldBack: rounded.heldBack,

@@ -37,7 +37,7 @@ const batch = z
     digest: z.string().nullable(),
     fats: list(weighedLine),
     afterCookFats: list(weighedLine),
-    alkali: list(weighedLine),
+    alkali: list(z.strictObject({ ...weighed, solution: number.exactOptional() }).readonly()),
     weighedWater: number.nullable(),
     waterStep: number,
     weighedHeldBack: number.nullable(),

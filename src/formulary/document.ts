@@ -179,7 +179,8 @@ export interface BatchDocument {
   /** g between two marks of the scale, per line below as `step`. A blend is one line, under its own id. */
   readonly fats: readonly WeighedLine[];
   readonly afterCookFats: readonly WeighedLine[];
-  readonly alkali: readonly WeighedLine[];
+  /** Of a stock lye `solution` is its percent of hydroxide: the weight is of the solution. */
+  readonly alkali: readonly (WeighedLine & { readonly solution?: number })[];
   readonly weighedWater: number | null;
   readonly waterStep: number;
   /** Part of `weighedWater`; weighed on its own, so with a step of its own. */

@@ -29,7 +29,7 @@ export function amountText(
         label,
       );
     case 'alkali':
-      return lineText([weights.alkali], `${label}-hydroxide`);
+      return alkaliText(weights, `${label}-hydroxide`);
     case 'water':
       return massText(
         (weights.weighedWater ?? 0) - (weights.weighedHeldBack ?? 0),
@@ -44,13 +44,21 @@ export function amountText(
   }
 }
 
+/** A sentence that goes on "of sodium hydroxide" must not make anybody weigh a solution's mass of solid. */
+function alkaliText({ alkali }: BatchDocument, id: string): string | null {
+  const line = alkali.find((each) => each.id === id);
+  if (!line) return null;
+  const mass = massText(line.weighedMass, line.step);
+  return line.solution === undefined ? mass : words.formulaPage.stockAmount(mass, line.solution);
+}
+
 function lineText(lists: readonly (readonly WeighedLine[])[], id: string): string | null {
   const line = lists.flat().find((each) => each.id === id);
   return line ? massText(line.weighedMass, line.step) : null;
 }
 
 /** Everything in the lye pot, to the finest step used there. */
-function lyeMass(batch: BatchDocument): [number, number] {
+export function lyeMass(batch: BatchDocument): [number, number] {
   const lines = [
     ...batch.alkali,
     ...[...batch.liquids, ...batch.additives].filter(({ at }) => at === 'lye'),

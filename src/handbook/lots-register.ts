@@ -67,7 +67,7 @@ function fatValues(lot: FatLot, kind: 'glyceride' | 'free-acid' | 'wax' = 'glyce
       ? [
           {
             text: text.value(name, measured.value, measured.uncertainty),
-            how: `${measured.method}; ${measured === deciding ? text.decides : otherwise}`,
+            how: roleOf(measured.method, lot, measured === deciding ? text.decides : otherwise),
           },
         ]
       : [];
@@ -77,12 +77,17 @@ function fatValues(lot: FatLot, kind: 'glyceride' | 'free-acid' | 'wax' = 'glyce
   ];
 }
 
-function alkaliValues({ form, assay, uncertainty, carbonate }: AlkaliLot) {
+function alkaliValues(lot: AlkaliLot) {
+  const { form, assay, uncertainty, carbonate } = lot;
   const text = words.lotsPage;
   return [
     {
       text: text.assay(form, assay, uncertainty),
-      how: `${text.carbonate(plain(carbonate, 2))}; ${text.decides}`,
+      how: roleOf(text.carbonate(plain(carbonate, 2)), lot, text.decides),
     },
   ];
 }
+
+/** A lot that is not released does nothing to any weight, so nothing is said of what it does. */
+const roleOf = (what: string, { status }: FatLot | AlkaliLot, role: string) =>
+  status === 'released' ? `${what}; ${role}` : what;

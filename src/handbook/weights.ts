@@ -65,7 +65,9 @@ export function weightsTable(
     put('lye', water, batch.weighedWater - heldBack, batch.waterStep);
   }
   for (const { id, weighedMass, step } of batch.fats) {
-    const lot = lotsOf(document.fats.filter(({ id: fat, blend = fat }) => blend === id));
+    const lot = reference.blends.has(id)
+      ? blendLots(document, id, reference)
+      : (document.fats.find((fat) => fat.id === id)?.saponificationValue.lot ?? null);
     put('fats', { id, name: nameOf(reference, id), lot }, weighedMass, step);
   }
   if (heldBack > 0) {
@@ -110,8 +112,11 @@ export function alkaliName(
   return stock ? words.formulaPage.stock(name, stock.assay.value) : name;
 }
 
-function lotsOf(fats: FormulaDocument['fats']): string | null {
-  const lots = fats.flatMap(({ saponificationValue: { lot } }) => lot ?? []);
+/** The lots of a blend's parts, each with its fat, for the tub has a number of its own. */
+function blendLots({ fats }: FormulaDocument, id: string, reference: Reference): string | null {
+  const lots = fats.flatMap(({ id: fat, blend, saponificationValue: { lot } }) =>
+    blend === id && lot ? [words.formulaPage.lotOf(lot, nameOf(reference, fat))] : [],
+  );
   return lots.length === 0 ? null : lots.join(', ');
 }
 

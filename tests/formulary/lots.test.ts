@@ -4,6 +4,7 @@ import { join } from 'node:path';
 import { afterAll, describe, expect, test } from 'vitest';
 import { documentSchema } from '../../src/formulary/document-schema.ts';
 import { loadFormulary } from '../../src/formulary/load.ts';
+import { amountText } from '../../src/handbook/amounts.ts';
 import { lyeCsv } from '../../src/handbook/lye-csv.ts';
 import { lyeTable } from '../../src/handbook/lye-table.ts';
 import { weightsTable } from '../../src/handbook/weights.ts';
@@ -226,14 +227,18 @@ describe('stock lye of 50 %', () => {
     if (!batch) throw new Error('the shop has a size');
     const { groups, notes } = weightsTable(document, batch, formulary.reference);
     const [alkali, water] = groups[0]?.lines ?? [];
-    expect(alkali).toMatchObject({ name: 'Sodium hydroxide, solution of 50 %', lot: 'N-5' });
+    expect(alkali).toMatchObject({ name: 'Sodium hydroxide, solution of 50\u00a0%', lot: 'N-5' });
     expect(water?.name).toBe('Water, besides the solution');
     expect(notes.join()).toMatch(/no solid.*counts the hydroxide dissolved/);
+    expect(documentSchema.safeParse(document).success).toBe(true);
+    expect(amountText('alkali', 'sodium', computed.formula, batch)).toBe(
+      `${alkali?.text}\u00a0g (weighed as a solution of 50\u00a0%, not as a solid)`,
+    );
   });
 
   test('the lye table and its CSV cannot be taken for solid alkali', () => {
     const table = lyeTable(formulary, 'pilot');
-    expect(table.alkalis[0]?.name).toBe('Sodium hydroxide, solution of 50 %');
+    expect(table.alkalis[0]?.name).toBe('Sodium hydroxide, solution of 50\u00a0%');
     expect(table.notes).toHaveLength(1);
     expect(lyeCsv(formulary, 'pilot')).toContain(',sodium-hydroxide-solution,');
   });
@@ -284,7 +289,7 @@ describe('a blend', () => {
     const lines = groups.find(({ name }) => name === 'fats')?.lines ?? [];
     expect(lines.map(({ name, lot }) => [name, lot])).toEqual([
       ['Olive oil', 'O-1'],
-      ['Ready base', 'O-1'],
+      ['Ready base', 'O-1 of Olive oil'],
     ]);
     expect(notes.join()).toContain('60 % Coconut oil, 40 % Olive oil');
   });

@@ -51,12 +51,15 @@ export const formulaPage = {
     refusedTitle: 'No weights at this size',
     refusedAdvice: 'Do not scale another size by hand. Ask the formulator.',
   },
-  stock: (name: string, percent: number) => `${name}, solution of ${plain(percent, 1)} %`,
+  stock: (name: string, percent: number) => `${name}, solution of ${plain(percent, 1)}\u00a0%`,
+  stockAmount: (mass: string, percent: number) =>
+    `${mass} (weighed as a solution of ${plain(percent, 1)}\u00a0%, not as a solid)`,
   stockNote: (name: string) =>
     `${name} comes as a solution: weigh the solution as it stands, no solid. Its own water is counted, and only what is missing is added. The lye concentration counts the hydroxide dissolved in it.`,
   blendNote: (name: string, parts: readonly { readonly name: string; readonly share: number }[]) =>
     `${name} stands ready mixed: ${parts.map((part) => `${plain(part.share, 2)} % ${part.name}`).join(', ')}. Its parts are not weighed again.`,
   lot: (lot: string) => `lot ${lot}`,
+  lotOf: (lot: string, name: string) => `${lot} of ${name}`,
   noLot: 'no lot released: reckoned on the trade range',
   methodAmounts: (label: string) =>
     `The amounts in the text are those of the size “${label}”. For another size take its own block above.`,

@@ -30,7 +30,7 @@ export const lotsPage = {
   assay: (form: 'solid' | 'solution', percent: number, uncertainty: number) =>
     `${form === 'solution' ? 'Solution' : 'Solid'}, hydroxide ${plain(percent, 2)} ± ${plain(uncertainty, 2)} %`,
   carbonate: (percent: string) => `carbonate ${percent} %`,
-  decides: 'decides once released',
+  decides: 'decides the weights',
   freeAcid: 'shown only: the saponification value counts free acids already',
   besideAcid: 'shown only: of a free acid the acid value decides',
   ofWax: 'counts in the lower end of the margin in cold process',
