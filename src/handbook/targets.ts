@@ -3,6 +3,7 @@ import { words } from '../words/catalogue.ts';
 import { plain, range } from '../words/numbers.ts';
 
 export interface TargetRow {
+  readonly id: string;
   readonly name: string;
   readonly value: string;
 }
@@ -17,6 +18,7 @@ export function targetText({ min, max, unit }: Formula['targets'][string]): stri
 export function targetRows({ targets }: Formula): readonly TargetRow[] {
   const { names } = words.formulaPage.targets;
   return Object.entries(targets).map(([id, target]) => ({
+    id,
     name: names[id] ?? id,
     value: targetText(target),
   }));
@@ -28,11 +30,11 @@ export function releaseRows({ release }: Formula): readonly TargetRow[] {
   const rows: TargetRow[] = [];
   if (release.freeAlkali !== null) {
     const value = `${plain(release.freeAlkali)} ${text.freeAlkaliUnit}`;
-    rows.push({ name: text.freeAlkali, value });
+    rows.push({ id: 'free-alkali', name: text.freeAlkali, value });
   }
-  if (release.ph) rows.push({ name: text.ph, value: range(...release.ph, 1) });
+  if (release.ph) rows.push({ id: 'ph', name: text.ph, value: range(...release.ph, 1) });
   if (release.moisture !== null) {
-    rows.push({ name: text.moisture, value: `${plain(release.moisture)} %` });
+    rows.push({ id: 'moisture', name: text.moisture, value: `${plain(release.moisture)} %` });
   }
   return rows;
 }
