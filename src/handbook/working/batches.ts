@@ -1,4 +1,4 @@
-import { fatWeighings } from '../../chemistry/blend.ts';
+import { type FatWeighing, fatWeighings } from '../../chemistry/blend.ts';
 import { isBeforeSaponification } from '../../chemistry/saponification.ts';
 import { AS_USED, equivalentsOf, superfatFrom } from '../../chemistry/superfat.ts';
 import { weighBatch } from '../../formulary/compute-batch.ts';
@@ -41,6 +41,27 @@ export function batches(working: Working): readonly Section[] {
         unit: 'g',
       });
     const onScales = fatWeighings(rounded.fats);
+    /** What each part of a blend is of the weight of the blend; nothing for a fat by itself. */
+    const partsOf = (weighing: FatWeighing, onScale: number) =>
+      weighing.lines.length < 2
+        ? []
+        : weighing.lines.flatMap((index) => {
+            const line = charge.fats[index];
+            if (!line) return [];
+            return step({
+              kind: 'part-of-blend',
+              of: `${id}-${weighing.id}-${line.fat.id}`,
+              subject: named(working, line.fat.id),
+              symbol: symbol('m'),
+              numbers: product(
+                exact(onScale),
+                fractionOf(figure(line.mass, 8), figure(weighing.mass, 8)),
+              ),
+              value: rounded.fats[index]?.mass ?? Number.NaN,
+              digits: 9,
+              unit: 'g',
+            });
+          });
     const koh = reference.constants.hydroxide.K;
     const amounts = equivalentsOf(rounded, AS_USED, reference.constants);
     const saponified = [
@@ -79,6 +100,7 @@ export function batches(working: Working): readonly Section[] {
       ...fatWeighings(charge.fats).flatMap((weighing, i) => [
         scaled('exact-weight', weighing.id, named(working, weighing.id), weighing.mass),
         onScale(weighing.id, onScales[i]?.mass, steps.fats[weighing.lines[0] ?? 0]),
+        ...partsOf(weighing, onScales[i]?.mass ?? Number.NaN),
       ]),
       ...charge.alkali.flatMap(({ supply, weighedMass }, i) => [
         scaled('exact-weight', supply.id, named(working, supply.id), weighedMass),

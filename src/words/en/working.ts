@@ -88,6 +88,7 @@ export const workingWords = {
     'fats-of-batch': () => 'Fats for this size',
     'exact-weight': (of: string) => `${of}, before rounding`,
     'on-the-scale': (of: string) => `${of}, on the scale`,
+    'part-of-blend': (of: string) => `Of it ${of}`,
     'batch-equivalents': () => 'Equivalents of the rounded weights',
     'batch-acid': () => 'Acid of the rounded weights',
     'batch-hydroxide': () => 'Hydroxide of the rounded weights',
