@@ -1,6 +1,6 @@
 import type { Limit } from '../search/finder/limits.ts';
 import { findWords } from '../words/en/find.ts';
-import { element, inputs } from './find-dom.ts';
+import { element } from './find-dom.ts';
 import { limitText } from './find-text.ts';
 
 /** The limits in force, each with what dropping it would leave. Their buttons carry the limit's place. */
@@ -16,14 +16,4 @@ export function limitList(
   });
   const lead = rows === 0 ? findWords.nothing : findWords.inForce;
   return [element('p', { class: 'label' }, lead), element('ul', {}, ...items)];
-}
-
-/** Marks the folded parts of the form in which something is asked. */
-export function markAsked(form: HTMLElement): void {
-  for (const details of form.querySelectorAll('details')) {
-    const asked =
-      inputs(details, 'end').some(({ value }) => value !== '') ||
-      inputs(details, 'mode').some(({ checked }) => checked);
-    details.toggleAttribute('data-asked', asked);
-  }
 }

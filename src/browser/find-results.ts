@@ -74,10 +74,11 @@ async function drawPages(
   const mine = ++turn;
   part('find-pages').hidden = !found;
   if (!found) return;
-  const { search, hits, rowOf } = found;
+  const { words, search, hits, rowOf } = found;
   const kept = onlyRows ? hits.filter(({ page }) => onlyRows.has(rowOf.get(page) ?? -1)) : hits;
   const { list, left } = await pageList(search, kept, shown);
   if (mine !== turn) return;
+  list.dataset.words = words;
   const note = kept.length === 0 ? findWords.noPages : onlyRows ? findWords.outsideLimits : '';
   part('find-pages-list').replaceChildren(
     element('p', { class: 'label' }, note),

@@ -4,6 +4,7 @@ import {
   countsOn,
   marksPath,
   placeOn,
+  placesOn,
   type Span,
   STRIP_HEIGHT,
   STRIP_WIDTH,
@@ -38,8 +39,9 @@ function strip(
   all: Iterable<number>,
   change: (change: (state: FinderState) => FinderState) => void,
 ): DrawStrips {
-  const allCounts = countsOn(property, span, all);
-  const tallest = Math.max(...allCounts.values());
+  const places = placesOn(property, span);
+  const allCounts = countsOn(places, all);
+  const tallest = Math.max(...allCounts);
   const band = drawing('rect', { class: 'strip-range', y: '0', height: `${STRIP_HEIGHT}` });
   const found = drawing('path', { class: 'strip-found' });
   const picture = drawing(
@@ -64,7 +66,7 @@ function strip(
   );
   return (state, rows) => {
     if (place.closest('details')?.open === false) return;
-    found.setAttribute('d', marksPath(countsOn(property, span, rows), tallest));
+    found.setAttribute('d', marksPath(countsOn(places, rows), tallest));
     const range = state.ranges[property.id];
     const [left, right] = range ? ends(range, span) : [0, 0];
     band.setAttribute('x', `${left}`);

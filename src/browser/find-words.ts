@@ -4,6 +4,7 @@ import { openHandbookSearch } from './find-chunks.ts';
 
 /** What the words found: pages, and among them rows of the finder, best first. */
 export interface WordsFound {
+  readonly words: string;
   readonly search: Search;
   readonly hits: readonly Hit[];
   readonly rows: readonly number[];
@@ -25,6 +26,6 @@ export function wordSearch(language: string): (words: string) => Promise<WordsFo
     if (!hits) return null;
     const rowOf = new Map(entry.rows.map((page, row) => [page, row]));
     const rows = hits.flatMap(({ page }) => rowOf.get(page) ?? []);
-    return { search, hits, rows, rowOf };
+    return { words, search, hits, rows, rowOf };
   };
 }

@@ -5,8 +5,7 @@ import { LONGEST_QUERY } from '../search/reader/query.ts';
 import { findWords } from '../words/en/find.ts';
 import { shownColumns, withColumn } from './find-columns.ts';
 import { part } from './find-dom.ts';
-import { fillFields, readFields } from './find-fields.ts';
-import { markAsked } from './find-limits.ts';
+import { fieldsOf, fillFields, readFields } from './find-fields.ts';
 import { say, sayBroken } from './find-notes.ts';
 import { drawResults, type Results, type Shown } from './find-results.ts';
 import { strips } from './find-strips.ts';
@@ -27,6 +26,7 @@ else say('find-broken', findWords.searchBroken('search/finder.js'));
 
 function start(data: FinderData): void {
   const form = part('find-form');
+  const fields = fieldsOf(form, data);
   const look = wordSearch(document.documentElement.lang);
   const drawStrips = strips(data, form, (change) => become(change(state)));
   let state: FinderState = NOTHING_ASKED;
@@ -41,16 +41,23 @@ function start(data: FinderData): void {
     state = next;
     shown = FIRST;
     keepAddress();
+    if (wordsChanged) {
+      clearTimeout(pause);
+      // a search that has not ended yet is for other words
+      turn++;
+      if (state.words.trim() !== '') {
+        pause = setTimeout(lookForWords, PAUSE);
+        return;
+      }
+      found = null;
+      say('find-words-note', '');
+    }
     draw();
-    if (!wordsChanged) return;
-    clearTimeout(pause);
-    pause = setTimeout(lookForWords, PAUSE);
   }
 
   function draw(): void {
     const columns = shownColumns(data, state);
-    fillFields(form, data, state, new Set(columns.map(({ id }) => id)));
-    markAsked(form);
+    fillFields(fields, state, new Set(columns.map(({ id }) => id)));
     results = drawResults(data, state, found, shown);
     drawStrips(state, results.rows);
   }
@@ -63,6 +70,7 @@ function start(data: FinderData): void {
       const answered = empty ? null : await look(words);
       if (mine !== turn) return;
       found = answered;
+      say('find-broken', '');
       const tooLong = words.length > LONGEST_QUERY ? findWords.wordsCut(LONGEST_QUERY) : '';
       say('find-words-note', !found && !empty ? findWords.noWord : tooLong);
     } catch (error) {
@@ -98,7 +106,7 @@ function start(data: FinderData): void {
   form.addEventListener('input', ({ target }) => {
     const { dataset, checked } = target as HTMLInputElement;
     if (dataset.column) become(withColumn(data, state, dataset.column, checked));
-    else become(readFields(form, data, state));
+    else become(readFields(fields, state));
   });
   // strips in a folded part are not drawn until it opens
   form.addEventListener('toggle', () => drawStrips(state, results.rows), true);

@@ -6,6 +6,7 @@ import {
   countsOn,
   marksPath,
   placeOn,
+  placesOn,
   STRIP_WIDTH,
   spanOf,
   valueAt,
@@ -81,8 +82,8 @@ describe('strips', () => {
   test('every row with a number is counted, one mark per step', () => {
     const values = [5, 5, null, 18, 1];
     const span = spanOf(property(values)) ?? { low: 0, high: 0 };
-    const counts = countsOn(property(values), span, values.keys());
-    expect([...counts.values()].reduce((sum, count) => sum + count, 0)).toBe(4);
+    const counts = countsOn(placesOn(property(values), span), values.keys());
+    expect([...counts].reduce((sum, count) => sum + count, 0)).toBe(4);
     expect(marksPath(counts, 2).match(/M/g)).toHaveLength(3);
   });
 

@@ -34,29 +34,28 @@ export function valueAt(span: Span, place: number, decimals: number): number {
   return Number(value.toFixed(decimals));
 }
 
+/** Where each row stands on the strip; -1 where it has no number. */
+export const placesOn = ({ values }: Property, span: Span): Int16Array =>
+  Int16Array.from(values, (value) => (value === null ? -1 : placeOn(span, value)));
+
 /** How many rows stand at each step of the strip. */
-export function countsOn(
-  { values }: Property,
-  span: Span,
-  rows: Iterable<number>,
-): ReadonlyMap<number, number> {
-  const counts = new Map<number, number>();
+export function countsOn(places: Int16Array, rows: Iterable<number>): Uint32Array {
+  const counts = new Uint32Array(STRIP_WIDTH + 1);
   for (const row of rows) {
-    const value = values[row] ?? null;
-    if (value === null) continue;
-    const place = placeOn(span, value);
-    counts.set(place, (counts.get(place) ?? 0) + 1);
+    const place = places[row] ?? -1;
+    if (place >= 0) counts[place] = (counts[place] ?? 0) + 1;
   }
   return counts;
 }
 
 /** SVG path of one upright mark per step; a mark grows with the root of the rows it stands for, up to `tallest`. */
-export function marksPath(counts: ReadonlyMap<number, number>, tallest: number): string {
-  const parts: string[] = [];
-  for (const [place, count] of [...counts].sort(([a], [b]) => a - b)) {
+export function marksPath(counts: Uint32Array, tallest: number): string {
+  let path = '';
+  for (const [place, count] of counts.entries()) {
+    if (count === 0) continue;
     const share = tallest > 1 ? (Math.sqrt(count) - 1) / (Math.sqrt(tallest) - 1) : 0;
-    const height = Math.round(STRIP_HEIGHT * (0.45 + 0.55 * Math.min(1, Math.max(0, share))));
-    parts.push(`M${place} ${STRIP_HEIGHT}v-${height}`);
+    const height = Math.round(STRIP_HEIGHT * (0.45 + 0.55 * Math.min(1, share)));
+    path += `M${place} ${STRIP_HEIGHT}v-${height}`;
   }
-  return parts.join('');
+  return path;
 }
