@@ -1,5 +1,5 @@
 import { shopping as text } from '../words/en/shopping.ts';
-import { element, inputs, part } from './find-dom.ts';
+import { element, part } from './find-dom.ts';
 import {
   type Counts,
   costOf,
@@ -20,7 +20,7 @@ else part('shopping-off').textContent = text.broken;
 
 function start(data: ShoppingData): void {
   const form = part('shopping-form');
-  const fields = inputs(form, 'batch');
+  const fields = [...form.querySelectorAll<HTMLInputElement>('input[data-batch]')];
   const placeOf = (field: HTMLInputElement) => Number(field.dataset.batch);
 
   const counts = (): Counts =>
@@ -95,7 +95,7 @@ function list(data: ShoppingData, counts: Counts): readonly Node[] {
           'tr',
           {},
           head(text.material),
-          head('kg', 'n'),
+          head(text.weight, 'n'),
           head(text.stock),
           head(text.order),
           total && head(text.cost, 'n'),

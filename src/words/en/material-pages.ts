@@ -4,6 +4,7 @@ type Named = Readonly<Record<string, string>>;
 
 export const materialPages = {
   title: 'Materials',
+  about: 'Alkalis, additives and liquids; allergens and a making order',
   lead: 'What goes in beside fats and water. Every fat has its own page among the fats.',
   fats: 'All fats',
   shopping: 'Shopping list',

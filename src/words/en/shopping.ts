@@ -2,6 +2,7 @@ import { fixed, kilograms } from '../numbers.ts';
 
 export const shopping = {
   title: 'Shopping list',
+  about: 'What chosen batches take together',
   lead: 'Choose how many of which batch; the list adds up what they take. Print it with the browser.',
   needsScripts:
     'Adding up needs scripts, which are off here. The tables below give what each batch takes.',
@@ -20,6 +21,7 @@ export const shopping = {
   stock: 'In stock',
   order: 'To order',
   material: 'Material',
+  weight: 'Weight',
   water: 'Water',
   kilograms: (grams: number) => `${kilograms(grams)} kg`,
   perBatch: 'What each batch takes',
