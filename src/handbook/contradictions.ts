@@ -1,15 +1,14 @@
-import { placeInOrder } from '../reference/choice.ts';
 import type {
   CompositionRecord,
   FatRecord,
   Reference,
-  Source,
   ValueRecord,
 } from '../reference/reference.ts';
 import { words } from '../words/catalogue.ts';
 import { plain } from '../words/numbers.ts';
 import { recordText } from './fat-sheet.ts';
 import { sourceName } from './names.ts';
+import { whyCompositionUsed, whyValueUsed } from './why-used.ts';
 
 export const MEASURES = ['saponification-value', 'iodine-value', 'density', 'composition'] as const;
 export type Measure = (typeof MEASURES)[number];
@@ -69,7 +68,7 @@ export function contradictionsOf(fat: FatRecord, reference: Reference): readonly
           why:
             record === chosen.loweredBy && measure === 'saponification-value'
               ? words.contradictionsPage.lowers
-              : whyOf(record, used, sources),
+              : whyValueUsed(record, used, sources),
         })),
       },
     ];
@@ -98,10 +97,7 @@ function compositionContradictions(fat: FatRecord, reference: Reference): Contra
           text: row.min === row.max ? plain(row.min) : `${plain(row.min)} to ${plain(row.max)}`,
           used: row === usedRow,
           apart: usedRow ? gap(row, usedRow) : null,
-          why:
-            row === usedRow
-              ? words.contradictionsPage.used
-              : whyNotFirst(row.composition, used, reference.sources),
+          why: whyCompositionUsed(row.composition, used, reference.sources),
         })),
       },
     ];
@@ -160,45 +156,4 @@ function withTemperature(record: ValueRecord): string {
   return record.temperature === null
     ? text
     : `${text} ${words.fatPages.atTemperature(record.temperature)}`;
-}
-
-type Sources = ReadonlyMap<string, Source>;
-
-/** Why a value is used or is not: the first reason that the order of choice gives. */
-function whyOf(record: ValueRecord, used: ValueRecord | null, sources: Sources): string {
-  const { used: isUsed, noneUsed, why } = words.contradictionsPage;
-  if (record === used) return isUsed;
-  if (used === null) return noneUsed;
-  if (placeInOrder(record, sources) > placeInOrder(used, sources)) {
-    return whyLater(record, used, sources);
-  }
-  if (record.samples !== null) return why.samples(record.samples);
-  if (record.value !== null) return why.single;
-  if (record.min === null || record.max === null) return why.open;
-  return why.file;
-}
-
-function whyNotFirst(
-  record: CompositionRecord,
-  used: CompositionRecord | null,
-  sources: Sources,
-): string {
-  const { noneUsed, why } = words.contradictionsPage;
-  if (used === null) return noneUsed;
-  return placeInOrder(record, sources) > placeInOrder(used, sources)
-    ? whyLater(record, used, sources)
-    : why.file;
-}
-
-function whyLater(
-  record: ValueRecord | CompositionRecord,
-  used: ValueRecord | CompositionRecord,
-  sources: Sources,
-): string {
-  const { kinds, why } = words.contradictionsPage;
-  const kindOf = (each: ValueRecord | CompositionRecord) => sources.get(each.source)?.kind;
-  const [usedKind, otherKind] = [kindOf(used), kindOf(record)];
-  return usedKind && otherKind && usedKind !== otherKind
-    ? why.kind(kinds[usedKind], kinds[otherKind])
-    : why.memory;
 }
