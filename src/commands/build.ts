@@ -21,6 +21,9 @@ import { loadSite } from './load-site.ts';
 
 // the build must not tell anybody that it ran
 process.env.ASTRO_TELEMETRY_DISABLED = '1';
+// what is published never has what only the preview may have: these would reach the pages from the shell
+process.env.NODE_ENV = 'production';
+for (const name of ['DEV', 'PROD', 'MODE', 'SSR']) delete process.env[name];
 
 const PROJECT = fileURLToPath(new URL('../..', import.meta.url));
 

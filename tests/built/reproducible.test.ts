@@ -51,6 +51,7 @@ test('the same inputs give the same bytes in another folder, time zone and year'
     ['--import', clock, 'src/commands/run.js', 'build', '--drafts', '--as-of', asOf],
     {
       cwd: copy,
+      // the test runner's own DEV and NODE_ENV go along: they must not reach the pages
       env: { ...process.env, TZ: 'Pacific/Kiritimati' },
       stdio: ['ignore', 'ignore', 'pipe'],
     },
