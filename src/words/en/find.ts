@@ -90,7 +90,8 @@ export const findWords = {
   columns: { code: 'Code', name: 'Formula', acids: 'Acids' },
   acidsOf: (saturated: string, mono: string, poly: string) =>
     `saturated ${saturated} %, monounsaturated ${mono} %, polyunsaturated ${poly} %`,
-  acidsNote: 'Acids: dark, saturated; grey, monounsaturated; white, polyunsaturated.',
+  acidsNote:
+    'Acids: dark, saturated; grey, monounsaturated; white, polyunsaturated; what is left, hydroxylated.',
   noValue: '–',
   showAll: (n: number) => `Show all ${n}`,
   pages: 'Pages with these words',
