@@ -29,15 +29,16 @@ const basicMethods = [
   {
     id: 'equivalents',
     title: 'Saponifiable equivalents',
-    text: 'A saponification value says how much potassium hydroxide one gram of a fat takes up. Divided by the molar mass of potassium hydroxide it is an amount of hydroxide, whichever alkali is used. The value is a lot’s measured one where the shop has it; otherwise it comes from the first source in the declared order, as the lower of the middle of its range and any documented mean of measured samples.',
+    text: 'A saponification value says how much potassium hydroxide one gram of a fat takes up. Divided by the molar mass of potassium hydroxide it is an amount of hydroxide, whichever alkali is used. The value is a lot’s measured one where the shop has it; otherwise it comes from the first source in the declared order, as the lower of the middle of its range and any documented mean of measured samples. Free acidity measured on a lot adds nothing, because a saponification value counts the free acids already; of a free acid the acid value is the saponification value. A blend that stands ready counts as its parts.',
     symbols: [
       ['S_i', 'saponification value of fat i', 'mg KOH/g'],
       ['m_i', 'mass of fat i', 'g'],
       ['e_i', 'equivalents per gram of fat i', 'mol/g'],
       ['E', 'equivalents of all fats, with the fat in liquids', 'mol'],
     ],
-    range: 'Fats with a saponification value and its range in the reference data or on a lot.',
-    ignores: 'After-cook fats, which are not counted in the alkali.',
+    range: 'Fats with a saponification value and its range in the reference data.',
+    ignores:
+      'After-cook fats, which are not counted in the alkali. What a blend’s own mixing errs by; that free acids of a glyceride give no glycerol.',
     source: 'Definition of the saponification value: ISO 3657 (formula from memory).',
   },
   {
