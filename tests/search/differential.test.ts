@@ -8,7 +8,7 @@ import { memorySearch } from './memory-search.ts';
 import { openStockClient, type StockClient } from './stock-client.ts';
 import { syntheticPages, syntheticQueries } from './synthetic-pages.ts';
 
-// SEARCH_PAGES and SEARCH_QUERIES make the long run; see DEVELOPERS.md
+// the long run: SEARCH_PAGES=2000 SEARCH_QUERIES=1000
 const PAGES = Number(process.env.SEARCH_PAGES ?? 200);
 const QUERIES = Number(process.env.SEARCH_QUERIES ?? 1200);
 let memory: Awaited<ReturnType<typeof memorySearch>>;

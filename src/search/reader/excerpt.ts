@@ -8,7 +8,7 @@ export interface Excerpt {
   readonly cutAfter: boolean;
 }
 
-export const EXCERPT_WORDS = 30;
+const EXCERPT_WORDS = 30;
 
 /** The words of a page's text, numbered as the index numbers them. */
 export const wordsOfText = (content: string): readonly string[] => content.split(/[^\S\uFEFF]+/g);

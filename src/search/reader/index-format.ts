@@ -5,8 +5,6 @@ export interface IndexContents {
   readonly pages: readonly IndexedPage[];
   readonly chunks: readonly WordChunk[];
   readonly filters: readonly { readonly filter: string; readonly hash: string }[];
-  /** Page numbers in ascending order of each sort key; pages without the key are absent. */
-  readonly sorts: ReadonlyMap<string, readonly number[]>;
   /** Names of the metadata fields; fields are numbered by their place here. */
   readonly fields: readonly string[];
 }
@@ -47,7 +45,7 @@ export interface Place {
 
 /** Reads a `pf_meta` payload. Throws a `RangeError` where it is not one. */
 export function readContents(payload: Uint8Array): IndexContents {
-  const [, pages, chunks, filters, sorts, fields] = listOf(decodeCbor(payload), 6);
+  const [, pages, chunks, filters, , fields] = listOf(decodeCbor(payload), 6);
   return {
     pages: listOf(pages).map((each) => {
       const [hash, words, group] = listOf(each, 3);
@@ -61,12 +59,6 @@ export function readContents(payload: Uint8Array): IndexContents {
       const [filter, hash] = listOf(each, 2);
       return { filter: textOf(filter), hash: textOf(hash) };
     }),
-    sorts: new Map(
-      listOf(sorts).map((each) => {
-        const [name, numbers] = listOf(each, 2);
-        return [textOf(name), listOf(numbers).map(countOf)];
-      }),
-    ),
     fields: listOf(fields).map(textOf),
   };
 }

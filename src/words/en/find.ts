@@ -57,7 +57,6 @@ export const findWords = {
     'The beginning of a word is enough. Words in “quotes” must follow one another. Formulas, fats, safety and methods are searched.',
   wordsCut: (most: number) => `Only the first ${most} letters are looked at.`,
   noWord: 'There is no word in this.',
-  searching: 'Looking …',
   limits: 'Limits',
   limitsLead:
     'Each mark on a strip is a formula; the dark ones are those found. Type the ends, step them with the arrow keys, or drag over the strip. A value is compared as it is shown.',
