@@ -36,7 +36,7 @@ export const SCALES: readonly CardScale[] = [
 ];
 
 /** Of a card that takes several sides. */
-export const SIDES_SCALE: CardScale = { text: 0.9, cautions: 3 };
+export const SIDES_SCALE: CardScale = { text: 0.8, cautions: 3 };
 
 /** A side's parts between its head and its foot, in order; each is measured and stays whole. */
 export interface Block {

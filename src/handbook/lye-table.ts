@@ -1,4 +1,4 @@
-import type { BatchDocument } from '../formulary/document.ts';
+import type { BatchDocument, FormulaDocument } from '../formulary/document.ts';
 import type { Formulary } from '../formulary/formulary.ts';
 import { words } from '../words/catalogue.ts';
 import { decimalsOf, weight } from '../words/numbers.ts';
@@ -9,6 +9,7 @@ import { alkaliName } from './weights.ts';
 export interface LyeRow {
   readonly code: string;
   readonly name: string;
+  readonly kind: FormulaDocument['kind'];
   readonly revision: number;
   /** One text per alkali column, `null` where the formula does not use that alkali. */
   readonly alkali: readonly (string | null)[];
@@ -49,10 +50,11 @@ export function lyeTable({ reference, formulas }: Formulary, batchId: string): L
       return { id, name: user ? alkaliName(user.document, id, reference) : nameOf(reference, id) };
     });
   const rows = entries.map(({ document, batch }): LyeRow => {
-    const { code, name, revision } = document;
+    const { code, name, kind, revision } = document;
     return {
       code,
       name,
+      kind,
       revision,
       ...cellsOf(batch, alkalis, (id) => nameOf(reference, id)),
     };
@@ -80,11 +82,22 @@ export function lyeTable({ reference, formulas }: Formulary, batchId: string): L
   };
 }
 
+/** The rows of each kind under its heading, in the order of `KINDS`; kinds without a row are left out. */
+export function rowsByKind(
+  rows: readonly LyeRow[],
+): readonly { readonly kind: LyeRow['kind']; readonly rows: readonly LyeRow[] }[] {
+  return KINDS.map((kind) => ({ kind, rows: rows.filter((row) => row.kind === kind) })).filter(
+    (group) => group.rows.length > 0,
+  );
+}
+
+const KINDS: readonly LyeRow['kind'][] = ['bar', 'paste', 'liquid'];
+
 function cellsOf(
   batch: BatchDocument,
   alkalis: LyeTable['alkalis'],
   name: (id: string) => string,
-): Omit<LyeRow, 'code' | 'name' | 'revision'> {
+): Omit<LyeRow, 'code' | 'name' | 'kind' | 'revision'> {
   if (batch.refused) {
     const reason = words.breachText(batch.refused.rule, batch.refused.numbers);
     const alkali = alkalis.map(() => null);

@@ -54,6 +54,7 @@ test('the lye table has alkali, water and what else goes into the lye', () => {
     {
       code: 'TT-001',
       name: 'Test Bar',
+      kind: 'bar',
       revision: 2,
       alkali: ['139.7'],
       water: '300',

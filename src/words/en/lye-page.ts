@@ -13,4 +13,29 @@ export const lyePage = {
   none: '—',
   refused: 'No weights at this size:',
   csv: 'This table as CSV',
+  groups: { bar: 'Bars', paste: 'Pastes', liquid: 'Liquids' },
+  lots: {
+    title: 'What this table was reckoned for',
+    lead: 'Hold it against the bags and drums. With any other lot the weights do not hold.',
+    lot: (lot: string, until: string) => `lot ${lot}, retest by ${until}`,
+    without: (names: string) => `No lot, reckoned on the published range: ${names}.`,
+    until: (date: string | null) =>
+      date === null ? 'until a lot is released' : `not after ${date}`,
+    validity: (asOf: string, until: string) =>
+      `As of ${asOf}. Take it down after ${until}, or as soon as a lot, a formula or the edition changes.`,
+    noUntil: (asOf: string) =>
+      `As of ${asOf}. Take it down as soon as a lot is released or a formula or the edition changes.`,
+  },
+  fats: {
+    title: 'Alkali for 100\u00a0g of one fat',
+    link: 'Alkali for 100\u00a0g of each fat',
+    lead: 'What saponifies all of 100 g of the fat alone: no superfat, nothing to spare. A check on other figures, not a formula to make.',
+    rounding: 'Rounded down. The range says how far a fat without a lot can differ.',
+    waxes: 'Waxes (beeswax, jojoba) may react only in part, in cold process hardly at all.',
+    columns: { fat: 'Fat', value: 'Saponification value', range: 'Range', lot: 'Lot' },
+    unit: 'mg KOH per g',
+    alkali: (assay: string) => `as weighed at ${assay} %`,
+    solution: (assay: string) => `solution of ${assay} %, as weighed`,
+    noLot: '—',
+  },
 } as const;
