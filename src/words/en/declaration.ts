@@ -36,7 +36,7 @@ export const declaration = {
   noFragrance: 'Nothing in it is a fragrance by the data.',
   allergensNone: 'By the suppliers’ figures none is above the threshold.',
   allergensUnknown: (names: readonly string[]) =>
-    `No supplier’s figures in the data for: ${names.join(', ')}. Take the names from the supplier’s allergen declaration; without it the list is not complete.`,
+    `No supplier’s figures in the data for: ${names.join('; ')}. Take the names from the supplier’s allergen declaration; without it the list is not complete.`,
   netMassTitle: 'Net mass',
   netMass: (label: string, wet: number, released: number, moisture: number, ounces: number) =>
     `${label}: a bar poured at ${plain(wet)} g is reckoned at ${fixed(released, 1)} g (${fixed(ounces, 2)} oz) when dried to ${plain(moisture, 1)} % water. It goes on drying: declare no more than the lightest bar weighs on the day of sale.`,
@@ -52,9 +52,9 @@ export const declaration = {
     'palm-free': 'No ingredient is marked as from the oil palm.',
     'nut-free': 'No ingredient is marked as from tree nuts or peanut.',
   },
-  claimNo: (names: readonly string[]) => `Because of: ${names.join(', ')}.`,
+  claimNo: (names: readonly string[]) => `Because of: ${names.join('; ')}.`,
   claimOpen: (names: readonly string[]) =>
-    `The data do not know enough of: ${names.join(', ')}. Ask the supplier.`,
+    `The data do not know enough of: ${names.join('; ')}. Ask the supplier.`,
   shared: (names: readonly string[]) =>
-    `The shop’s equipment also meets: ${names.join(', ')}. That alone can rule the claim out.`,
+    `The shop’s equipment also meets: ${names.join('; ')}. That alone can rule the claim out.`,
 } as const;

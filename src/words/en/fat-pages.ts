@@ -29,7 +29,6 @@ export const fatPages = {
     compositions: 'Fatty acids, source by source',
     records: 'All published values',
     notes: 'Notes',
-    used: 'Where it is used',
   },
   notComputable:
     'No saponification value with a range is known for this fat. No alkali is given and no formula can use it.',
@@ -63,6 +62,5 @@ export const fatPages = {
     `In the order of choice by the kind of the source: ${order.join(', ')}. Within a kind, what was read stands before what is known from memory.`,
   notListed: '–',
   computedFrom: 'Shares used are the middles of the range, brought to 100 %.',
-  notUsed: 'No formula uses it.',
   asAfterCook: 'after the cook',
 } as const;

@@ -6,7 +6,7 @@ export const safetySections = [
     items: [
       'Sodium hydroxide (caustic soda) and potassium hydroxide (caustic potash) turn fat into soap. Skin and eyes are made of things that they dissolve just as well.',
       'Dissolved in water they are lye: clear, without smell, and hot. It looks like water. That is why it is labelled and never left out of sight.',
-      'Fresh soap is caustic until its free alkali has been measured.',
+      'Lye and fats mixed are the batter; it is caustic too. Fresh soap may still hold free alkali, which is alkali that has found no fat, and stays caustic until that has been measured.',
     ],
   },
   {
@@ -107,8 +107,8 @@ export const safetySections = [
       'Alkali in its original container, tightly closed, dry, locked, below eye height, in a plastic tray.',
       'Away from acids, from ammonium salts, from aluminium, zinc and tin, from food and from anything that burns.',
       'Nothing that can be drunk from ever holds lye. Left-over lye is not kept for another day.',
-      'Caked or damp alkali: do not weigh it. Its strength is unknown until it is titrated.',
-      'Stock lye at the temperature that its supplier states; it can crystallise when it is cold.',
+      'Caked or damp alkali: do not weigh it. Its strength is unknown until it has been measured again (titrated).',
+      'Stock lye, which comes dissolved, at the temperature that its supplier states; it can crystallise when it is cold.',
     ],
   },
   {

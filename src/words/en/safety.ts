@@ -19,6 +19,7 @@ export const safetyPage = {
   firstAidTitle: 'First aid',
   firstAidLead:
     'Lye goes on burning after it has stopped hurting. Rinse at once, shout for help, let somebody else telephone.',
+  tell: 'Say on the telephone: a corrosive alkali, sodium or potassium hydroxide; how strong, if you know; which part of the body; since when; where you are. Label and safety data sheet go with the injured person.',
   firstAid: [
     {
       route: 'In the eyes',
@@ -32,7 +33,7 @@ export const safetyPage = {
       code: 'P303+P361+P353',
       short: 'Brush off dry alkali, clothes off, water, twenty minutes.',
       practice:
-        'Brush off dry alkali first. Clothes, shoes and rings off under running water; cut a pullover rather than drag it over the face. Go on for twenty minutes at the very least. No cream, no oil. Skin that feels soapy is not rinsed yet. Redness that stays, a blister, the face, the hands or a large area: doctor.',
+        'Brush off dry alkali first. Clothes, shoes and rings off under running water; cut a pullover rather than drag it over the face. What sticks to the skin stays on it and is rinsed over. Go on for twenty minutes at the very least. No cream, no oil. Skin that feels soapy is not rinsed yet. Redness that stays, a blister, the face, the hands or a large area: doctor.',
     },
     {
       route: 'Swallowed',
