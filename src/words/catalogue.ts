@@ -1,5 +1,7 @@
 import { breachText } from './en/breaches.ts';
 import { cardWords } from './en/card.ts';
+import { changesPage } from './en/changes-page.ts';
+import { checkPage } from './en/check-page.ts';
 import { contentsPage } from './en/contents-page.ts';
 import { contradictionsPage } from './en/contradictions-page.ts';
 import { declaration } from './en/declaration.ts';
@@ -29,6 +31,8 @@ import { dilutionWords, yieldWords } from './en/yields.ts';
 
 /** Every word that a page shows. Pages take their text from here and nowhere else. */
 export const words = {
+  changesPage,
+  checkPage,
   breachText,
   cardWords,
   contentsPage,

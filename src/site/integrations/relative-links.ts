@@ -2,6 +2,7 @@ import { readdirSync, readFileSync, writeFileSync } from 'node:fs';
 import { join, posix, relative, sep } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import type { AstroIntegration } from 'astro';
+import { SEAL_FILES } from '../../edition/seal-fs.ts';
 import { rewriteLinks } from './rewrite-links.ts';
 
 /**
@@ -20,9 +21,11 @@ export function relativeLinks(): AstroIntegration {
             .filter((file) => /\.(html|css|svg)$/.test(file))
             .map((file) => [file, readFileSync(join(folder, file), 'utf8')]),
         );
+        // the seal is put on the finished folder
+        const there = new Set([...files, ...SEAL_FILES]);
         const dangling: string[] = [];
         for (const [file, text] of texts) {
-          const { rewritten, missing } = rewriteLinks(file, text, new Set(files), texts);
+          const { rewritten, missing } = rewriteLinks(file, text, there, texts);
           dangling.push(...missing.map((link) => `${file}: ${link}`));
           if (rewritten !== text) writeFileSync(join(folder, file), rewritten);
         }

@@ -1,6 +1,7 @@
 /** Words of the table of computed against published values. */
 export const evidencePage = {
   title: 'Evidence',
+  about: 'what the models give, beside what others have published',
   lead: 'What the models of this handbook give, beside what others have published. The tests run these very records before anything is built: a row that does not agree stops the build unless its reason stands here, and a reason that is no longer needed stops it too.',
   counts: (rows: number, sources: number, memory: number, known: number) =>
     `${rows} rows from ${sources} publications that were read; ${memory} more of the rows are known from memory only. ${known} do not agree, each with its reason.`,

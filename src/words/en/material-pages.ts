@@ -83,6 +83,7 @@ export const materialPages = {
   storage: {
     alkali:
       'Airtight, dry, in the original container, locked away from acids, metals and food. It draws water and carbon dioxide from the air: once it cakes, titrate it before use.',
+    fat: 'Cool, dark, closed, the container full. Oils rich in polyunsaturated acids first and in small amounts. What smells of paint, fish or nuts gone off is not weighed.',
     liquid:
       'Cold and closed; fresh ones are frozen in the portions of one batch. Use by the date on the pack.',
     acid: 'Dry and closed, away from the alkali.',

@@ -6,7 +6,7 @@ export const safetySections = [
     items: [
       'Sodium hydroxide (caustic soda) and potassium hydroxide (caustic potash) turn fat into soap. Skin and eyes are made of things that they dissolve just as well.',
       'Dissolved in water they are lye: clear, without smell, and hot. It looks like water. That is why it is labelled and never left out of sight.',
-      'Lye and fats mixed are the batter; it is caustic too. Fresh soap may still hold free alkali, which is alkali that has found no fat, and stays caustic until that has been measured.',
+      'Lye and fats mixed are the batter; it is caustic too. Fresh soap may still hold free alkali, which is alkali that has found no fat. Treat it as caustic until that has been measured.',
     ],
   },
   {
