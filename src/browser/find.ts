@@ -16,7 +16,7 @@ declare global {
   var handbookFinder: FinderData | undefined;
 }
 
-/** Between the last letter typed and the search. [ms] */
+/** Between the last letter typed and the search, and between the last change and the address. [ms] */
 const PAUSE = 120;
 const FIRST: Shown = { allRows: false, pages: 5 };
 const MORE_PAGES = 20;
@@ -35,6 +35,7 @@ function start(data: FinderData): void {
   let results: Results = { rows: [], dropped: [] };
   let turn = 0;
   let pause: ReturnType<typeof setTimeout> | undefined;
+  let writing: ReturnType<typeof setTimeout> | undefined;
 
   function become(next: FinderState): void {
     const wordsChanged = next.words !== state.words;
@@ -81,9 +82,12 @@ function start(data: FinderData): void {
     draw();
   }
 
+  // browsers refuse to change the address as often as a drag would
   function keepAddress(): void {
-    const address = writeAddress(state, data);
-    history.replaceState(null, '', address === '' ? location.pathname : `#${address}`);
+    clearTimeout(writing);
+    writing = setTimeout(() => {
+      history.replaceState(null, '', `#${writeAddress(state, data)}`);
+    }, PAUSE);
   }
 
   function readFromAddress(): void {
@@ -92,6 +96,7 @@ function start(data: FinderData): void {
       keepAddress();
       return;
     }
+    clearTimeout(writing);
     const read = readAddress(location.hash, data);
     state = read.state;
     shown = FIRST;

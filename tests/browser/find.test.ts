@@ -37,7 +37,11 @@ const counted = (page: Page, text: RegExp) =>
     (source) => new RegExp(source).test(document.getElementById('find-count')?.textContent ?? ''),
     text.source,
   );
-const hash = (page: Page) => page.evaluate(() => location.hash);
+/** The address is written a moment after the last change. */
+const hash = async (page: Page) => {
+  await page.waitForTimeout(400);
+  return page.evaluate(() => location.hash);
+};
 
 describe.each(['under a sub-path', 'opened as a file'])('the finder %s', (where) => {
   test('finds words, marks them, and leads to the page', async () => {
