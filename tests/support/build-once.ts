@@ -19,7 +19,7 @@ export default function buildOnce(project: TestProject): () => void {
   mkdirSync(cache, { recursive: true });
   const folder = mkdtempSync(join(cache, 'test-site-'));
   const site = join(folder, 'dist');
-  execFileSync('npm', ['run', '--silent', 'build', '--', '--drafts', '--out', site], {
+  execFileSync('npm', ['run', '--silent', 'build', '--', '--out', site], {
     cwd: ROOT,
     stdio: ['ignore', 'ignore', 'inherit'],
     env: userEnvironment(),
