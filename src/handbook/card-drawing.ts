@@ -1,18 +1,17 @@
 import satori, { type SatoriNode } from 'satori';
+import { type Box, SIDE } from './card-box.ts';
 import type { CardContent } from './card-content.ts';
 import { cardFonts } from './card-fonts.ts';
 import {
   type Block,
-  type Box,
   blocksOf,
   type CardScale,
   groupBox,
   SCALES,
-  SIDE,
   SIDES_SCALE,
-  sideBox,
 } from './card-layout.ts';
 import { qrPath } from './card-qr.ts';
+import { sideBox } from './card-side.ts';
 import { tidySvg } from './card-svg.ts';
 
 /** Where a box came to lie, in the drawing's units. */

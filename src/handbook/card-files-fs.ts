@@ -14,11 +14,14 @@ export interface CardFiles {
 
 /** What decides how a card is drawn, besides its content and the fonts. */
 const DRAWING = [
+  'card-box.ts',
   'card-drawing.ts',
   'card-layout.ts',
   'card-png.ts',
   'card-qr.ts',
+  'card-side.ts',
   'card-svg.ts',
+  'short-path.ts',
   '../words/en/card.ts',
   '../../package-lock.json',
 ];

@@ -1,21 +1,6 @@
 import { words } from '../words/catalogue.ts';
+import { type Box, box, INK, PAPER, paragraph, rule } from './card-box.ts';
 import type { CardCaution, CardContent, CardLine } from './card-content.ts';
-
-/** An element as satori takes it; `key` names the boxes that are measured. */
-export interface Box {
-  readonly type: 'div';
-  readonly key: string | null;
-  readonly props: {
-    readonly style: Readonly<Record<string, string | number>>;
-    readonly children?: string | readonly Box[];
-  };
-}
-
-/** One side is A6, drawn in tenths of a millimetre, because words are set to whole units. */
-export const SIDE = { width: 1050, height: 1480, perMillimetre: 10 } as const;
-
-/** The measures of this file are quarters of a millimetre. */
-const UNITS = SIDE.perMillimetre / 4;
 
 /** How much is shown and how large; a card takes the first that fits. */
 export interface CardScale {
@@ -45,41 +30,6 @@ export interface Block {
   /** Of the group that a line to weigh belongs to; `null` for a caution. */
   readonly group: string | null;
 }
-
-const INK = '#000';
-const PAPER = '#fff';
-const PADDING = 16;
-const LENGTHS = /^(width|height|maxWidth|minWidth|flexBasis|fontSize|margin.*|padding.*|border)$/;
-const QR = 104;
-
-const box = (
-  style: Box['props']['style'],
-  children?: string | readonly Box[],
-  key: string | null = null,
-): Box => ({
-  type: 'div',
-  key,
-  props: {
-    style: { display: 'flex', boxSizing: 'border-box', flexShrink: 0, ...inUnits(style) },
-    ...(children === undefined ? {} : { children }),
-  },
-});
-
-/** Quarters of a millimetre into the drawing's units. */
-const inUnits = (style: Box['props']['style']): Box['props']['style'] =>
-  Object.fromEntries(
-    Object.entries(style).map(([name, value]) => {
-      if (!LENGTHS.test(name)) return [name, value];
-      if (typeof value === 'number') return [name, value * UNITS];
-      return [name, value.replaceAll(/[\d.]+(?=px)/g, (length) => String(Number(length) * UNITS))];
-    }),
-  );
-
-/** Text that may run over several lines; a word longer than a line is broken. */
-const paragraph = (text: string, style: Box['props']['style']) =>
-  box({ display: 'block', lineHeight: 1.18, wordBreak: 'break-word', ...style }, text);
-
-const rule = (height: number) => box({ width: '100%', height, backgroundColor: INK });
 
 /** What stands between head and foot: groups of weights, then cautions. */
 export function blocksOf(content: CardContent, scale: CardScale): readonly Block[] {
@@ -175,100 +125,4 @@ function cautionBox({ word, text, action }: CardCaution, index: number): Box {
       ]),
     ]),
   ]);
-}
-
-/** A whole side. Without a height it is as high as it needs to be, for measuring. */
-export function sideBox(
-  content: CardContent,
-  blocks: readonly Box[],
-  { number, of, after }: { readonly number: number; readonly of: number; readonly after: number },
-  height: number | null,
-): Box {
-  return box(
-    {
-      width: SIDE.width / UNITS,
-      flexDirection: 'column',
-      backgroundColor: PAPER,
-      color: INK,
-      fontFamily: 'Figures',
-      fontWeight: 400,
-      ...(height === null ? {} : { height: height / UNITS }),
-    },
-    [
-      headBox(content, number, of),
-      box(
-        { flexDirection: 'column', flexGrow: 1, width: '100%', padding: `0 ${PADDING}px` },
-        blocks,
-      ),
-      footBox(content, after),
-    ],
-    `side-${number}`,
-  );
-}
-
-function headBox({ code, name, label, proof }: CardContent, number: number, of: number): Box {
-  const side = of > 1 ? [box({ fontSize: 20 }, words.cardWords.side(number, of))] : [];
-  return box(
-    { flexDirection: 'column', width: '100%' },
-    [
-      box(
-        {
-          flexDirection: 'column',
-          width: '100%',
-          padding: `9px ${PADDING}px 10px`,
-          backgroundColor: INK,
-          color: PAPER,
-        },
-        [
-          box({ width: '100%', alignItems: 'flex-end', justifyContent: 'space-between' }, [
-            paragraph(code, { fontSize: 34, fontWeight: 600, lineHeight: 1, flexShrink: 1 }),
-            paragraph(label, {
-              fontSize: 22,
-              fontWeight: 600,
-              lineHeight: 1.1,
-              flexShrink: 1,
-              marginLeft: 12,
-              maxWidth: 220,
-              textAlign: 'right',
-            }),
-            ...side,
-          ]),
-          paragraph(name, { fontSize: nameSize(name), width: '100%' }),
-        ],
-      ),
-      ...(proof === null
-        ? []
-        : [
-            box({ width: '100%', padding: `5px ${PADDING}px`, border: `3px solid ${INK}` }, [
-              paragraph(proof, { fontSize: 15, fontWeight: 600, width: '100%' }),
-            ]),
-          ]),
-    ],
-    `head-${number}`,
-  );
-}
-
-/** Long names are set smaller, so that they leave room for what is weighed. */
-const nameSize = (name: string) => (name.length > 80 ? 14 : name.length > 36 ? 17 : 20);
-
-function footBox({ foot, address }: CardContent, after: number): Box {
-  return box(
-    { flexDirection: 'column', width: '100%', padding: `6px ${PADDING}px 12px` },
-    [
-      rule(2),
-      box({ width: '100%', paddingTop: 6, alignItems: 'flex-end' }, [
-        box({ flexDirection: 'column', flexGrow: 1, flexShrink: 1, flexBasis: 0, minWidth: 0 }, [
-          ...(after > 0
-            ? [paragraph(words.cardWords.goesOn(after), { fontSize: 16, fontWeight: 600 })]
-            : []),
-          paragraph(words.cardWords.order, { fontSize: 14, fontWeight: 600, paddingBottom: 3 }),
-          ...foot.map((line) => paragraph(line, { fontSize: 12, width: '100%' })),
-        ]),
-        ...(address === null
-          ? []
-          : [box({ width: QR, height: QR, marginLeft: 10, flexShrink: 0 }, [], 'qr')]),
-      ]),
-    ],
-    'foot',
-  );
 }

@@ -1,6 +1,6 @@
 import { crc32, deflateSync } from 'node:zlib';
 import { Resvg } from '@resvg/resvg-js';
-import { SIDE } from './card-layout.ts';
+import { SIDE } from './card-box.ts';
 
 /** A dot for each unit of the drawing: 254 dpi. */
 const DOTS_PER_METRE = SIDE.perMillimetre * 1000;

@@ -1,4 +1,4 @@
-import { SIDE } from './card-layout.ts';
+import { SIDE } from './card-box.ts';
 import { shortPath } from './short-path.ts';
 
 /** What a drawing carries besides its boxes and letters. */

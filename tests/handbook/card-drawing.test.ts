@@ -1,8 +1,8 @@
 import { Resvg } from '@resvg/resvg-js';
 import jsQr from 'jsqr';
 import { describe, expect, test } from 'vitest';
+import { SIDE } from '../../src/handbook/card-box.ts';
 import { drawCard } from '../../src/handbook/card-drawing.ts';
-import { SIDE } from '../../src/handbook/card-layout.ts';
 import { CARD, HOSTILE, textsOf } from './card-fixture.ts';
 
 /** A box may reach into its neighbour by what is rounded. */
