@@ -2,12 +2,12 @@ import { resolve } from 'node:path';
 import { type EditionOptions, loadEdition } from '../edition/load-edition-fs.ts';
 import type { ShopFolders } from '../formulary/formulary.ts';
 import { packagedData } from '../formulary/load.ts';
-import type { Problem } from '../formulary/problem.ts';
 import { readEvidence } from '../reference/evidence/read-evidence-fs.ts';
 import { readPrices } from '../reference/prices-fs.ts';
 import { finderData } from '../site/find/finder-data.ts';
 import { readSavedSearches } from '../site/find/saved-searches-fs.ts';
 import type { SiteInput } from '../site/input.ts';
+import type { Problem } from '../words/problem.ts';
 
 export type LoadedSite =
   | { readonly ok: true; readonly input: SiteInput; readonly problems: readonly Problem[] }

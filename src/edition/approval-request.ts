@@ -1,5 +1,5 @@
 import { isCalendarDate } from '../formulary/calendar-date.ts';
-import type { Problem } from '../reference/problem.ts';
+import type { Problem } from '../words/problem.ts';
 import { editionProblem } from './edition-problem.ts';
 
 export interface ApprovalRequest {

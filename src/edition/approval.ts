@@ -1,6 +1,6 @@
 import type { Formula } from '../formulary/formula.ts';
-import type { Problem } from '../reference/problem.ts';
 import type { EditionRule } from '../words/en/problems-edition.ts';
+import type { Problem } from '../words/problem.ts';
 import { editionProblem } from './edition-problem.ts';
 
 /** What an approval is worth on a day. */

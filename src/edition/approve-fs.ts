@@ -5,7 +5,7 @@ import { imagesIn } from '../formulary/formulas-fs.ts';
 import { knownFrom } from '../formulary/known.ts';
 import { type LoadOptions, loadParts } from '../formulary/load.ts';
 import { readFormula } from '../formulary/read-formula.ts';
-import type { Problem } from '../reference/problem.ts';
+import type { Problem } from '../words/problem.ts';
 import { type ApprovalState, approvalOf } from './approval.ts';
 import { type ApprovalRequest, requestProblems } from './approval-request.ts';
 import { editionProblem } from './edition-problem.ts';

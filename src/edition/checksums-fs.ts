@@ -1,7 +1,7 @@
 import { createHash } from 'node:crypto';
 import { existsSync, readdirSync, readFileSync, writeFileSync } from 'node:fs';
 import { join, relative } from 'node:path';
-import type { Problem } from '../reference/problem.ts';
+import type { Problem } from '../words/problem.ts';
 import { editionProblem } from './edition-problem.ts';
 
 /** The list of checksums in a published folder, in the form that `sha256sum -c` reads. */

@@ -1,6 +1,6 @@
 import type { ProblemParts } from '../formulary/report.ts';
-import type { Problem } from '../reference/problem.ts';
 import type { EditionRule } from '../words/en/problems-edition.ts';
+import type { Problem } from '../words/problem.ts';
 
 /** Where a problem stands. Without a place the whole file or folder is meant. */
 export interface ProblemPlace {

@@ -1,5 +1,5 @@
 import type { ComputedFormula, Formulary } from '../formulary/formulary.ts';
-import type { Problem } from '../reference/problem.ts';
+import type { Problem } from '../words/problem.ts';
 import { type ApprovalState, approvalOf, approvalProblems } from './approval.ts';
 import { MODELS_VERSION } from './approved-content.ts';
 import type { Canonical } from './canonical-text.ts';

@@ -1,5 +1,5 @@
 import { existsSync, readFileSync } from 'node:fs';
-import type { Problem } from '../reference/problem.ts';
+import type { Problem } from '../words/problem.ts';
 import { editionProblem } from './edition-problem.ts';
 import { type LedgerEntry, ledgerLine, parseLedger } from './ledger.ts';
 import { replaceFile } from './replace-file-fs.ts';

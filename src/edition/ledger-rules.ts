@@ -1,5 +1,5 @@
 import type { Formula } from '../formulary/formula.ts';
-import type { Problem } from '../reference/problem.ts';
+import type { Problem } from '../words/problem.ts';
 import { editionProblem, type ProblemPlace } from './edition-problem.ts';
 import { type LedgerEntry, type PublishedEntry, publishedIn } from './ledger.ts';
 

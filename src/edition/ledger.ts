@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import type { Problem } from '../reference/problem.ts';
+import type { Problem } from '../words/problem.ts';
 import { editionProblem } from './edition-problem.ts';
 import { weightsSchema } from './edition-schema.ts';
 import type { WeightsPerKilogram } from './weights-per-kilogram.ts';

@@ -4,7 +4,7 @@ import { isCalendarDate } from '../formulary/calendar-date.ts';
 import type { ShopFolders } from '../formulary/formulary.ts';
 import { loadFormulary, PACKAGED_DATA } from '../formulary/load.ts';
 import { SHOP_FILES } from '../reference/data-files.ts';
-import type { Problem } from '../reference/problem.ts';
+import type { Problem } from '../words/problem.ts';
 import { type Edition, editionOf, editionProblems } from './edition.ts';
 import { editionProblem } from './edition-problem.ts';
 import { type InputFile, readInputs } from './inputs-fs.ts';

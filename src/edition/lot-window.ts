@@ -1,8 +1,8 @@
 import type { Formula } from '../formulary/formula.ts';
 import { usersOfLot } from '../formulary/lot-users.ts';
 import { decidingValue } from '../formulary/lots.ts';
-import type { Problem } from '../reference/problem.ts';
 import type { AlkaliLot, FatLot, Reference } from '../reference/reference.ts';
+import type { Problem } from '../words/problem.ts';
 import { editionProblem } from './edition-problem.ts';
 
 /**

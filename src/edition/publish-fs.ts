@@ -1,6 +1,6 @@
 import { existsSync, rmSync } from 'node:fs';
 import { join } from 'node:path';
-import type { Problem } from '../reference/problem.ts';
+import type { Problem } from '../words/problem.ts';
 import { filesOf, isWhole, type Verified, verifyFolder } from './checksums-fs.ts';
 import { copyWhole } from './copy-fs.ts';
 import type { EditionDocument } from './edition-document.ts';

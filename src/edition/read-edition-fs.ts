@@ -1,6 +1,6 @@
 import { existsSync, readFileSync, statSync } from 'node:fs';
 import { join } from 'node:path';
-import type { Problem } from '../reference/problem.ts';
+import type { Problem } from '../words/problem.ts';
 import type { EditionDocument } from './edition-document.ts';
 import { editionProblem } from './edition-problem.ts';
 import { editionSchema } from './edition-schema.ts';

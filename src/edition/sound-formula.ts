@@ -3,7 +3,7 @@ import type { ComputedFormula } from '../formulary/formulary.ts';
 import type { loadParts } from '../formulary/load.ts';
 import { sameCode } from '../formulary/same-code.ts';
 import { didYouMean } from '../reference/nearest.ts';
-import type { Problem } from '../reference/problem.ts';
+import type { Problem } from '../words/problem.ts';
 import { editionProblem } from './edition-problem.ts';
 
 export type Found =

@@ -1,4 +1,4 @@
-import type { Problem } from '../reference/problem.ts';
+import type { Problem } from '../words/problem.ts';
 import { editionProblem } from './edition-problem.ts';
 
 /** What the file system's error codes mean to somebody who writes a file. */

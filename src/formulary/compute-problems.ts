@@ -3,8 +3,8 @@ import { interpolate } from '../chemistry/interpolate.ts';
 import { lyeOf } from '../chemistry/lye.ts';
 import type { Breach } from '../chemistry/quantity.ts';
 import type { Reference } from '../reference/reference.ts';
+import type { Problem } from '../words/problem.ts';
 import type { Formula } from './formula.ts';
-import type { Problem } from './problem.ts';
 
 /** Room temperature, at which a lye must hold its alkali in solution. [degC] */
 const ROOM = 25;

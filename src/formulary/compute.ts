@@ -15,6 +15,7 @@ import {
 } from '../chemistry/superfat.ts';
 import { yields } from '../chemistry/yields.ts';
 import type { Reference } from '../reference/reference.ts';
+import type { Problem } from '../words/problem.ts';
 import { computeBatch } from './compute-batch.ts';
 import { chargeProblems, missingProblem, refusalProblem } from './compute-problems.ts';
 import type { FormulaDocument } from './document.ts';
@@ -24,7 +25,6 @@ import type { ComputedFormula } from './formulary.ts';
 import { prepareFormulation } from './formulation.ts';
 import { marginWithoutLots } from './margin-without-lots.ts';
 import { percentRange } from './percent-range.ts';
-import type { Problem } from './problem.ts';
 import { checkRelease } from './release.ts';
 import { scheduleOf } from './schedule.ts';
 

@@ -1,8 +1,8 @@
 import type { Charge } from '../chemistry/charge.ts';
 import type { Reference } from '../reference/reference.ts';
+import type { Problem } from '../words/problem.ts';
 import type { FormulaDocument } from './document.ts';
 import type { Formula } from './formula.ts';
-import type { Problem } from './problem.ts';
 
 /** A formula with everything computed from it. */
 export interface ComputedFormula {

@@ -2,10 +2,10 @@ import { readdirSync } from 'node:fs';
 import { dirname, join, relative } from 'node:path';
 import { LARGEST_FILE, type ReadText, readText } from '../reference/read-text-fs.ts';
 import type { FormulaRule } from '../words/en/problems-formula.ts';
+import type { Problem } from '../words/problem.ts';
 import { checkAcross } from './checks/across.ts';
 import type { Formula } from './formula.ts';
 import type { Known } from './known.ts';
-import type { Problem } from './problem.ts';
 import { type FormulaRead, readFormula } from './read-formula.ts';
 import { formulaProblem, type ProblemParts } from './report.ts';
 

@@ -1,10 +1,10 @@
 import type { Reference } from '../reference/reference.ts';
+import type { Problem } from '../words/problem.ts';
 import { computeFormula } from './compute.ts';
 import type { ComputedFormula } from './formulary.ts';
 import { readFormulaFile } from './formulas-fs.ts';
 import { knownFrom } from './known.ts';
 import { readData } from './load.ts';
-import type { Problem } from './problem.ts';
 
 /**
  * Single formula files, inside or outside the formulary, computed with a shop's data. A breached release

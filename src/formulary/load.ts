@@ -3,12 +3,12 @@ import { fileURLToPath } from 'node:url';
 import { readReference } from '../reference/read-reference-fs.ts';
 import type { Reference } from '../reference/reference.ts';
 import type { ReadReference } from '../reference/reference-from.ts';
+import type { Problem } from '../words/problem.ts';
 import { computeFormula } from './compute.ts';
 import type { ComputedFormula, Loaded, ShopFolders } from './formulary.ts';
 import { type FormulasRead, readFormulas } from './formulas-fs.ts';
 import { knownFrom } from './known.ts';
 import { lotProblems } from './lot-problems.ts';
-import type { Problem } from './problem.ts';
 import { releaseProblems } from './release.ts';
 
 export interface LoadOptions {

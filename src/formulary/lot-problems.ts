@@ -1,8 +1,8 @@
 import type { Reference } from '../reference/reference.ts';
 import { dataProblem } from '../reference/report.ts';
+import type { Problem } from '../words/problem.ts';
 import type { Formula } from './formula.ts';
 import { usersOfLot } from './lot-users.ts';
-import type { Problem } from './problem.ts';
 
 /**
  * Released lots past their retest date on the day `asOf`, `2026-12-01`; the date itself is still good. An

@@ -1,6 +1,7 @@
 import type { Root } from 'mdast';
 import { type Place, parseYaml, type ReadYaml } from '../reference/yaml.ts';
 import type { FormulaRule } from '../words/en/problems-formula.ts';
+import type { Problem } from '../words/problem.ts';
 import { amountNames } from './amount-names.ts';
 import { assembleFormula } from './assemble.ts';
 import { checkCharacters } from './checks/characters.ts';
@@ -18,7 +19,6 @@ import type { Formula } from './formula.ts';
 import { splitFrontmatter } from './frontmatter.ts';
 import type { Known } from './known.ts';
 import { parseMethod } from './method.ts';
-import type { Problem } from './problem.ts';
 import { type Path, type Report, reportOn } from './report.ts';
 import type { Frontmatter } from './schema.ts';
 import { checkSchema } from './schema-problems.ts';

@@ -1,7 +1,7 @@
 import type { ReleaseLimit } from '../reference/reference.ts';
+import type { Problem } from '../words/problem.ts';
 import type { BatchDocument, FormulaDocument, ReleaseCheck } from './document.ts';
 import type { Formula } from './formula.ts';
-import type { Problem } from './problem.ts';
 
 /** The limit for a formula: the last one of the shop's list that fits its kind and process. */
 export function limitFor(

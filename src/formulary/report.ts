@@ -1,6 +1,6 @@
 import type { Place, ReadYaml } from '../reference/yaml.ts';
 import type { FormulaRule } from '../words/en/problems-formula.ts';
-import type { Problem } from './problem.ts';
+import type { Problem } from '../words/problem.ts';
 
 /** Where a value stands in the frontmatter: `['fats', 0, 'share']`. */
 export type Path = readonly (string | number)[];

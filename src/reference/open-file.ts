@@ -1,7 +1,7 @@
 import type { z } from 'zod';
 import type { DataRule } from '../words/en/problems-data.ts';
+import type { Problem } from '../words/problem.ts';
 import type { DataFile } from './data-files.ts';
-import type { Problem } from './problem.ts';
 import { type DataReport, dataProblem, reportOn } from './report.ts';
 import { fit } from './schema-problems.ts';
 import { parseYaml } from './yaml.ts';

@@ -1,6 +1,6 @@
+import type { Problem } from '../words/problem.ts';
 import { didYouMean } from './nearest.ts';
 import { openFile } from './open-file.ts';
-import type { Problem } from './problem.ts';
 import { readText } from './read-text-fs.ts';
 import type { Reference } from './reference.ts';
 import { pricesSchema } from './schema/prices.ts';

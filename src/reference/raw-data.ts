@@ -1,7 +1,7 @@
 import type { z } from 'zod';
+import type { Problem } from '../words/problem.ts';
 import type { DataFile } from './data-files.ts';
 import { type OpenedFile, openFile } from './open-file.ts';
-import type { Problem } from './problem.ts';
 import type { AlkaliRecord } from './reference.ts';
 import { dataProblem } from './report.ts';
 import { blendsSchema } from './schema/blends.ts';

@@ -1,6 +1,6 @@
 import { type Dirent, readdirSync } from 'node:fs';
+import type { Problem } from '../words/problem.ts';
 import { DATA_FOLDERS, type DataFile, dataFileAdvice, SHOP_FILES } from './data-files.ts';
-import type { Problem } from './problem.ts';
 import { LARGEST_FILE, readText } from './read-text-fs.ts';
 import { type ReadReference, referenceFrom } from './reference-from.ts';
 import { dataProblem } from './report.ts';

@@ -1,5 +1,6 @@
 import { constantsFrom } from '../chemistry/constants.ts';
 import type { AtomicWeights } from '../chemistry/molar-mass.ts';
+import type { Problem } from '../words/problem.ts';
 import { acidRecords } from './acids.ts';
 import { alkaliRecord } from './alkali.ts';
 import { blendsFrom } from './blends.ts';
@@ -9,7 +10,6 @@ import { fatRecord } from './fat.ts';
 import { lintFat } from './lint/lint-fat.ts';
 import { lotsFrom } from './lots.ts';
 import { additiveRecords, liquidRecords } from './materials.ts';
-import type { Problem } from './problem.ts';
 import { openAll, type RawData } from './raw-data.ts';
 import type { AlkaliRecord, FatRecord, Reference } from './reference.ts';
 import { valueRecord } from './schema/value.ts';

@@ -1,5 +1,5 @@
 import type { DataRule } from '../words/en/problems-data.ts';
-import type { Problem } from './problem.ts';
+import type { Problem } from '../words/problem.ts';
 import type { Place, ReadYaml, YamlPath } from './yaml.ts';
 
 /** `found` and `expected` are noun phrases; `advice` says what to do, without a full stop. */

@@ -1,20 +1,9 @@
-/** What a problem has to say of itself; the shape of `Problem` without an import from further right. */
-interface ProblemWords {
-  readonly rule: string;
-  readonly severity: 'error' | 'warning';
-  readonly file: string;
-  readonly line: number;
-  readonly column: number;
-  readonly found: string;
-  readonly expected: string;
-  readonly advice: string;
-}
-
+import type { Problem } from './problem.ts';
 /**
  * One line for one problem:
  * `formulas/x.md:6:12  Found fat "cocnut", expected an id from data/fats; did you mean "coconut"?  [rule]`
  */
-export function problemText(problem: ProblemWords): string {
+export function problemText(problem: Problem): string {
   const { file, line, column, found, expected, advice, rule, severity } = problem;
   const parts = [`Found ${found}`];
   if (expected !== '') parts.push(`, expected ${expected}`);
@@ -26,7 +15,7 @@ export function problemText(problem: ProblemWords): string {
 }
 
 /** `3 errors and 1 warning in 2 files`, or `no problems`. */
-export function problemSummary(problems: readonly ProblemWords[]): string {
+export function problemSummary(problems: readonly Problem[]): string {
   const errors = problems.filter(({ severity }) => severity === 'error').length;
   const warnings = problems.length - errors;
   const files = new Set(problems.map(({ file }) => file)).size;

@@ -1,11 +1,11 @@
 import { readFileSync } from 'node:fs';
 import { expect, test } from 'vitest';
 import { cautionThresholdsFrom, LIMIT_UNITS } from '../../src/reference/caution-thresholds.ts';
-import type { Problem } from '../../src/reference/problem.ts';
 import { reportOn } from '../../src/reference/report.ts';
 import { cautionsSchema } from '../../src/reference/schema/cautions.ts';
 import { fit } from '../../src/reference/schema-problems.ts';
 import { parseYaml } from '../../src/reference/yaml.ts';
+import type { Problem } from '../../src/words/problem.ts';
 import { problemText } from '../../src/words/problem-text.ts';
 import { REFERENCE } from './context.ts';
 

@@ -1,8 +1,8 @@
 import type { ModelId } from '../../src/reference/evidence/models.ts';
 import { evidenceRows } from '../../src/reference/evidence/rows.ts';
-import type { Problem } from '../../src/reference/problem.ts';
 import type { Reference } from '../../src/reference/reference.ts';
 import { reportOn } from '../../src/reference/report.ts';
+import type { Problem } from '../../src/words/problem.ts';
 
 const NOWHERE = { line: 1, column: 1 };
 

@@ -1,6 +1,6 @@
 import { didYouMean } from '../../reference/nearest.ts';
 import type { Place } from '../../reference/yaml.ts';
-import type { Problem } from '../problem.ts';
+import type { Problem } from '../../words/problem.ts';
 import type { FormulaRead } from '../read-formula.ts';
 import { formulaProblem } from '../report.ts';
 import { sameCode } from '../same-code.ts';

@@ -1,5 +1,5 @@
+import type { Problem } from '../../words/problem.ts';
 import { openFile } from '../open-file.ts';
-import type { Problem } from '../problem.ts';
 import { readText } from '../read-text-fs.ts';
 import type { Reference } from '../reference.ts';
 import { dataProblem } from '../report.ts';

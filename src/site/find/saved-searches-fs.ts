@@ -1,9 +1,9 @@
 import { openFile } from '../../reference/open-file.ts';
-import type { Problem } from '../../reference/problem.ts';
 import { readText } from '../../reference/read-text-fs.ts';
 import { readAddress } from '../../search/finder/address.ts';
 import type { FinderData } from '../../search/finder/finder-data.ts';
 import { type SavedSearch, savedSearchesSchema } from '../../search/saved/saved-search.ts';
+import type { Problem } from '../../words/problem.ts';
 
 const NAME = 'searches.yaml';
 

@@ -1,5 +1,5 @@
 import type { AstroIntegration } from 'astro';
-import type { Problem } from '../../formulary/problem.ts';
+import type { Problem } from '../../words/problem.ts';
 import { problemsPage } from './problems-page.ts';
 
 /** In the preview, answers every page with the problems that stand against it, until there are none. */

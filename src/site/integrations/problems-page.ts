@@ -1,4 +1,4 @@
-import type { Problem } from '../../formulary/problem.ts';
+import type { Problem } from '../../words/problem.ts';
 import { problemSummary, problemText } from '../../words/problem-text.ts';
 
 const STYLE =

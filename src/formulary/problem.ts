@@ -1,1 +1,0 @@
-export type { Problem } from '../reference/problem.ts';
