@@ -78,10 +78,13 @@ function lotTexts(formula: Formula, document: FormulaDocument, reference: Refere
   const without = [...document.alkali, ...document.fats, ...document.afterCookFats]
     .map(({ id }) => id)
     .filter((id) => !known.has(id))
-    .map((material) => ({ material, text: noLot }));
-  return [...inForce, ...without]
+    .map((id) => nameOf(reference, id));
+  const named = inForce
     .toSorted((a, b) => Number(alkalis.has(b.material)) - Number(alkalis.has(a.material)))
     .map(({ material, text }) => ({ name: nameOf(reference, material), text }));
+  // the same sentence for all that has none, so that it is read once
+  const rest = [...new Set(without)].join(', ');
+  return rest === '' ? named : [...named, { name: rest, text: noLot }];
 }
 
 function scaleTexts({ steps }: WeightsTable, { id }: BatchDocument, { shop }: Reference): string {

@@ -31,7 +31,7 @@ export const sheetWords = {
       'This sheet is the current one: code and weights digest looked up in the handbook today.',
     lots: 'The bags and drums in front of me bear these lots:',
     lot: (lot: string, until: string) => `${lot}, retest by ${until}`,
-    noLot: 'any lot inside the published range',
+    noLot: '(any lot inside the published range)',
     scales: (scales: string) => `The scale is level and checked today: ${scales}.`,
     scale: (name: string, step: string) => `${name}, steps of ${step} g`,
     checkWeight: 'Check weight / reading',
