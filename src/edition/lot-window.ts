@@ -1,7 +1,8 @@
 import type { Formula } from '../formulary/formula.ts';
 import { usersOfLot } from '../formulary/lot-users.ts';
 import { decidingValue } from '../formulary/lots.ts';
-import type { AlkaliLot, FatLot, Reference } from '../reference/reference.ts';
+import type { AlkaliLot, FatLot } from '../reference/lot-records.ts';
+import type { Reference } from '../reference/reference.ts';
 import type { Problem } from '../words/problem.ts';
 import { editionProblem } from './edition-problem.ts';
 

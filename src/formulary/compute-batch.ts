@@ -14,7 +14,8 @@ import {
 import { reckon } from '../chemistry/reckon.ts';
 import { type WeighedCharge, weigh } from '../chemistry/weigh.ts';
 import { yields } from '../chemistry/yields.ts';
-import type { BatchSize, Reference, Scale } from '../reference/reference.ts';
+import type { Reference } from '../reference/reference.ts';
+import type { BatchSize, Scale } from '../reference/shop-records.ts';
 import type { BatchDocument } from './document.ts';
 import { percentRange } from './percent-range.ts';
 

@@ -1,7 +1,8 @@
 import type { Formulation } from '../chemistry/charge.ts';
 import type { Fat } from '../chemistry/materials.ts';
 import { fraction } from '../chemistry/quantity.ts';
-import type { AlkaliRecord, Reference } from '../reference/reference.ts';
+import type { AlkaliRecord } from '../reference/material-records.ts';
+import type { Reference } from '../reference/reference.ts';
 import type { Formula } from './formula.ts';
 import { alkaliInForce, fatInForce } from './lots.ts';
 

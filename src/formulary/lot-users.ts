@@ -1,4 +1,4 @@
-import type { AlkaliLot, FatLot } from '../reference/reference.ts';
+import type { AlkaliLot, FatLot } from '../reference/lot-records.ts';
 import type { Formula } from './formula.ts';
 
 /**

@@ -1,12 +1,8 @@
 import type { AlkaliSupply, Fat } from '../chemistry/materials.ts';
 import { fraction, type MgKohPerGram, mgKohPerGram, type Range } from '../chemistry/quantity.ts';
-import type {
-  AlkaliLot,
-  AlkaliRecord,
-  FatLot,
-  Measured,
-  Reference,
-} from '../reference/reference.ts';
+import type { AlkaliLot, FatLot, Measured } from '../reference/lot-records.ts';
+import type { AlkaliRecord } from '../reference/material-records.ts';
+import type { Reference } from '../reference/reference.ts';
 
 /** The same data as if the shop had no lots: every value is the published or trade range's. */
 export const withoutLots = (reference: Reference): Reference => ({

@@ -1,4 +1,4 @@
-import type { ReleaseLimit } from '../reference/reference.ts';
+import type { ReleaseLimit } from '../reference/shop-records.ts';
 import type { Problem } from '../words/problem.ts';
 import type { BatchDocument, FormulaDocument, ReleaseCheck } from './document.ts';
 import type { Formula } from './formula.ts';

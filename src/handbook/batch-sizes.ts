@@ -1,5 +1,5 @@
 import type { Formulary } from '../formulary/formulary.ts';
-import type { BatchSize } from '../reference/reference.ts';
+import type { BatchSize } from '../reference/shop-records.ts';
 import { words } from '../words/catalogue.ts';
 
 /** The shop's sizes that at least one formula is made at, in the shop's order. */

@@ -1,4 +1,5 @@
-import type { FatRecord, Reference } from '../reference/reference.ts';
+import type { FatRecord } from '../reference/material-records.ts';
+import type { Reference } from '../reference/reference.ts';
 import { words } from '../words/catalogue.ts';
 import { plain } from '../words/numbers.ts';
 import { sourceName } from './names.ts';

@@ -1,9 +1,6 @@
-import type {
-  CompositionRecord,
-  FatRecord,
-  Reference,
-  ValueRecord,
-} from '../reference/reference.ts';
+import type { FatRecord } from '../reference/material-records.ts';
+import type { Reference } from '../reference/reference.ts';
+import type { CompositionRecord, ValueRecord } from '../reference/values.ts';
 import { words } from '../words/catalogue.ts';
 import { plain } from '../words/numbers.ts';
 import { recordText } from './fat-sheet.ts';

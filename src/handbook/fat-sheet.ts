@@ -1,7 +1,9 @@
 import type { Formulary } from '../formulary/formulary.ts';
 import { decidingValue } from '../formulary/lots.ts';
 import { firstClosedRange } from '../reference/choice.ts';
-import type { FatRecord, Reference, ValueRecord } from '../reference/reference.ts';
+import type { FatRecord } from '../reference/material-records.ts';
+import type { Reference } from '../reference/reference.ts';
+import type { ValueRecord } from '../reference/values.ts';
 import { words } from '../words/catalogue.ts';
 import { plain, range } from '../words/numbers.ts';
 

@@ -1,7 +1,7 @@
 import type { Formulary } from '../formulary/formulary.ts';
 import { usersOfLot } from '../formulary/lot-users.ts';
 import { decidingValue } from '../formulary/lots.ts';
-import type { AlkaliLot, FatLot, LotStatus, Measured } from '../reference/reference.ts';
+import type { AlkaliLot, FatLot, LotStatus, Measured } from '../reference/lot-records.ts';
 import { words } from '../words/catalogue.ts';
 import { plain } from '../words/numbers.ts';
 import { nameOf } from './names.ts';

@@ -1,5 +1,5 @@
 import { placeInOrder } from '../reference/choice.ts';
-import type { CompositionRecord, Source, ValueRecord } from '../reference/reference.ts';
+import type { CompositionRecord, Source, ValueRecord } from '../reference/values.ts';
 import { words } from '../words/catalogue.ts';
 
 type Sources = ReadonlyMap<string, Source>;

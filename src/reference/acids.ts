@@ -3,7 +3,7 @@ import type { Constants } from '../chemistry/constants.ts';
 import { iodineFactors } from '../chemistry/fatty-acids.ts';
 import { type AtomicWeights, molarMass } from '../chemistry/molar-mass.ts';
 import type { GramsPerMole } from '../chemistry/quantity.ts';
-import type { AcidRecord } from './reference.ts';
+import type { AcidRecord } from './material-records.ts';
 import type { DataReport } from './report.ts';
 import type { acidsSchema } from './schema/chemicals.ts';
 import { valueRecord } from './schema/value.ts';

@@ -1,10 +1,11 @@
 import type { z } from 'zod';
 import { fraction } from '../chemistry/quantity.ts';
 import { firstClosedRange, isClosedRange } from './choice.ts';
-import type { AlkaliRecord, ValueRecord } from './reference.ts';
+import type { AlkaliRecord } from './material-records.ts';
 import type { DataReport } from './report.ts';
 import type { alkaliSchema } from './schema/chemicals.ts';
 import { middleOf, valueRecord } from './schema/value.ts';
+import type { ValueRecord } from './values.ts';
 
 /**
  * An alkali without a lot: reckoned at the top of the envelope of its closed trade ranges, since stronger

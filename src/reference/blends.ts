@@ -1,8 +1,8 @@
 import type { KnownFats } from './materials.ts';
 import { didYouMean } from './nearest.ts';
-import type { Blend } from './reference.ts';
 import type { DataReport } from './report.ts';
 import type { RawBlends } from './schema/blends.ts';
+import type { Blend } from './shop-records.ts';
 
 /** How far the shares of a blend may sum from 100: room for binary fractions, not for a slip. */
 const TOLERANCE = 1e-6;

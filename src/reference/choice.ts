@@ -1,4 +1,4 @@
-import { ORDER_OF_CHOICE, type Source, type ValueRecord } from './reference.ts';
+import { ORDER_OF_CHOICE, type Source, type ValueRecord } from './values.ts';
 
 /**
  * Place of a record in the order of choice: by the kind of its source, and among sources of one kind what was

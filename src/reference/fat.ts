@@ -9,9 +9,10 @@ import {
 } from '../chemistry/quantity.ts';
 import { type ClosedRange, firstClosedRange, loweringMean } from './choice.ts';
 import { fatLabel } from './label.ts';
-import type { CompositionRecord, FatRecord, ValueRecord } from './reference.ts';
+import type { FatRecord } from './material-records.ts';
 import type { RawFat } from './schema/fat.ts';
 import { middleOf, valueRecord } from './schema/value.ts';
+import type { CompositionRecord, ValueRecord } from './values.ts';
 
 /**
  * Density of water at 20 degC, which the relative densities of the standards refer to. [g/mL]

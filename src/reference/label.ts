@@ -1,7 +1,7 @@
 import type { z } from 'zod';
-import type { How, ValueRecord } from './reference.ts';
 import type { additiveLabelSchema, fatLabelSchema, liquidLabelSchema } from './schema/label.ts';
 import { valueRecord } from './schema/value.ts';
+import type { How, ValueRecord } from './values.ts';
 
 /** What a label may say of a soap where everything in it allows it. */
 export const CLAIMS = ['vegan', 'palm-free', 'nut-free'] as const;

@@ -1,7 +1,8 @@
+import type { FatLot, Measured } from './lot-records.ts';
 import type { KnownFats } from './materials.ts';
 import { didYouMean } from './nearest.ts';
 import { ALKALIS } from './raw-data.ts';
-import type { FatLot, Measured, Reference } from './reference.ts';
+import type { Reference } from './reference.ts';
 import type { DataReport } from './report.ts';
 import type { RawLots } from './schema/lots.ts';
 

@@ -1,8 +1,8 @@
 import type { z } from 'zod';
 import type { Problem } from '../words/problem.ts';
 import type { DataFile } from './data-files.ts';
+import type { AlkaliRecord } from './material-records.ts';
 import { type OpenedFile, openFile } from './open-file.ts';
-import type { AlkaliRecord } from './reference.ts';
 import { dataProblem } from './report.ts';
 import { blendsSchema } from './schema/blends.ts';
 import { cautionsSchema } from './schema/cautions.ts';

@@ -1,8 +1,8 @@
 import { grams } from '../chemistry/quantity.ts';
 import { didYouMean } from './nearest.ts';
-import type { BatchSize, Shop } from './reference.ts';
 import type { DataReport } from './report.ts';
 import type { RawShop } from './schema/shop.ts';
+import type { BatchSize, Shop } from './shop-records.ts';
 
 /** Lye tables are named after their size; this name is taken by the table over the fats. */
 const ALL_FATS = 'fats';

@@ -1,8 +1,8 @@
 import type { z } from 'zod';
 import { didYouMean } from './nearest.ts';
-import type { Source } from './reference.ts';
 import type { DataReport } from './report.ts';
 import type { sourcesSchema } from './schema/sources.ts';
+import type { Source } from './values.ts';
 import type { YamlPath } from './yaml.ts';
 
 export function sourcesFrom(raw: z.infer<typeof sourcesSchema>): Map<string, Source> {

@@ -1,9 +1,10 @@
 import type { Curve } from '../chemistry/interpolate.ts';
 import type { LyeHeatTables } from '../chemistry/lye-heat.ts';
 import type { Cation } from '../chemistry/materials.ts';
-import type { Reference, Source, TableSet } from './reference.ts';
+import type { Reference, TableSet } from './reference.ts';
 import type { DataReport } from './report.ts';
 import type { RawTable } from './schema/table.ts';
+import type { Source } from './values.ts';
 
 /** The tables that the models use, by file name, with the units that their axes must have. */
 export const TABLES = {

@@ -3,8 +3,10 @@ import { computeFormula } from '../../src/formulary/compute.ts';
 import type { FormulaDocument } from '../../src/formulary/document.ts';
 import type { Formula } from '../../src/formulary/formula.ts';
 import type { ComputedFormula } from '../../src/formulary/formulary.ts';
+import type { AlkaliLot } from '../../src/reference/lot-records.ts';
 import { readReference } from '../../src/reference/read-reference-fs.ts';
-import type { AlkaliLot, BatchSize, Reference } from '../../src/reference/reference.ts';
+import type { Reference } from '../../src/reference/reference.ts';
+import type { BatchSize } from '../../src/reference/shop-records.ts';
 
 const read = readReference(['data']);
 if (!read.reference) throw new Error(JSON.stringify(read.problems, null, 2));

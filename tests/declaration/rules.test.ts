@@ -6,7 +6,9 @@ import { asAdded } from '../../src/handbook/declaration/as-added.ts';
 import { asFormed } from '../../src/handbook/declaration/as-formed.ts';
 import { declarationOf } from '../../src/handbook/declaration/declaration.ts';
 import { declared, ingredient } from '../../src/handbook/declaration/ingredient.ts';
-import type { AdditiveRecord, Reference, ValueRecord } from '../../src/reference/reference.ts';
+import type { AdditiveRecord } from '../../src/reference/material-records.ts';
+import type { Reference } from '../../src/reference/reference.ts';
+import type { ValueRecord } from '../../src/reference/values.ts';
 import { batchSize, computedWith, type Wish } from '../cautions/context.ts';
 
 const loaded = loadFormulary({ formulas: 'formulas', data: 'data' });

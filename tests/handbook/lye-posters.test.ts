@@ -3,7 +3,8 @@ import { loadFormulary } from '../../src/formulary/load.ts';
 import { fatAlkaliTable } from '../../src/handbook/fat-alkali-table.ts';
 import { type LyeRow, rowsByKind } from '../../src/handbook/lye-table.ts';
 import { lotsOfShop, lotsOfSize } from '../../src/handbook/table-lots.ts';
-import type { AlkaliLot, FatLot, Reference } from '../../src/reference/reference.ts';
+import type { AlkaliLot, FatLot } from '../../src/reference/lot-records.ts';
+import type { Reference } from '../../src/reference/reference.ts';
 import { packagedReference } from '../support/packaged-reference.ts';
 
 const packaged = packagedReference();

@@ -1,6 +1,6 @@
 import { describe, expect, test } from 'vitest';
 import { firstClosedRange, loweringMean, placeInOrder } from '../../src/reference/choice.ts';
-import { ORDER_OF_CHOICE, type Source, type ValueRecord } from '../../src/reference/reference.ts';
+import { ORDER_OF_CHOICE, type Source, type ValueRecord } from '../../src/reference/values.ts';
 import { packagedReference } from './packaged-data.ts';
 
 const record = (parts: Partial<ValueRecord>): ValueRecord => ({

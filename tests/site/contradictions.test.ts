@@ -1,7 +1,9 @@
 import { describe, expect, test } from 'vitest';
 import { contradictions, contradictionsOf } from '../../src/handbook/contradictions.ts';
 import { furthestApart, tableContradictions } from '../../src/handbook/table-contradictions.ts';
-import type { FatRecord, TableSet, ValueRecord } from '../../src/reference/reference.ts';
+import type { FatRecord } from '../../src/reference/material-records.ts';
+import type { TableSet } from '../../src/reference/reference.ts';
+import type { ValueRecord } from '../../src/reference/values.ts';
 import { packagedReference } from '../reference/packaged-data.ts';
 
 const packaged = packagedReference();

@@ -1,7 +1,7 @@
 import { expect, test } from 'vitest';
 import type { Formulary } from '../../src/formulary/formulary.ts';
 import { lotRows } from '../../src/handbook/lots-register.ts';
-import type { FatLot } from '../../src/reference/reference.ts';
+import type { FatLot } from '../../src/reference/lot-records.ts';
 import { REFERENCE } from './fixture.ts';
 
 const lot = (wish: Partial<FatLot>): FatLot => ({

@@ -1,5 +1,6 @@
 import type { Charge } from '../../chemistry/charge.ts';
-import type { AdditiveRecord, Reference } from '../../reference/reference.ts';
+import type { AdditiveRecord } from '../../reference/material-records.ts';
+import type { Reference } from '../../reference/reference.ts';
 import { words } from '../../words/catalogue.ts';
 import { type Ingredient, ingredient } from './ingredient.ts';
 

@@ -1,5 +1,5 @@
 import type { FormulaDocument } from '../../formulary/document.ts';
-import type { Shop } from '../../reference/reference.ts';
+import type { Shop } from '../../reference/shop-records.ts';
 
 /** One avoirdupois ounce. [g] Exact by the international yard and pound agreement of 1959. */
 const OUNCE = 28.349523125;

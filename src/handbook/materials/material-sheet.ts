@@ -2,9 +2,9 @@ import type {
   AdditiveRecord,
   AlkaliRecord,
   LiquidRecord,
-  Reference,
-  ValueRecord,
-} from '../../reference/reference.ts';
+} from '../../reference/material-records.ts';
+import type { Reference } from '../../reference/reference.ts';
+import type { ValueRecord } from '../../reference/values.ts';
 import { words } from '../../words/catalogue.ts';
 import { fixed } from '../../words/numbers.ts';
 

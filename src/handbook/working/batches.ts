@@ -2,11 +2,11 @@ import { type FatWeighing, fatWeighings } from '../../chemistry/blend.ts';
 import { isBeforeSaponification } from '../../chemistry/saponification.ts';
 import { AS_USED, equivalentsOf, superfatFrom } from '../../chemistry/superfat.ts';
 import { weighBatch } from '../../formulary/compute-batch.ts';
-import { molarMassTerm } from './basics.ts';
+import { superfatStep } from './check.ts';
 import { named, type Working } from './context.ts';
+import { molarMassTerm } from './molar-masses.ts';
 import { type Section, type Step, step } from './step.ts';
 import { exact, figure, fractionOf, product, sumOf, symbol } from './term.ts';
-import { superfatStep } from './weights.ts';
 
 /** From the masses per 1000 g to what the scale shows, for each batch size that has weights. */
 export function batches(working: Working): readonly Section[] {

@@ -3,7 +3,8 @@ import type { Charge } from '../../chemistry/charge.ts';
 import type { Equivalents } from '../../chemistry/superfat.ts';
 import { AS_USED, equivalentsOf } from '../../chemistry/superfat.ts';
 import type { ComputedFormula } from '../../formulary/formulary.ts';
-import type { Reference, ValueRecord } from '../../reference/reference.ts';
+import type { Reference } from '../../reference/reference.ts';
+import type { ValueRecord } from '../../reference/values.ts';
 import { words } from '../../words/catalogue.ts';
 import { nameOf, sourceName } from '../names.ts';
 

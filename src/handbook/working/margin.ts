@@ -1,9 +1,10 @@
-import { expandedHalfWidth, superfatMargin } from '../../chemistry/margin.ts';
+import { superfatMargin } from '../../chemistry/margin.ts';
 import type { Range } from '../../chemistry/quantity.ts';
-import { isBeforeSaponification } from '../../chemistry/saponification.ts';
 import { equivalentsOf, type Reading, superfatFrom } from '../../chemistry/superfat.ts';
-import { molarMassTerm } from './basics.ts';
+import { superfatStep } from './check.ts';
 import { named, type Working } from './context.ts';
+import { type FatRange, fatRanges, halfWidth } from './fat-ranges.ts';
+import { molarMassTerm } from './molar-masses.ts';
 import { type Section, type Step, step } from './step.ts';
 import {
   exact,
@@ -17,7 +18,6 @@ import {
   symbol,
   type Term,
 } from './term.ts';
-import { superfatStep } from './weights.ts';
 
 /** The expanded interval and the worst case, contribution by contribution. */
 export function margin(working: Working): Section {
@@ -125,49 +125,6 @@ export function margin(working: Working): Section {
 }
 
 const HUNDRED = exact(100);
-
-interface FatRange {
-  /** As in the budget of the margin. */
-  readonly id: string;
-  /** The fat or the liquid that carries it. */
-  readonly of: string;
-  readonly mass: number;
-  readonly range: Range<number>;
-}
-
-function fatRanges({ charge }: Working, waxAsAcids: boolean): readonly FatRange[] {
-  const rangeOf = (fat: (typeof charge.fats)[number]['fat']) =>
-    waxAsAcids && fat.kind === 'wax' ? fat.acidValue : fat.saponificationValue;
-  return [
-    ...charge.fats.map(({ fat, mass }) => ({
-      id: `fat:${fat.id}`,
-      of: fat.id,
-      mass,
-      range: rangeOf(fat),
-    })),
-    ...charge.liquids.flatMap(({ liquid, mass, at }) =>
-      liquid.fatData && isBeforeSaponification(at)
-        ? [
-            {
-              id: `liquid:${liquid.id}`,
-              of: liquid.id,
-              mass: mass * liquid.fat,
-              range: rangeOf(liquid.fatData),
-            },
-          ]
-        : [],
-    ),
-  ];
-}
-
-/** Half of the range, times 2/√3 where every value in it is equally likely. */
-function halfWidth(range: Range<number>): Term {
-  if (range.spread === 'expanded') return figure(expandedHalfWidth(range));
-  return fractionOf(
-    product(exact(2), fractionOf(minus(figure(range.high, 8), figure(range.low, 8)), exact(2))),
-    rootOf(exact(3)),
-  );
-}
 
 function contribution(id: string, subject: string, numbers: Term, working: Working): Step {
   const value = working.document.superfat.budget.find((part) => part.id === id)?.halfWidth;

@@ -1,12 +1,17 @@
 import type { ComputedFormula } from '../../formulary/formulary.ts';
 import type { Reference } from '../../reference/reference.ts';
-import { acids, equivalents, hydroxide, liquids, molarMasses } from './basics.ts';
+import { acids, hydroxide } from './acids.ts';
+import { alkali } from './alkali.ts';
 import { batches } from './batches.ts';
+import { check } from './check.ts';
 import { workingOf } from './context.ts';
+import { equivalents, liquids } from './equivalents.ts';
+import { heat } from './heat.ts';
 import { margin } from './margin.ts';
-import { heat, profile, yieldSection } from './soap.ts';
+import { molarMasses } from './molar-masses.ts';
 import type { Section } from './step.ts';
-import { alkali, check, water } from './weights.ts';
+import { water } from './water.ts';
+import { profile, yieldSection } from './yield.ts';
 
 /**
  * The working of one formula: every equation with its numbers, in the order of a check by hand. Throws a

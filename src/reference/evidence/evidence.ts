@@ -1,4 +1,4 @@
-import type { How } from '../reference.ts';
+import type { How } from '../values.ts';
 
 /** What a computed number is held against. */
 export interface Published {

@@ -5,7 +5,9 @@ import {
   meanMolarMass,
 } from '../../chemistry/fatty-acids.ts';
 import type { Fat } from '../../chemistry/materials.ts';
-import type { FatRecord, Reference, ValueRecord } from '../reference.ts';
+import type { FatRecord } from '../material-records.ts';
+import type { Reference } from '../reference.ts';
+import type { ValueRecord } from '../values.ts';
 import { type EvidenceRow, judged } from './evidence.ts';
 
 /** Beyond a published range of another source than the composition's: 1 % of its middle. */

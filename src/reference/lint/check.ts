@@ -1,7 +1,8 @@
 import type { Constants } from '../../chemistry/constants.ts';
 import type { DataRule } from '../../words/en/problems-data.ts';
-import type { FatRecord, Source } from '../reference.ts';
+import type { FatRecord } from '../material-records.ts';
 import type { ProblemParts } from '../report.ts';
+import type { Source } from '../values.ts';
 import type { YamlPath } from '../yaml.ts';
 
 /** What a check may look at. */

@@ -1,4 +1,4 @@
-import type { FatRecord } from '../reference.ts';
+import type { FatRecord } from '../material-records.ts';
 import type { DataReport } from '../report.ts';
 import type { RawFat } from '../schema/fat.ts';
 import type { LintCheck, LintContext } from './check.ts';

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { ORDER_OF_CHOICE } from '../reference.ts';
+import { ORDER_OF_CHOICE } from '../values.ts';
 import { date } from './date.ts';
 import { line } from './value.ts';
 

@@ -1,6 +1,6 @@
 import { z } from 'zod';
-import type { How, ValueRecord } from '../reference.ts';
 import type { SchemaRule } from '../schema-problems.ts';
+import type { How, ValueRecord } from '../values.ts';
 
 export const HOW = [
   'measured',
