@@ -5,6 +5,8 @@ const SITE = ['tests/browser/**/*.test.ts', 'tests/built/**/*.test.ts'];
 
 export default defineConfig({
   test: {
+    // one worker less than cores is the runner's choice; on two cores that leaves one idle
+    maxWorkers: '100%',
     testTimeout: 30_000,
     hookTimeout: 180_000,
     reporters: ['default', ['json', { outputFile: '.cache/test-results.json' }]],

@@ -1,6 +1,6 @@
 import { pathToFileURL } from 'node:url';
 import type { Browser } from 'playwright-core';
-import { afterAll, beforeAll, describe, expect, inject, test } from 'vitest';
+import { afterAll, beforeAll, describe, inject, test } from 'vitest';
 import { sitePages } from '../support/site-files.ts';
 import { launch } from './launch.ts';
 import { serve } from './serve.ts';
@@ -23,10 +23,12 @@ afterAll(async () => {
   await Promise.all(servers.map(({ close }) => close()));
 });
 
-describe.each(['at the root of a host', 'under a sub-path', 'opened as a file'])('%s', (where) => {
+const WHERE = ['at the root of a host', 'under a sub-path', 'opened as a file'];
+
+describe.concurrent.each(WHERE)('%s', (where) => {
   test('every page loads whole, in silence, and asks no other host', {
-    timeout: 120_000,
-  }, async () => {
+    timeout: 240_000,
+  }, async ({ expect }) => {
     const base = bases[where] ?? '';
     const page = await browser.newPage();
     const wrong: string[] = [];

@@ -3,8 +3,11 @@ import porter2 from 'wink-porter2-stemmer';
 /** The stem of one lower-case word without marks. */
 export type Stem = (word: string) => string;
 
-/** Longer words keep their endings: the index holds none, and the package's patterns slow down with the square. */
-const LONGEST_WORD = 60;
+/**
+ * Longer words keep their endings: the package's patterns slow down with the square of the length. Addresses of
+ * sources, which the index takes as one word each, are shorter.
+ */
+const LONGEST_WORD = 300;
 
 // the package writes a consonant y as 3, and would give the code QY-013 an end of `01y`
 const english: Stem = (word) =>
