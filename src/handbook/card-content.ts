@@ -103,6 +103,7 @@ function footLines(
       ...(batch.digest ? [text.digest(batch.digest)] : []),
     ].join(', '),
     lots.length > 0 ? text.lots(lots.join(', ')) : text.noLots,
+    ...(formula.concession ? [text.concession(formula.concession.by)] : []),
     ...(reference.shop.invented ? [text.invented] : []),
   ];
 }

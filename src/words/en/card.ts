@@ -18,6 +18,7 @@ export const cardWords = {
     count === 1 ? 'Turn over: one more to weigh.' : `Turn over: ${count} more to weigh.`,
   continued: (group: string) => `${group}, continued`,
   scanned: 'Formula page',
+  concession: (by: string) => `By concession of ${by}: reason on the formula page.`,
   invented: 'Demonstration: an invented workshop.',
   links: {
     sheet: 'Bench sheet',
