@@ -6,6 +6,7 @@ import { rule as alcoholNearHeat } from './rules/alcohol-near-heat.ts';
 import { rule as alkaliLotRetest } from './rules/alkali-lot-retest.ts';
 import { rule as alkaliWithoutLot } from './rules/alkali-without-lot.ts';
 import { rule as allergenSources } from './rules/allergen-sources.ts';
+import { rule as batchAboveHeatLimit } from './rules/batch-above-heat-limit.ts';
 import { rule as batchAboveVessel } from './rules/batch-above-vessel.ts';
 import { rule as batchTooSmall } from './rules/batch-too-small.ts';
 import { rule as castorShare } from './rules/castor-share.ts';
@@ -14,6 +15,7 @@ import { rule as fastTrace } from './rules/fast-trace.ts';
 import { rule as fragranceAboveMaximum } from './rules/fragrance-above-maximum.ts';
 import { rule as fragranceMaximumUnknown } from './rules/fragrance-maximum-unknown.ts';
 import { rule as fragranceNearFlashPoint } from './rules/fragrance-near-flash-point.ts';
+import { rule as fragranceSpeedsTrace } from './rules/fragrance-speeds-trace.ts';
 import { rule as freeAcidSeizes } from './rules/free-acid-seizes.ts';
 import { rule as freeAlkaliPossible } from './rules/free-alkali-possible.ts';
 import { rule as hardAndBrittle } from './rules/hard-and-brittle.ts';
@@ -28,6 +30,7 @@ import { rule as lyeStrongerThanWritten } from './rules/lye-stronger-than-writte
 import { rule as oxidisesEarly } from './rules/oxidises-early.ts';
 import { rule as potassiumLye } from './rules/potassium-lye.ts';
 import { rule as rapeseedShare } from './rules/rapeseed-share.ts';
+import { rule as reworkAboveCap } from './rules/rework-above-cap.ts';
 import { rule as saltSetsFast } from './rules/salt-sets-fast.ts';
 import { rule as slowTrace } from './rules/slow-trace.ts';
 import { rule as stockCrystallises } from './rules/stock-crystallises.ts';
@@ -61,13 +64,16 @@ export const RULES: { readonly [Id in CautionId]: CautionRule<Id> } = {
   'stock-crystallises': stockCrystallises,
   'batch-too-small': batchTooSmall,
   'batch-above-vessel': batchAboveVessel,
+  'batch-above-heat-limit': batchAboveHeatLimit,
   'fragrance-above-maximum': fragranceAboveMaximum,
   'alkali-lot-retest': alkaliLotRetest,
   'alkali-without-lot': alkaliWithoutLot,
   'heats-batter': heatsBatter,
   'free-acid-seizes': freeAcidSeizes,
+  'fragrance-speeds-trace': fragranceSpeedsTrace,
   'salt-sets-fast': saltSetsFast,
   'oxidises-early': oxidisesEarly,
+  'rework-above-cap': reworkAboveCap,
   'rapeseed-share': rapeseedShare,
   'strips-skin': stripsSkin,
   'superfat-high': superfatHigh,

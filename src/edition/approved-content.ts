@@ -65,6 +65,7 @@ function formulaContent(formula: Formula): Canonical {
         at,
       })),
     ),
+    rework: formula.rework ?? undefined,
     targets: unlessBare(
       Object.fromEntries(
         Object.entries(formula.targets).map(([name, { min, max, unit }]) => [

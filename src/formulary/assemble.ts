@@ -43,6 +43,7 @@ export function assembleFormula(
       percentOfFats: entry['percent-of-fats'],
       at: entry.at,
     })),
+    rework: front.rework ?? null,
     targets: Object.fromEntries(
       Object.entries(front.targets ?? {}).flatMap(([name, written]) => {
         const target = written ? parseTarget(written) : null;

@@ -41,6 +41,8 @@ export interface Formula {
     readonly percentOfFats: number;
     readonly at: Stage;
   }[];
+  /** Soap made before that may be worked in, at most. Percent of the batter; `null`: the shop's cap alone. */
+  readonly rework: number | null;
   readonly targets: {
     /** `fats`, `lye`, `combine`, `unmould`, `cure`, `cook`: what the file says, parsed with its unit. */
     readonly [name: string]: {

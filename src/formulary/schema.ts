@@ -117,6 +117,12 @@ export const frontmatterSchema = z.strictObject({
       }),
     )
     .optional(),
+  rework: within(
+    'formula/percent-range',
+    'rework',
+    { low: 0, high: 50, above: true },
+    'it is the percent of the batter; leave it out where the shop’s cap holds',
+  ).optional(),
   targets: targetsSchema,
   release: releaseSchema,
   batches: filled('batches', z.string()).optional(),

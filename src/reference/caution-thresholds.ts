@@ -36,6 +36,7 @@ export const MATERIAL_LISTS = [
   'low-erucic-rapeseed',
   'castor',
   'fast-trace',
+  'fragrance-speeds-trace',
   'alcohols',
   'flammable',
   'setting-salts',

@@ -27,6 +27,8 @@ export interface BatchSize {
   readonly kinds: readonly ('bar' | 'paste' | 'liquid')[];
   /** What the vessel holds in which this size is mixed or cooked, where the shop states it. [mL] */
   readonly vessel?: number;
+  /** The most fats that the shop makes at one pour of this size, as more cannot lose its heat. */
+  readonly heatLimit?: Grams;
 }
 
 export interface Shop {
@@ -42,6 +44,8 @@ export interface Shop {
   readonly releaseMoisture: number;
   /** How far rounding may move the superfat before a size is too small for the scale. [percentage points] */
   readonly largestSuperfatShift: number;
+  /** Soap made before that the shop works into a batch at most, where it states it. [percent of the batter] */
+  readonly reworkCap?: number;
   readonly emergency: readonly { readonly label: string; readonly value: string }[];
   readonly rules: readonly string[];
   readonly releaseLimits: readonly ReleaseLimit[];

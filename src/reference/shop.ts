@@ -45,6 +45,7 @@ export function shopFrom(raw: RawShop, report: DataReport): Shop {
       fineScale: batch['fine-scale'] ?? null,
       kinds: batch.kinds,
       ...(batch.vessel === undefined ? {} : { vessel: batch.vessel }),
+      ...(batch['heat-limit'] === undefined ? {} : { heatLimit: grams(batch['heat-limit']) }),
     };
   });
   return {
@@ -56,6 +57,7 @@ export function shopFrom(raw: RawShop, report: DataReport): Shop {
     startTemperature: raw['start-temperature'],
     releaseMoisture: raw['release-moisture'],
     largestSuperfatShift: raw['largest-superfat-shift'],
+    ...(raw['rework-cap'] === undefined ? {} : { reworkCap: raw['rework-cap'] }),
     emergency: raw.emergency,
     rules: raw.rules ?? [],
     releaseLimits: raw['release-limits'],

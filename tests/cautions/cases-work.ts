@@ -1,3 +1,4 @@
+import { grams } from '../../src/chemistry/quantity.ts';
 import type { BatchDocument, FormulaDocument } from '../../src/formulary/document.ts';
 import type { Formula } from '../../src/formulary/formula.ts';
 import type { Reference } from '../../src/reference/reference.ts';
@@ -25,6 +26,18 @@ const refused = (rule: string) => (document: FormulaDocument) => ({
 const vessel = (millilitres: number) => (reference: Reference) => ({
   ...reference,
   shop: { ...reference.shop, batches: [batchSize({ vessel: millilitres })] },
+});
+const heatLimit = (mass: number) => (reference: Reference) => ({
+  ...reference,
+  shop: { ...reference.shop, batches: [batchSize({ heatLimit: grams(mass) })] },
+});
+const fatsPoured = (massOfFats: number) => (document: FormulaDocument) => ({
+  ...document,
+  batches: document.batches.map((size) => ({ ...size, massOfFats })),
+});
+const reworkCap = (percent: number) => (reference: Reference) => ({
+  ...reference,
+  shop: { ...reference.shop, reworkCap: percent },
 });
 const batter = (total: number) => (document: FormulaDocument) => ({
   ...document,
@@ -92,6 +105,18 @@ export const WORK_CASES: Cases<keyof typeof workCautions> = {
     says: ['One kilogram', '1.6 L', '2 L', '80 %'],
     silent: { reference: vessel(2000), document: batter(1600) },
   },
+  'batch-above-heat-limit': {
+    fires: { reference: heatLimit(7000), document: fatsPoured(7001) },
+    numbers: { batch: 'One kilogram', fats: 7.001, limit: 7 },
+    says: ['One kilogram', '7 kg'],
+    silent: { reference: heatLimit(7000), document: fatsPoured(7000) },
+  },
+  'rework-above-cap': {
+    fires: { formula: { rework: 10.5 }, reference: reworkCap(10) },
+    numbers: { percent: 10.5, cap: 10 },
+    says: ['10.5 %', 'cap is 10 %'],
+    silent: { formula: { rework: 10 }, reference: reworkCap(10) },
+  },
   'hot-process-boil-over': {
     fires: { formula: { process: 'hot' } },
     numbers: { fill: 50 },
@@ -128,6 +153,12 @@ export const WORK_CASES: Cases<keyof typeof workCautions> = {
     numbers: { share: 15 },
     says: ['Palm kernel oil', 'Cocoa butter', '15 %'],
     silent: { formula: fats(['olive', 86], ['palm-kernel', 8], ['cocoa-butter', 6]) },
+  },
+  'fragrance-speeds-trace': {
+    fires: { formula: additive('fragrance-quayside', 3) },
+    numbers: { percent: 3 },
+    says: ['Quayside', '3 %', 'pour at once'],
+    silent: { formula: additive('essential-oil-lavender', 3) },
   },
   'slow-trace': {
     fires: { document: unsaturated(65, 10.1) },

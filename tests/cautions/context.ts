@@ -77,6 +77,7 @@ const PLAIN: Formula = {
   water: { form: 'lye-concentration', value: 30, holdBack: 0 },
   liquids: [],
   additives: [],
+  rework: null,
   targets: {},
   release: { freeAlkali: null, ph: null, moisture: null },
   batches: null,

@@ -61,6 +61,12 @@ test('a published vector: the text that is hashed, written out, and its digest',
   expect(PLAIN).toBe('gab0-03b5-fe3b-p');
 });
 
+test('rework changes it, in the file or out of it', () => {
+  const with5 = fingerprint(FORMULA.replace('tags:', 'rework: 5\ntags:'));
+  expect(with5).not.toBe(PLAIN);
+  expect(fingerprint(FORMULA.replace('tags:', 'rework: 6\ntags:'))).not.toBe(with5);
+});
+
 describe('what does not change it', () => {
   test.each([
     ['tags', FORMULA.replace('tags: [plain]', 'tags: [other, bar]')],

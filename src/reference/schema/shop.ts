@@ -43,6 +43,7 @@ const batch = z
     'wet-mass': measure('mass', 5, 5000).optional(),
     mould: measure('volume', 50, 2_000_000).optional(),
     vessel: measure('volume', 50, 5_000_000).optional(),
+    'heat-limit': measure('mass', 50, 2_000_000).optional(),
     losses: z.number().gte(0).lte(50).optional(),
     scale: z.string(),
     'fine-scale': z.string().optional(),
@@ -105,6 +106,7 @@ export const shopSchema = z
     'start-temperature': measure('temperature', 0, 40),
     'release-moisture': z.number().gte(0).lte(40),
     'largest-superfat-shift': z.number().gt(0).lte(5),
+    'rework-cap': z.number().gt(0).lte(50).optional(),
     emergency: z.array(z.strictObject({ label: line, value: line })),
     rules: z.array(line).optional(),
     'release-limits': z.array(

@@ -17,6 +17,16 @@ export const workCautions = {
     text: `The size ${n.batch} is about ${fixed(n.litres, 1)} L of batter: ${fixed(n.fill, 0)} % of its ${plain(n.vessel, 1)} L vessel, where ${plain(n.limit)} % is the most.`,
     action: 'Take a larger vessel or a smaller size. Hot caustic soap that runs over burns.',
   }),
+  'batch-above-heat-limit': (n: { batch: string; fats: number; limit: number }) => ({
+    text: `The size ${n.batch} pours ${plain(n.fats, 2)} kg of fats at once; the shop’s limit for its heat is ${plain(n.limit, 2)} kg.`,
+    action:
+      'Take a smaller size or several moulds apart from each other. A block that cannot lose its heat cracks, boils up and runs over.',
+  }),
+  'rework-above-cap': (n: { percent: number; cap: number }) => ({
+    text: `Rework of ${plain(n.percent)} % of the batter. The shop’s cap is ${plain(n.cap)} %.`,
+    action:
+      'Do not make it with that much. The formulator must lower it. Rework counts in no weight and no superfat of this handbook: only soap that has passed its release test goes in.',
+  }),
   'hot-process-boil-over': (n: { fill: number }) => ({
     text: 'Soap can rise within seconds during the cook and run over, hot and caustic.',
     action: `Fill a steel cooker, never aluminium, to ${plain(n.fill)} % at most. Stay with it, lid off when it climbs, off the heat, stir down.`,
@@ -41,6 +51,11 @@ export const workCautions = {
   'fast-trace': (n: { materials: string; share: number; limit: number }) => ({
     text: `${n.materials} (${plain(n.share, 1)} % of the fats): the batter thickens early.`,
     action: 'Set out moulds and additives before the lye meets the fats. Blend in short bursts.',
+  }),
+  'fragrance-speeds-trace': (n: { materials: string; percent: number }) => ({
+    text: `${n.materials} (${plain(n.percent, 1)} % of the fats) is known to speed the batter: it can turn thick within seconds.`,
+    action:
+      'Work cool, have the moulds ready, take the blender out, stir the fragrance in by hand last, and pour at once.',
   }),
   'slow-trace': (n: { unsaturated: number; limit: number }) => ({
     text: `${fixed(n.unsaturated, 0)} % of the fatty acids are unsaturated: trace comes late and the bar stays soft for long.`,

@@ -31,6 +31,9 @@ water: { lye-concentration: 32 }
 # liquids:
 #   - { liquid: goat-milk, replaces-water: 50, at: lye }
 
+# Earlier soap that may be worked in, in percent of the batter; it counts in no weight.
+# rework: 5
+
 targets: { fats: 38 C, lye: 35 C, combine: 35-40 C, unmould: 24-36 h, cure: 42 d }
 
 # Limits that a batch must meet before it is released; the methods are named on the sheet.
