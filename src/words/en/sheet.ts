@@ -84,6 +84,9 @@ export const sheetWords = {
     title: 'What was done differently',
     deviations: 'Deviations and what was decided',
     rework: 'Rework added: batch, mass, agreed by',
+    /** Cut off, never rounded up: it is the most. */
+    reworkAtMost: (percent: number, mass: number) =>
+      `Rework added (at most ${plain(percent)} %, ${grams(Math.floor(mass))}): batch, mass, agreed by`,
     portions: 'Batter split: portion, mass, what joined it',
   },
   yield: {
