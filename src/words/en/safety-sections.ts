@@ -17,7 +17,7 @@ export const safetySections = [
       'Running water within a few steps, for eyes, for skin, for the floor, and an eyewash where the safety data sheet asks for one. Try them before you open the alkali.',
       'Know where the telephone, the first-aid box and the way out are.',
       'Clear the bench and the floor. No food, no drink, no loose sleeves or scarf, hair tied back.',
-      'Read the whole formula page, its cautions first. Compare the code, the revision, the batch size and the lots.',
+      'Read the whole formula page, its cautions first. Compare with your sheet: code, revision, batch size, and the lots (the numbers on the sacks and tubs). If one differs, do not start; ask the formulator, who wrote the formula and answers for it.',
     ],
   },
   {
@@ -48,7 +48,7 @@ export const safetySections = [
     items: [
       'Stainless steel, polypropylene or polyethylene marked for heat. Glass made for heat only where the shop’s rules allow it: lye eats it, and one day it cracks.',
       'Never aluminium, zinc or tin, nor vessels coated or soldered with them. Lye eats them and gives off hydrogen, which burns.',
-      'A deep vessel, at most half full, in a sink or a tub that would hold it all.',
+      'For the lye a deep vessel, at most half full, in a sink or a tub that would hold it all.',
       'Open the window or run the extractor. Alkali dust and the mist over hot lye hurt the lungs. If it makes you cough, step away and let it clear.',
     ],
   },
@@ -70,10 +70,10 @@ export const safetySections = [
     title: 'Heat',
     items: [
       'Lye heats itself. The formula page says how hot at most; where it says that there is no number, reckon with boiling.',
-      'Where a formula holds water back, the lye in the pot is stronger and hotter than its name says.',
+      'Where a formula holds water back, to be added later, the lye in the pot is stronger and hotter than the percent in its formula says.',
       'Let lye cool where it stands. Carry it only covered, with both hands, the way clear.',
       'Milk, honey, sugar and alcohol heat the batter by themselves. Leave it room, and look at it every few minutes.',
-      'Hot process: vessel at most half full, stay beside it, a spoon and a cool surface ready. It can rise like milk.',
+      'Hot process, where the soap is cooked: vessel at most half full, stay beside it, a spoon and a cool surface ready. It can rise like milk.',
       'Alcohol only away from flames, hot plates and sparks.',
     ],
   },
@@ -81,8 +81,8 @@ export const safetySections = [
     id: 'work',
     title: 'While you work',
     items: [
-      'Weigh the lines of one batch size from top to bottom and tick each one. Close the alkali straight after weighing; it draws water and carbon dioxide.',
-      'If you are not sure whether a line was weighed, start that vessel again.',
+      'Weigh the lines of one batch size from top to bottom and tick each one. Close the alkali straight after weighing; it takes up water and carbon dioxide from the air and gets weaker.',
+      'If you are not sure whether a line was weighed, start that vessel again, and set aside what is in it, labelled.',
       'Blender: switched on only under the surface, off before it comes out.',
       'Gloves and goggles for fresh soap too: unmoulding, cutting, washing up.',
       'No bar leaves the shop before its free alkali has been measured against the release limit of its formula.',
@@ -94,7 +94,7 @@ export const safetySections = [
     items: [
       'Keep others away. Protective equipment on first. If anybody is splashed, first aid comes before the floor.',
       'Solid alkali: sweep it up dry into a labelled plastic tub. No wet cloth, no bare hands, no metal dustpan of aluminium or zinc.',
-      'Lye: dam it with dry inert absorbent, take it up, then rinse the place with much water where the safety data sheet and the local rules allow the drain.',
+      'Lye: dam it with dry sand or another absorbent that the safety data sheet names, never sawdust or rags; take it up, then rinse the place with much water where the safety data sheet and the local rules allow the drain.',
       'Do not pour acid or vinegar on it. The reaction gives more heat and splashes.',
       'More than you can take up with what is at hand: leave, close the door, call.',
       'Batter that has boiled over is lye until it has been shown not to be.',
@@ -105,8 +105,8 @@ export const safetySections = [
     title: 'Storage',
     items: [
       'Alkali in its original container, tightly closed, dry, locked, below eye height, in a plastic tray.',
-      'Away from acids, from ammonium salts, from aluminium, zinc and tin, from food and from anything that burns.',
-      'Nothing that can be drunk from ever holds lye. Left-over lye is not kept for another day.',
+      'Away from acids, from ammonium salts (in some fertilisers; they give off ammonia), from aluminium, zinc and tin, from food and from anything that burns.',
+      'Nothing that can be drunk from ever holds lye. Left-over lye is not kept for another day; it goes the way of disposal below.',
       'Caked or damp alkali: do not weigh it. Its strength is unknown until it has been measured again (titrated).',
       'Stock lye, which comes dissolved, at the temperature that its supplier states; it can crystallise when it is cold.',
     ],

@@ -14,12 +14,12 @@ export const safetyPage = {
   noEmergency:
     'NO EMERGENCY NUMBER IS SET FOR THIS SHOP. Nobody works with lye before the numbers stand in data/shop.yaml and here.',
   practice:
-    'Sentences without a code are common practice, no source. The safety data sheet comes before them.',
+    'Sentences without a code are common practice, no source. Codes such as P305 mark official sentences, all listed at the end; where they say “several minutes”, the twenty minutes here are the longer and hold. The safety data sheet comes before this page.',
   neverNeutralise: 'Never put vinegar, acid or any other “antidote” on skin or into eyes. Water.',
   firstAidTitle: 'First aid',
   firstAidLead:
     'Lye goes on burning after it has stopped hurting. Rinse at once, shout for help, let somebody else telephone.',
-  tell: 'Say on the telephone: a corrosive alkali, sodium or potassium hydroxide; how strong, if you know; which part of the body; since when; where you are. Label and safety data sheet go with the injured person.',
+  tell: 'Say on the telephone: a corrosive alkali, sodium or potassium hydroxide; how strong (the percent on the bench sheet), if you know; which part of the body; since when; where you are. Label and safety data sheet go with the injured person.',
   firstAid: [
     {
       route: 'In the eyes',
@@ -54,12 +54,13 @@ export const safetyPage = {
   laundry: 'P363',
   rulesTitle: 'Rules of this shop',
   careTitle: 'What here needs most care',
-  careLead: 'Reckoned from the formulas of this edition.',
+  careLead:
+    'Reckoned from the formulas of this edition. Superfat is the part of the fats that the alkali leaves over; below zero it is alkali that is left over, and the soap burns. A formula below the shop’s limit stands here only with a written permission (a concession), and its page says why.',
   careDangers: 'With a caution marked danger',
   careNone: 'No formula carries a caution marked danger.',
-  careHottest: 'Hottest lye, no heat lost',
+  careHottest: 'Hottest lye, if it lost no heat',
   careUnknown: 'Lye heat without a number: reckon with boiling',
-  careLowest: 'Lowest superfat, scale counted',
+  careLowest: 'Lowest superfat, errors of the scales counted, and the batch size that has it',
   celsius: (value: number) => `${fixed(value, 0)} °C`,
   percent: (value: number) => `${fixed(value, 1)} %`,
   officialTitle: 'Official statements',
