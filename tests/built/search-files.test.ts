@@ -3,7 +3,9 @@ import { join } from 'node:path';
 import { gunzipSync } from 'node:zlib';
 import { describe, expect, inject, test } from 'vitest';
 import { chunksIn } from '../../src/search/build/chunk-scripts.ts';
+import { PAGE_TYPES } from '../../src/search/finder/page-types.ts';
 import { wordsOfText } from '../../src/search/reader/excerpt.ts';
+import { type Filters, sortedBy } from '../../src/search/reader/narrow.ts';
 import { inflatePayload } from '../../src/search/reader/payload.ts';
 import { openSearch, type SearchEntry } from '../../src/search/reader/search.ts';
 import { siteFiles } from '../support/site-files.ts';
@@ -90,4 +92,67 @@ describe('the search of the demo', () => {
       ).toContain(page);
     }
   });
+
+  test('pages are narrowed by type, kind and process, as the data of the formulas says', async () => {
+    const search = await open();
+    const all = [...search.contents.pages.keys()].map((page) => ({ page, score: 0, places: [] }));
+    const urls = async (filters: Filters) =>
+      Promise.all(
+        (await search.narrow(all, filters)).map(
+          async ({ page }) => (await search.pageText(page)).url,
+        ),
+      );
+    const formulas = formulaData().map((each) => ({ ...each, url: `formulas/${each.code}.html` }));
+    expect(await urls({ page: 'formulas' })).toEqual(formulas.map(({ url }) => url));
+    expect(await urls({ page: 'safety' })).toEqual(['safety.html']);
+    expect(await urls({ page: 'methods' })).toContain('methods.html');
+    expect(await urls({ page: 'materials' })).toContain('fats/olive.html');
+    const types = await Promise.all(PAGE_TYPES.map((page) => urls({ page })));
+    expect(types.flat()).toHaveLength(all.length);
+    for (const kind of ['bar', 'liquid', 'paste']) {
+      for (const process of ['cold', 'hot']) {
+        const wanted = formulas.filter((each) => each.kind === kind && each.process === process);
+        expect(await urls({ kind, process })).toEqual(wanted.map(({ url }) => url));
+      }
+    }
+  });
+
+  test('formulas can be sorted by superfat, iodine value and revision', async () => {
+    const search = await open();
+    const all = entry.rows.map((page) => ({ page, score: 0, places: [] }));
+    const formulas = new Map(formulaData().map((each) => [each.code, each]));
+    const values = {
+      superfat: (each: FormulaData) => each.superfat.written,
+      'iodine-value': (each: FormulaData) => each.profile?.iodineValue ?? null,
+      revision: (each: FormulaData) => each.revision,
+    };
+    expect([...search.contents.sorts.keys()].sort()).toEqual(Object.keys(values).sort());
+    for (const [key, numberOf] of Object.entries(values)) {
+      const sorted = await Promise.all(
+        sortedBy(search.contents, all, key, false).map(async ({ page }) => {
+          const formula = formulas.get((await search.pageText(page)).meta.code ?? '');
+          return Number((formula && numberOf(formula))?.toFixed(1));
+        }),
+      );
+      expect(sorted, key).toEqual([...sorted].sort((a, b) => a - b));
+      const having = [...formulas.values()].filter((each) => numberOf(each) !== null);
+      expect(sorted, key).toHaveLength(having.length);
+    }
+  });
 });
+
+interface FormulaData {
+  readonly code: string;
+  readonly kind: string;
+  readonly process: string;
+  readonly revision: number;
+  readonly superfat: { readonly written: number };
+  readonly profile: { readonly iodineValue: number | null } | null;
+}
+
+/** What the handbook gives out as files, by code. */
+const formulaData = (): readonly FormulaData[] =>
+  siteFiles(site)
+    .filter((path) => /^data\/formulas\/.*\.json$/.test(path))
+    .sort()
+    .map((path) => JSON.parse(read(path)));

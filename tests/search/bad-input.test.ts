@@ -2,6 +2,7 @@ import { beforeAll, describe, expect, test } from 'vitest';
 import type { IndexFile } from '../../src/search/build/data-kinds.ts';
 import { dataFiles } from '../../src/search/build/data-kinds.ts';
 import { indexPages } from '../../src/search/build/index-pages.ts';
+import { sortedBy } from '../../src/search/reader/narrow.ts';
 import { inflatePayload } from '../../src/search/reader/payload.ts';
 import { openSearch, type SearchEntry } from '../../src/search/reader/search.ts';
 import { memorySearch } from './memory-search.ts';
@@ -73,6 +74,12 @@ describe('a broken index is an error, never an answer', () => {
   test('a table of contents cut short', () =>
     expect(openWith(only(/pf_meta$/, (content) => content.subarray(0, 40)))).rejects.toThrow());
 
+  test('a filter or a sort that the index lacks', async () => {
+    const { search } = await memorySearch(files);
+    await expect(search.narrow([], { colour: 'red' })).rejects.toThrow('no filter "colour"');
+    expect(() => sortedBy(search.contents, [], 'colour', false)).toThrow('no sort "colour"');
+  });
+
   test('a load that failed is tried again', async () => {
     let broken = true;
     const search = await openWith(only(/pf_index$/, (content) => (broken ? undefined : content)));
@@ -84,7 +91,7 @@ describe('a broken index is an error, never an answer', () => {
 
 test('an unknown kind of file stops the build; programs and stock pages are left out', () => {
   const kinds = new Set(dataFiles(files).map(({ path }) => path.split('.').at(-1)));
-  expect([...kinds].sort()).toEqual(['json', 'pf_fragment', 'pf_index', 'pf_meta']);
+  expect([...kinds].sort()).toEqual(['json', 'pf_filter', 'pf_fragment', 'pf_index', 'pf_meta']);
   expect(files.some(({ path }) => path.startsWith('wasm.'))).toBe(true);
   expect(() => dataFiles([{ path: 'index/en_1.pf_new', content: new Uint8Array() }])).toThrow(
     'index/en_1.pf_new',

@@ -1,4 +1,5 @@
 import { type IndexedWord, placesOf } from '../../src/search/reader/index-format.ts';
+import type { Filters } from '../../src/search/reader/narrow.ts';
 import { readQuery } from '../../src/search/reader/query.ts';
 import { stemmerFor } from '../../src/search/reader/stemmer.ts';
 import type { memorySearch } from './memory-search.ts';
@@ -21,9 +22,10 @@ export async function compareAnswers(
   query: string,
   { search, words, entry }: Awaited<ReturnType<typeof memorySearch>>,
   stock: StockClient,
+  filters: Filters = {},
 ): Promise<string> {
-  const theirs = await stock.search(query);
-  const found = (await search.find(query)) ?? [];
+  const theirs = await stock.search(query, { filters });
+  const found = await search.narrow((await search.find(query)) ?? [], filters);
   const scores = new Map(theirs.map(({ id, score }) => [id, score]));
   const pairs = found.map(({ page, score, places }) => ({
     page,

@@ -2,6 +2,7 @@ import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 import { indexPages } from '../../src/search/build/index-pages.ts';
 import type { Excerpt } from '../../src/search/reader/excerpt.ts';
 import { excerptOf } from '../../src/search/reader/excerpt.ts';
+import { type Filters, sortedBy } from '../../src/search/reader/narrow.ts';
 import type { Search } from '../../src/search/reader/search.ts';
 import { compareAnswers, hasDroppedSymbol } from './compare-answers.ts';
 import { memorySearch } from './memory-search.ts';
@@ -11,6 +12,13 @@ import { syntheticPages, syntheticQueries } from './synthetic-pages.ts';
 // the long run: SEARCH_PAGES=2000 SEARCH_QUERIES=1000
 const PAGES = Number(process.env.SEARCH_PAGES ?? 200);
 const QUERIES = Number(process.env.SEARCH_QUERIES ?? 1200);
+const FILTERS: readonly Filters[] = [
+  {},
+  { kind: 'bar' },
+  { page: 'formulas', process: 'cold' },
+  { page: 'methods', kind: 'paste' },
+  { kind: 'cake' },
+];
 let memory: Awaited<ReturnType<typeof memorySearch>>;
 let ours: Search;
 let stock: StockClient;
@@ -41,6 +49,34 @@ describe('the reader finds what the stock client finds', () => {
     expect(differences).toEqual([]);
     expect(answered).toBeGreaterThan(QUERIES / 2);
     expect(undecided).toBeLessThanOrEqual(QUERIES / 200);
+  }, 3_600_000);
+
+  test(`filters and sorts: ${QUERIES / 4} queries`, async () => {
+    const differences: string[] = [];
+    let answered = 0;
+    for (const [i, query] of syntheticQueries(QUERIES / 4, 13).entries()) {
+      if (hasDroppedSymbol(query)) continue;
+      const filters = FILTERS[i % FILTERS.length] ?? {};
+      const verdict = await compareAnswers(query, memory, stock, filters);
+      if (verdict !== 'same' && verdict !== 'undecided') {
+        differences.push(`${JSON.stringify(query)} ${JSON.stringify(filters)}: ${verdict}`);
+      }
+      const key = i % 3 === 0 ? 'revision' : 'number';
+      const descending = i % 2 === 0;
+      const hits = await ours.narrow((await ours.find(query)) ?? [], filters);
+      const sorted = sortedBy(ours.contents, hits, key, descending);
+      const theirs = await stock.search(query, {
+        filters,
+        sort: { [key]: descending ? 'desc' : 'asc' },
+      });
+      const pages = sorted.map(({ page }) => ours.contents.pages[page]?.hash).join(' ');
+      if (pages !== theirs.map(({ id }) => id).join(' ')) {
+        differences.push(`${JSON.stringify(query)} by ${key}: another order`);
+      }
+      if (sorted.length > 1) answered++;
+    }
+    expect(differences).toEqual([]);
+    expect(answered).toBeGreaterThan(QUERIES / 16);
   }, 3_600_000);
 
   test('the excerpts are the same, marks included', async () => {

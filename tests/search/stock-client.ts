@@ -11,8 +11,13 @@ export interface StockResult {
   data(): Promise<{ readonly excerpt: string; readonly url: string }>;
 }
 
+export interface StockOptions {
+  readonly filters?: Readonly<Record<string, string>>;
+  readonly sort?: Readonly<Record<string, 'asc' | 'desc'>>;
+}
+
 export interface StockClient {
-  search(query: string): Promise<readonly StockResult[]>;
+  search(query: string, options?: StockOptions): Promise<readonly StockResult[]>;
   close(): void;
 }
 
@@ -37,7 +42,8 @@ export async function openStockClient(
   const basePath = `${pathToFileURL(folder).href}/`;
   const { createInstance } = await import(/* @vite-ignore */ `${basePath}pagefind.js`);
   const client = await createInstance({ basePath });
-  const search = async (query: string) => (await client.search(query)).results;
+  const search = async (query: string, options: StockOptions = {}) =>
+    (await client.search(query, options)).results;
   for (const query of warmUp) await search(query);
   return {
     search,

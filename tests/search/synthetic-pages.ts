@@ -24,11 +24,17 @@ export function syntheticPages(count: number, seed: number): readonly Page[] {
   const random = chance(seed);
   return Array.from({ length: count }, (_, i) => {
     const code = `QY-${String(i).padStart(4, '0')}`;
+    // a seventh has no number, so that not every page can be sorted by it
+    const number =
+      i % 7 === 6 ? '' : `<i data-pagefind-sort="number:${((i * 37) % 101) - 20.5}"></i>`;
+    const kind = ['bar', 'liquid', 'paste'][i % 3];
     const paragraphs = Array.from({ length: 2 + random.below(4) }, () => sentence(random, 20, 60));
     return {
       path: `formulas/${code}.html`,
       html: `<!doctype html><html lang="en"><head><title>x</title></head><body>
-        <main data-pagefind-body>
+        <main data-pagefind-body data-pagefind-filter="page:${i % 5 === 4 ? 'methods' : 'formulas'}">
+        <header data-pagefind-filter="kind[data-kind], process[data-process]" data-kind="${kind}"
+          data-process="${i % 2 ? 'hot' : 'cold'}" data-pagefind-sort="revision:${i % 9}">${number}</header>
         <h1>${escaped(sentence(random, 1, 4))}</h1>
         <p data-pagefind-meta="code" data-pagefind-sort="code" data-pagefind-weight="8">${code}</p>
         <ul data-pagefind-weight="${random.pick(['2', '4', '0.5'])}">${escaped(sentence(random, 2, 6))}</ul>

@@ -5,6 +5,8 @@ export interface IndexContents {
   readonly pages: readonly IndexedPage[];
   readonly chunks: readonly WordChunk[];
   readonly filters: readonly { readonly filter: string; readonly hash: string }[];
+  /** By sort key, the numbers of the pages that have it, in ascending order of its values. */
+  readonly sorts: ReadonlyMap<string, readonly number[]>;
   /** Names of the metadata fields; fields are numbered by their place here. */
   readonly fields: readonly string[];
 }
@@ -45,7 +47,7 @@ export interface Place {
 
 /** Reads a `pf_meta` payload. Throws a `RangeError` where it is not one. */
 export function readContents(payload: Uint8Array): IndexContents {
-  const [, pages, chunks, filters, , fields] = listOf(decodeCbor(payload), 6);
+  const [, pages, chunks, filters, sorts, fields] = listOf(decodeCbor(payload), 6);
   return {
     pages: listOf(pages).map((each) => {
       const [hash, words, group] = listOf(each, 3);
@@ -59,6 +61,12 @@ export function readContents(payload: Uint8Array): IndexContents {
       const [filter, hash] = listOf(each, 2);
       return { filter: textOf(filter), hash: textOf(hash) };
     }),
+    sorts: new Map(
+      listOf(sorts).map((each) => {
+        const [key, sorted] = listOf(each, 2);
+        return [textOf(key), listOf(sorted).map(countOf)];
+      }),
+    ),
     fields: listOf(fields).map(textOf),
   };
 }

@@ -4,10 +4,12 @@ import {
   type IndexContents,
   type IndexedWord,
   readContents,
+  readFilter,
   readWords,
   type WordChunk,
 } from './index-format.ts';
 import { exactWord, wordsStarting } from './lookup.ts';
+import { type Filters, narrowed } from './narrow.ts';
 import { findPhrase } from './phrase.ts';
 import { type QueryTerm, readQuery } from './query.ts';
 import { rank } from './rank.ts';
@@ -40,6 +42,8 @@ export interface Search {
   readonly contents: IndexContents;
   /** Pages that answer, best first; `null` where the query has no word in it. */
   find(typed: string): Promise<readonly Hit[] | null>;
+  /** The hits whose pages have the values of the filters. */
+  narrow(hits: readonly Hit[], filters: Filters): Promise<readonly Hit[]>;
   pageText(page: number): Promise<PageText>;
 }
 
@@ -58,6 +62,7 @@ export async function openSearch(
   const include = new Set(entry.includeCharacters);
   const stem = stemmerFor(entry.language, entry.stemExceptions);
   const chunkWords = once(async (hash) => readWords(await load(`index/${hash}.pf_index`)));
+  const filterPages = once(async (hash) => readFilter(await load(`filter/${hash}.pf_filter`)));
   const texts = once(
     async (hash): Promise<unknown> =>
       JSON.parse(new TextDecoder().decode(await load(`fragment/${hash}.pf_fragment`))),
@@ -108,6 +113,7 @@ export async function openSearch(
       );
       return query.phrase ? findPhrase(contents, terms) : rank(contents, terms);
     },
+    narrow: (hits, filters) => narrowed(contents, hits, filters, filterPages),
     async pageText(page) {
       const indexed = contents.pages[page];
       if (!indexed) throw new RangeError(`Search index: there is no page ${page}`);
