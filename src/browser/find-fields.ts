@@ -1,4 +1,5 @@
 import { dateOf, dayOf, type FinderData, type Property } from '../search/finder/finder-data.ts';
+import { pageTypeOf } from '../search/finder/page-types.ts';
 import {
   type Choice,
   type FinderState,
@@ -10,6 +11,7 @@ import {
 /** The inputs of the form, looked up once. */
 export interface Fields {
   readonly words: HTMLInputElement | null;
+  readonly where: HTMLSelectElement | null;
   readonly properties: readonly {
     readonly property: Property;
     readonly min: HTMLInputElement;
@@ -28,6 +30,7 @@ export function fieldsOf(form: HTMLElement, data: FinderData): Fields {
   const one = (selector: string) => form.querySelector<HTMLInputElement>(selector);
   return {
     words: one('[data-field="words"]'),
+    where: form.querySelector('select'),
     properties: data.properties.flatMap((property) => {
       const within = `[data-property="${property.id}"]`;
       const min = one(`${within} [data-end="min"]`);
@@ -49,7 +52,11 @@ export function fieldsOf(form: HTMLElement, data: FinderData): Fields {
 
 /** The state that the fields say, on top of what no field says. */
 export function readFields(fields: Fields, before: FinderState): FinderState {
-  let state: FinderState = { ...before, words: fields.words?.value ?? '' };
+  let state: FinderState = {
+    ...before,
+    words: fields.words?.value ?? '',
+    where: pageTypeOf(fields.where?.value ?? ''),
+  };
   for (const { property, min, max } of fields.properties) {
     state = withRange(state, property.id, {
       min: numberIn(min, property),
@@ -79,6 +86,7 @@ export function readFields(fields: Fields, before: FinderState): FinderState {
 /** Makes the fields say a state. A field that is being typed in is left alone where it means the same. */
 export function fillFields(fields: Fields, state: FinderState, columns: ReadonlySet<string>): void {
   if (fields.words && fields.words.value !== state.words) fields.words.value = state.words;
+  if (fields.where) fields.where.value = state.where ?? '';
   for (const { property, min, max, column } of fields.properties) {
     const range = state.ranges[property.id];
     fill(min, range?.min ?? null, property);

@@ -1,6 +1,7 @@
 import { answer, inOrder } from '../search/finder/answer.ts';
 import type { FinderData } from '../search/finder/finder-data.ts';
 import { limitsOf } from '../search/finder/limits.ts';
+import { PAGE_FILTER, type PageType } from '../search/finder/page-types.ts';
 import type { FinderState } from '../search/finder/state.ts';
 import { findWords } from '../words/en/find.ts';
 import { shownColumns } from './find-columns.ts';
@@ -36,8 +37,8 @@ export function drawResults(
   part('find-count').textContent = findWords.found(rows.length, data.codes.length);
   part('find-limits').replaceChildren(...limitList(limits, rows.length, withoutLimit));
   drawTable(data, state, inOrder(rows, data, state.sort, found?.rows ?? null), shown);
-  const onlyRows = limits.length > (found ? 1 : 0) ? new Set(rows) : null;
-  drawPages(found, onlyRows, shown.pages).catch(sayBroken);
+  const limited = limits.length > (found ? 1 : 0);
+  drawPages(found, limited ? new Set(rows) : null, state.where, shown.pages).catch(sayBroken);
   return { rows, dropped: limits.map((limit) => limit.dropped) };
 }
 
@@ -65,17 +66,23 @@ function drawTable(
 
 let turn = 0;
 
-/** With other limits than words only the rows that keep them are listed. */
+/**
+ * With other limits than words only the rows that keep them are listed, unless pages of another type than formulas
+ * are asked for: limits say nothing about those.
+ */
 async function drawPages(
   found: WordsFound | null,
-  onlyRows: ReadonlySet<number> | null,
+  limitedTo: ReadonlySet<number> | null,
+  where: PageType | null,
   shown: number,
 ): Promise<void> {
   const mine = ++turn;
   part('find-pages').hidden = !found;
   if (!found) return;
   const { words, search, hits, rowOf } = found;
-  const kept = onlyRows ? hits.filter(({ page }) => onlyRows.has(rowOf.get(page) ?? -1)) : hits;
+  const onlyRows = where === null || where === 'formulas' ? limitedTo : null;
+  const placed = where ? await search.narrow(hits, { [PAGE_FILTER]: where }) : hits;
+  const kept = onlyRows ? placed.filter(({ page }) => onlyRows.has(rowOf.get(page) ?? -1)) : placed;
   const { list, left } = await pageList(search, kept, shown);
   if (mine !== turn) return;
   list.dataset.words = words;

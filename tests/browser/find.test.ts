@@ -21,12 +21,12 @@ afterAll(async () => {
 });
 
 /** A page that fails the test at its first fault. */
-async function open(where: string, hash = ''): Promise<Page> {
+async function open(where: string, hash = '', path = 'find.html'): Promise<Page> {
   const page = await browser.newPage();
   page.on('pageerror', (error) => {
     throw error;
   });
-  await page.goto(`${bases[where]}find.html${hash}`);
+  await page.goto(`${bases[where]}${path}${hash}`);
   return page;
 }
 
@@ -72,6 +72,33 @@ describe.each(['under a sub-path', 'opened as a file'])('the finder %s', (where)
     expect(await again.locator('#find-table tbody tr').count()).toBe(Number(both.split(' ')[0]));
     await page.close();
     await again.close();
+  });
+
+  test('pages of one type are listed, and limits on formulas leave the others alone', async () => {
+    const page = await open(where, '#words=olive&where=methods&superfat=5..');
+    await page.locator('#find-pages-list li').first().waitFor();
+    const types = async () => {
+      const links = await page.locator('#find-pages-list li a').all();
+      const addresses = await Promise.all(links.map((link) => link.getAttribute('href')));
+      return new Set(addresses.map((address) => /(\w+)(\/|\.html)/.exec(address ?? '')?.[1]));
+    };
+    expect(await types()).toContain('methods');
+    expect(await types()).not.toContain('formulas');
+    await page.getByLabel('Pages listed').selectOption('Formulas');
+    await page.locator('#find-pages-list a[href*="formulas/"]').first().waitFor();
+    expect([...(await types())]).toEqual(['formulas']);
+    expect(await hash(page)).toBe('#words=olive&where=formulas&superfat=5..');
+    await page.close();
+  });
+
+  test('the page of contents takes words to the finder', async () => {
+    const page = await open(where, '', 'index.html');
+    await page.getByLabel('Find by a word').fill('olive & "lye"#');
+    await page.keyboard.press('Enter');
+    await page.waitForURL(/find\.html#words=/);
+    await page.locator('#find-form').waitFor();
+    expect(await page.locator('#find-words').inputValue()).toBe('olive & "lye"#');
+    await page.close();
   });
 
   test('by keyboard alone: words, a range, dropping it, sorting, to the formula', async () => {
@@ -229,7 +256,9 @@ describe('search files that are missing or damaged', () => {
 test('without scripts the lists answer', async () => {
   const context = await browser.newContext({ javaScriptEnabled: false });
   const page = await context.newPage();
-  await page.goto(`${bases['opened as a file']}find.html`);
+  await page.goto(`${bases['opened as a file']}index.html`);
+  expect(await page.locator('#contents-find').isVisible()).toBe(false);
+  await page.locator('#contents-find-link').click();
   expect(await page.locator('#find-off').isVisible()).toBe(true);
   expect(await page.locator('#find-form').isVisible()).toBe(false);
   await page.getByRole('link', { name: 'Formulas by fat' }).click();

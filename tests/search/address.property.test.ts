@@ -1,6 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { readAddress, writeAddress } from '../../src/search/finder/address.ts';
+import { PAGE_TYPES } from '../../src/search/finder/page-types.ts';
 import type { FinderState } from '../../src/search/finder/state.ts';
 import { FIXTURE as data } from './finder-fixture.ts';
 
@@ -20,6 +21,7 @@ const state: fc.Arbitrary<FinderState> = fc
       fc.string(),
       fc.string({ unit: 'binary' }).map((text) => text.toWellFormed()),
     ),
+    where: fc.constantFrom(null, ...PAGE_TYPES),
     superfat: fc.option(range),
     review: fc.option(days),
     order: fats,
@@ -30,8 +32,9 @@ const state: fc.Arbitrary<FinderState> = fc
       fc.record({ by: fc.constantFrom('code', 'name', 'superfat'), descending: fc.boolean() }),
     ),
   })
-  .map(({ words, superfat, review, order, split, only, columns, sort }) => ({
+  .map(({ words, where, superfat, review, order, split, only, columns, sort }) => ({
     words,
+    where,
     ranges: {
       ...(superfat && { superfat }),
       ...(review && { 'review-by': review }),
@@ -82,6 +85,7 @@ describe('addresses', () => {
 
   test.each([
     ['superfat=a..b', ['superfat=a..b']],
+    ['where=nowhere', ['where=nowhere']],
     ['superfat=..', ['superfat=..']],
     ['superfat=1e9', ['superfat=1e9']],
     ['superfat=1..2..3', ['superfat=1..2..3']],

@@ -35,6 +35,7 @@ describe('a search that cannot be answered is a problem at its place', () => {
     ['an unknown fat', 'fats=unobtainium', 'fats=unobtainium', 4],
     ['a range of words', 'superfat=low', 'superfat=low', 4],
     ['words, which no page answers when it is made', 'words=olive', 'words=olive', 4],
+    ['where to look for words', 'where=methods', 'where=methods', 4],
   ])('%s', (_, search, found, line) => {
     const { problems } = read(`searches:\n  - id: one\n    title: One\n    search: ${search}\n`);
     expect(problems).toHaveLength(1);

@@ -1,4 +1,5 @@
 import { dateOf, dayOf, type FinderData, type Property, type Trait } from './finder-data.ts';
+import { pageTypeOf } from './page-types.ts';
 import {
   type Choice,
   type FinderState,
@@ -18,7 +19,7 @@ export interface ReadAddress {
 const LONGEST = 20_000;
 
 /**
- * Reads `words=olive&superfat=4..6&fats=shea,!palm&fats-only=olive,shea&columns=superfat&sort=-superfat`, with or
+ * Reads `words=olive&where=formulas&superfat=4..6&fats=shea,!palm&fats-only=olive,shea&columns=superfat&sort=-superfat`, with or
  * without a `#` before it. Never throws: what cannot be understood is handed back.
  */
 export function readAddress(address: string, data: FinderData): ReadAddress {
@@ -41,6 +42,7 @@ export function writeAddress(state: FinderState, data: FinderData): string {
     if (values.length > 0) parts.push(`${key}=${values.map(encodeURIComponent).join(',')}`);
   };
   if (state.words !== '') add('words', [state.words.toWellFormed()]);
+  if (state.where) add('where', [state.where]);
   for (const property of data.properties) {
     const range = state.ranges[property.id];
     if (range) parts.push(`${property.id}=${rangeText(range, property)}`);
@@ -64,6 +66,10 @@ function readPart(
   const values = raw.split(',').map(decoded);
   const isProperty = (id: string) => data.properties.some((property) => property.id === id);
   if (key === 'words') return { ...state, words: decoded(raw) };
+  if (key === 'where') {
+    const where = pageTypeOf(raw);
+    return where && { ...state, where };
+  }
   if (key === 'columns') {
     const known = [...new Set(values)].filter((id) => id !== '');
     return known.every(isProperty) ? { ...state, columns: known } : null;

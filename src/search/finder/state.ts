@@ -1,6 +1,10 @@
+import type { PageType } from './page-types.ts';
+
 /** What was asked: all of it stands in the address, so that it can be kept and sent. */
 export interface FinderState {
   readonly words: string;
+  /** Of which type the pages are that are listed for the words; `null` for all. */
+  readonly where: PageType | null;
   /** By property. */
   readonly ranges: Readonly<Record<string, Range>>;
   /** By trait. */
@@ -32,6 +36,7 @@ export interface Sort {
 
 export const NOTHING_ASKED: FinderState = {
   words: '',
+  where: null,
   ranges: {},
   choices: {},
   columns: null,

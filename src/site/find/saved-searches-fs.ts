@@ -9,7 +9,7 @@ const NAME = 'searches.yaml';
 
 /**
  * The shop's kept searches, from `searches.yaml` of its data folder; none where there is no such file. A part of a
- * search that the finder does not know is a problem, as are words, which no page can answer for when it is made.
+ * search that the finder does not know is a problem, as are words and where to look for them, which no page can answer for when it is made.
  */
 export function readSavedSearches(
   folder: string,
@@ -33,7 +33,11 @@ export function readSavedSearches(
     }
     ids.add(id);
     const { state, ignored } = readAddress(search, data);
-    const unknown = state.words === '' ? ignored : [...ignored, `words=${state.words}`];
+    const unknown = [
+      ...ignored,
+      ...(state.words === '' ? [] : [`words=${state.words}`]),
+      ...(state.where ? [`where=${state.where}`] : []),
+    ];
     for (const part of unknown) {
       opened.report.in(['searches', i, 'search'], 'data/text-form', {
         found: `"${part}"`,

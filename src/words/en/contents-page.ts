@@ -20,6 +20,9 @@ export const contentsPage = {
   lowest: (percent: number) => `${fixed(percent, 1)} %`,
   lowestNote:
     'Superfat is what the formula is written for. Lowest is the lower end of its margin: how far it can fall with the natural spread of the fats and the assay of the alkali.',
+  find: 'Find by a word',
+  findGo: 'Find',
+  findMore: 'Find by words, fats, and ranges of properties',
   lyeTitle: 'Lye tables, by batch size',
   lyeLead: 'Alkali and water of all formulas on one sheet, for the wall beside the scale.',
   count: (n: number) => (n === 1 ? '1 formula' : `${n} formulas`),

@@ -55,6 +55,14 @@ export const findWords = {
   words: 'Words',
   wordsHint:
     'The beginning of a word is enough. Words in “quotes” must follow one another. Formulas, fats, safety and methods are searched.',
+  where: 'Pages listed',
+  everywhere: 'All pages',
+  places: {
+    formulas: 'Formulas',
+    materials: 'Fats and other materials',
+    safety: 'Safety',
+    methods: 'Methods',
+  },
   wordsCut: (most: number) => `Only the first ${most} letters are looked at.`,
   noWord: 'There is no word in this.',
   limits: 'Limits',
