@@ -60,7 +60,8 @@ export const safetyPage = {
   careNone: 'No formula carries a caution marked danger.',
   careHottest: 'Hottest lye, if it lost no heat',
   careUnknown: 'Lye heat without a number: reckon with boiling',
-  careLowest: 'Lowest superfat, errors of the scales counted, and the batch size that has it',
+  careLowest:
+    'Lowest superfat, errors of the scales counted (a batch size is named where it lies lowest)',
   celsius: (value: number) => `${fixed(value, 0)} °C`,
   percent: (value: number) => `${fixed(value, 1)} %`,
   officialTitle: 'Official statements',
