@@ -123,7 +123,7 @@ function heaviestWeighing(charge: Charge): Grams {
       charge.water,
       ...fatWeighings(charge.fats).map(({ mass }) => mass),
       ...charge.alkali.map(({ weighedMass }) => weighedMass),
-      ...charge.liquids.map(({ mass }) => mass),
+      ...[...charge.liquids, ...charge.additives, ...charge.afterCookFats].map(({ mass }) => mass),
     ),
   );
 }

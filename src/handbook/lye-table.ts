@@ -11,6 +11,8 @@ export interface LyeRow {
   readonly name: string;
   readonly kind: FormulaDocument['kind'];
   readonly revision: number;
+  /** One of its cautions is a danger. */
+  readonly danger: boolean;
   /** One text per alkali column, `null` where the formula does not use that alkali. */
   readonly alkali: readonly (string | null)[];
   readonly water: string | null;
@@ -56,6 +58,7 @@ export function lyeTable({ reference, formulas }: Formulary, batchId: string): L
       name,
       kind,
       revision,
+      danger: document.cautions.some(({ severity }) => severity === 'danger'),
       ...cellsOf(batch, alkalis, (id) => nameOf(reference, id)),
     };
   });
@@ -97,7 +100,7 @@ function cellsOf(
   batch: BatchDocument,
   alkalis: LyeTable['alkalis'],
   name: (id: string) => string,
-): Omit<LyeRow, 'code' | 'name' | 'kind' | 'revision'> {
+): Omit<LyeRow, 'code' | 'name' | 'kind' | 'revision' | 'danger'> {
   if (batch.refused) {
     const reason = words.breachText(batch.refused.rule, batch.refused.numbers);
     const alkali = alkalis.map(() => null);

@@ -35,8 +35,8 @@ export interface WeightsTable {
 const ORDER: readonly GroupName[] = ['lye', 'fats', 'trace', 'after-cook', 'dilution'];
 
 /**
- * The weights of one batch in working order: alkali and water and what joins them, then fats, then what
- * comes at trace, after the cook and at dilution. Empty groups are left out. Held-back water stands with
+ * The weights of one batch in working order: water, what is dissolved in it and the alkali last, then fats,
+ * then what comes at trace, after the cook and at dilution. Empty groups are left out. Held-back water stands with
  * the things at trace; `weighedWater` counts it, so the lye line is the rest.
  */
 export function weightsTable(
@@ -53,10 +53,6 @@ export function weightsTable(
     list.push({ ...line, text: weight(mass, step) });
   };
 
-  for (const { id, weighedMass, step } of batch.alkali) {
-    const lot = document.alkali.find((alkali) => alkali.id === id)?.assay.lot ?? null;
-    put('lye', { id, name: alkaliName(document, id, reference), lot }, weighedMass, step);
-  }
   const fromStock = batch.alkali.some(({ id }) => stockOf(document, id));
   const heldBack = batch.weighedHeldBack ?? 0;
   if (batch.weighedWater !== null) {
@@ -79,6 +75,12 @@ export function weightsTable(
   }
   for (const { id, weighedMass, step, at } of [...batch.liquids, ...batch.additives]) {
     put(at, { id, name: nameOf(reference, id), lot: null }, weighedMass, step);
+  }
+
+  // alkali goes into water, so it stands below everything that is in the jug before it
+  for (const { id, weighedMass, step } of batch.alkali) {
+    const lot = document.alkali.find((alkali) => alkali.id === id)?.assay.lot ?? null;
+    put('lye', { id, name: alkaliName(document, id, reference), lot }, weighedMass, step);
   }
 
   return {

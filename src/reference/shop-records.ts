@@ -6,7 +6,7 @@ export interface Scale {
   readonly step: Grams;
   /** Largest error of one weighing, half-width. */
   readonly error: Grams;
-  /** Largest weight it takes. */
+  /** Largest net weight it takes, in the heaviest vessel that is used on it. */
   readonly capacity: Grams;
 }
 

@@ -37,7 +37,7 @@ export const changesPage = {
   lowestWorstCase: 'Lowest superfat, worst case',
   profile: {
     saturated: 'Saturated acids',
-    monounsaturated: 'Monounsaturated acids',
+    monounsaturated: 'Acids with one double bond, ricinoleic too',
     polyunsaturated: 'Polyunsaturated acids',
     saponificationValue: 'Saponification value of the fats',
     iodineValue: 'Iodine value of the fats',

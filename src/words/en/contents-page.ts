@@ -29,7 +29,7 @@ export const contentsPage = {
   howTitle: 'How to use it',
   how: [
     'Find the formula by its code. The code on the mould label and the code on the page must be the same.',
-    'Take the block of your batch size and only that one. Weigh from top to bottom; each line has its unit.',
+    'Take the block of your batch size and only that one. Weigh each line into a cup of its own, from top to bottom; each line has its unit.',
     'Check that the lot on the bag is the lot that the page names, where it names one.',
     'Where a page gives a reason in place of a weight, there is no weight. Do not work one out at the bench; ask the formulator.',
     'On paper, look at the date at the top. A sheet from an older edition belongs in the bin.',

@@ -11,7 +11,7 @@ const properties = {
   'bis-allylic': ['Bis-allylic positions, BAPE', ''],
   'chain-length': ['Mean chain length', 'carbons'],
   saturated: ['Saturated acids', '%'],
-  monounsaturated: ['Monounsaturated acids', '%'],
+  monounsaturated: ['Acids with one double bond, ricinoleic too', '%'],
   polyunsaturated: ['Polyunsaturated acids', '%'],
   'lye-concentration': ['Lye concentration', '%'],
   'lye-as-made': ['Lye concentration in the pot', '%'],

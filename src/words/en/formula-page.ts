@@ -79,13 +79,11 @@ export const formulaPage = {
     ph: 'pH',
     moisture: 'Moisture, at most',
     targetColumn: 'Target',
-    releaseColumn: 'Release limit',
+    releaseColumn: 'Limit at the release test',
     none: 'The formula states none.',
   },
-  readCautions: (gravest: string, count: number) =>
-    count === 1
-      ? `${gravest}: one caution. Read it before you weigh.`
-      : `${gravest}: ${count} cautions. Read them before you weigh.`,
+  readCautions: (counts: readonly (readonly [severity: string, count: number])[]) =>
+    `Cautions: ${counts.map(([severity, count]) => `${count} ${severity.toLowerCase()}`).join(', ')}. Read them before you weigh.`,
   noAmount: 'no weight',
   noCautions:
     'No rule found anything to warn of beyond the safety page. The safety page still holds.',

@@ -1,6 +1,6 @@
 export const lyePage = {
   title: (label: string) => `Lye table: ${label}`,
-  lead: 'Weigh the alkali and the water of one line. The code stands at both ends of the line: they must be the same.',
+  lead: 'Weigh everything on one line, to its last column, each into a cup of its own. The code stands at both ends of the line: they must be the same.',
   order: 'Alkali into water, never water onto alkali.',
   columns: {
     code: 'Code',
@@ -9,6 +9,7 @@ export const lyePage = {
     water: 'Water',
     revision: 'Rev.',
   },
+  danger: 'Danger: read its cautions first',
   heldBack: 'Water held back',
   none: '—',
   refused: 'No weights at this size:',

@@ -107,7 +107,7 @@ export const batchMethods = [
   },
   {
     id: 'release',
-    title: 'Release limit',
+    title: 'Release limit: the floor of the superfat',
     text: 'The shop sets a floor for one end of one superfat interval, per kind and process. The formula’s interval and those of all its sizes, scale counted, are held against it; the lowest decides. Below the floor nothing is published without a concession in writing.',
     symbols: [
       ['s_low', 'lower end that the limit names', '1'],

@@ -77,7 +77,8 @@ const basicMethods = [
       ['y_Na, y_K', 'shares by pure mass', '1'],
     ],
     range: 'Any mixture of the two.',
-    ignores: 'Nothing.',
+    ignores:
+      'Carbonate in the alkali: with free fatty acids (stearic acid) it neutralises some of them and gives off gas, which leaves a little more hydroxide to the fats. At 0.5 % of carbonate that is about 0.3 percentage points of superfat in a soap rich in free acids; it is in none of the intervals.',
     source: 'Stoichiometry.',
   },
   {
@@ -107,7 +108,8 @@ const basicMethods = [
       ['U', 'half-width of the expanded interval', '1'],
     ],
     range: 'First order: good while the ranges are a few percent of their values.',
-    ignores: 'Correlation between fats, errors beyond the published ranges, slips at the scale.',
+    ignores:
+      'Correlation between fats, errors beyond the published ranges, the acidity of additives and liquids, moisture and carbon dioxide that the alkali took up after its assay, slips at the scale.',
     source: 'JCGM 100:2008, Guide to the expression of uncertainty in measurement (from memory).',
   },
   {

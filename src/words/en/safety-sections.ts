@@ -81,11 +81,11 @@ export const safetySections = [
     id: 'work',
     title: 'While you work',
     items: [
-      'Weigh the lines of one batch size from top to bottom and tick each one. Close the alkali straight after weighing; it takes up water and carbon dioxide from the air and gets weaker.',
+      'Weigh the lines of one batch size from top to bottom, each into a cup of its own, and tick each one. Close the alkali straight after weighing; it takes up water and carbon dioxide from the air and gets weaker.',
       'If you are not sure whether a line was weighed, start that vessel again, and set aside what is in it, labelled.',
       'Blender: switched on only under the surface, off before it comes out.',
       'Gloves and goggles for fresh soap too: unmoulding, cutting, washing up.',
-      'No bar leaves the shop before its free alkali has been measured against the release limit of its formula.',
+      'No bar leaves the shop before its free alkali has been measured against the limit that its formula states for it.',
     ],
   },
   {

@@ -26,7 +26,7 @@ export const safetyPage = {
       code: 'P305+P351+P338',
       short: 'Rinse, lids open, without stopping. Somebody telephones.',
       practice:
-        'Within seconds, with the nearest clean water. Hold the lids open; rinse from the nose outwards, so that nothing runs into the other eye. Go on for twenty minutes at the very least, and until help takes over, also on the way. Every splash of lye in an eye is seen by a doctor the same day.',
+        'Within seconds, with the nearest clean water. Hold the lids open; rinse from the nose outwards, so that nothing runs into the other eye. Go on for twenty minutes at the very least, and until help takes over, also on the way. Every splash of lye in an eye is an emergency: the emergency services are called at once, and the rinsing goes on all the way there.',
     },
     {
       route: 'On the skin or in the hair',
@@ -45,7 +45,7 @@ export const safetyPage = {
     {
       route: 'Breathed in',
       code: 'P304+P340',
-      short: 'Fresh air, sit upright, telephone if it does not stop.',
+      short: 'Fresh air, sit upright, telephone, also when the cough goes away.',
       practice:
         'Sit upright in fresh air. Ask a doctor or the poison centre even when the cough goes away: swelling can come later.',
     },

@@ -43,7 +43,7 @@ export const sheetWords = {
   cautions: 'Cautions',
   moreCautions: 'More cautions',
   weigh: {
-    title: 'Weigh in this order',
+    title: 'Weigh each into a cup of its own, in this order',
     columns: {
       tick: 'Done',
       what: 'Material',

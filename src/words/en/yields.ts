@@ -45,7 +45,7 @@ export const yieldWords = {
       release === null ? '' : `, tested for release from day ${release}`
     }.`,
   scheduleRule:
-    'Days count from the making, a part of a day as a whole one, by the lower ends of the targets. The release limits decide, not the calendar.',
+    'Days count from the making, a part of a day as a whole one, by the lower ends of the targets. The tests before release decide, not the calendar.',
   scheduleExample: (made: string, cut: string | null, release: string | null) =>
     `Made on ${made}${cut === null ? '' : `: cut from ${cut}`}${
       release === null ? '' : `${cut === null ? ':' : ','} tested for release from ${release}`
