@@ -31,7 +31,7 @@ test('no file, no searches', () =>
 
 describe('a search that cannot be answered is a problem at its place', () => {
   test.each([
-    ['an unknown property', 'hardness=5..', 'hardness=5..', 4],
+    ['an unknown property', 'weather=5..', 'weather=5..', 4],
     ['an unknown fat', 'fats=unobtainium', 'fats=unobtainium', 4],
     ['a range of words', 'superfat=low', 'superfat=low', 4],
     ['words, which no page answers when it is made', 'words=olive', 'words=olive', 4],
