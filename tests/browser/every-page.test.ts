@@ -1,6 +1,6 @@
 import { pathToFileURL } from 'node:url';
 import type { Browser } from 'playwright-core';
-import { afterAll, beforeAll, describe, inject, test } from 'vitest';
+import { afterAll, beforeAll, describe, expect, inject, test } from 'vitest';
 import { sitePages } from '../support/site-files.ts';
 import { launch } from './launch.ts';
 import { serve } from './serve.ts';
@@ -25,10 +25,10 @@ afterAll(async () => {
 
 const WHERE = ['at the root of a host', 'under a sub-path', 'opened as a file'];
 
-describe.concurrent.each(WHERE)('%s', (where) => {
+describe.each(WHERE)('%s', (where) => {
   test('every page loads whole, in silence, and asks no other host', {
     timeout: 240_000,
-  }, async ({ expect }) => {
+  }, async () => {
     const base = bases[where] ?? '';
     const page = await browser.newPage();
     const wrong: string[] = [];

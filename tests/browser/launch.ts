@@ -13,6 +13,9 @@ const ARGUMENTS = [
   '--disable-background-networking',
   '--disable-component-update',
   '--disable-sync',
+  // the tests walk a thousand pages and never go back: no page is kept, no process made ready for the next
+  '--disable-back-forward-cache',
+  '--disable-features=RenderDocument,SpareRendererForSitePerProcess',
   '--remote-debugging-pipe',
 ];
 

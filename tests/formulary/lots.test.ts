@@ -226,7 +226,7 @@ describe('stock lye of 50 %', () => {
     const batch = document.batches[0];
     if (!batch) throw new Error('the shop has a size');
     const { groups, notes } = weightsTable(document, batch, formulary.reference);
-    const [alkali, water] = groups[0]?.lines ?? [];
+    const [water, alkali] = groups[0]?.lines ?? [];
     expect(alkali).toMatchObject({ name: 'Sodium hydroxide, solution of 50\u00a0%', lot: 'N-5' });
     expect(water?.name).toBe('Water, besides the solution');
     expect(notes.join()).toMatch(/no solid.*counts the hydroxide dissolved/);
