@@ -33,13 +33,15 @@ export function evidenceTables(
   })).filter(({ lines }) => lines.length > 0);
 }
 
-/** How many rows, from how many publications that were read; rows from memory are counted apart. */
+/** How many rows, against what kind of evidence; rows from memory are counted apart. */
 export function evidenceCounts(rows: readonly EvidenceRow[]) {
   const read = rows.filter(({ how }) => how !== 'from memory' && how !== 'common practice');
   return {
     rows: rows.length,
+    read: read.length,
     sources: new Set(read.map(({ source }) => source)).size,
     memory: rows.filter(({ how }) => how === 'from memory').length,
+    practice: rows.filter(({ how }) => how === 'common practice').length,
     known: rows.filter(({ agrees }) => !agrees).length,
   };
 }

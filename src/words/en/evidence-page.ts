@@ -3,8 +3,15 @@ export const evidencePage = {
   title: 'Evidence',
   about: 'what the models give, beside what others have published',
   lead: 'What the models of this handbook give, beside what others have published. The tests run these very records before anything is built: a row that does not agree stops the build unless its reason stands here, and a reason that is no longer needed stops it too.',
-  counts: (rows: number, sources: number, memory: number, known: number) =>
-    `${rows} rows from ${sources} publications that were read; ${memory} more of the rows are known from memory only. ${known} do not agree, each with its reason.`,
+  counts: (of: {
+    readonly rows: number;
+    readonly read: number;
+    readonly sources: number;
+    readonly memory: number;
+    readonly practice: number;
+    readonly known: number;
+  }) =>
+    `${of.rows} rows: ${of.read} against ${of.sources} publications that were read, ${of.memory} against values known from memory only, ${of.practice} rules of the trade without a source. ${of.known} do not agree, each with its reason.`,
   groups: {
     'molar-mass': 'Molar masses',
     'equivalent-1908': 'Saponification equivalents of pure glycerides, by the weights of 1908',
