@@ -2,8 +2,13 @@ import { massByFat } from './blend.ts';
 import type { Charge } from './charge.ts';
 import type { Constants } from './constants.ts';
 import type { Fat } from './materials.ts';
-import type { Range } from './quantity.ts';
-import { equivalentsPerGram, isBeforeSaponification, valueAt } from './saponification.ts';
+import { grams, type Range } from './quantity.ts';
+import {
+  equivalentsPerGram,
+  isBeforeSaponification,
+  rangeThatCounts,
+  valueAt,
+} from './saponification.ts';
 import { type Equivalents, equivalentsOf, type Reading, superfatFrom } from './superfat.ts';
 
 /** What the scale may add to each weighing. [g] */
@@ -93,8 +98,8 @@ function spreadAround(
   const perEquivalent = (at.hydroxide - at.acid) / at.saponifiable ** 2;
 
   const addFat = (id: string, fat: Fat, mass: number) => {
-    const range = waxAsAcids && fat.kind === 'wax' ? fat.acidValue : fat.saponificationValue;
-    const equivalents = expandedHalfWidth(range) / (1000 * constants.hydroxide.K);
+    const equivalents =
+      expandedHalfWidth(rangeThatCounts(fat, waxAsAcids)) / (1000 * constants.hydroxide.K);
     budget.push({ id, halfWidth: perEquivalent * mass * equivalents });
   };
   // a fat by itself and in a blend has one saponification value, so its lines err together
@@ -184,7 +189,7 @@ function extreme(
         additives: charge.additives.map((line, i) => shift(line, weighing.additives[i])),
         alkali: charge.alkali.map((line, i) => ({
           ...line,
-          weighedMass: Math.max(0, line.weighedMass - side * (weighing.alkali[i] ?? 0)) as never,
+          weighedMass: grams(Math.max(0, line.weighedMass - side * (weighing.alkali[i] ?? 0))),
         })),
       },
       reading,

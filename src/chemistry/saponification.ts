@@ -1,6 +1,6 @@
 import type { Constants } from './constants.ts';
 import type { Fat, Stage } from './materials.ts';
-import { type MgKohPerGram, type MolesPerGram, molesPerGram } from './quantity.ts';
+import { type MgKohPerGram, type MolesPerGram, molesPerGram, type Range } from './quantity.ts';
 
 /**
  * Saponifiable equivalents of one gram of fat: e = S / (1000 M(KOH)). [mol/g]
@@ -14,12 +14,16 @@ export function equivalentsPerGram(value: MgKohPerGram, constants: Constants): M
 export type End = 'value' | 'low' | 'middle' | 'high';
 
 /**
- * The saponification value of a fat at one end of its range. [mg KOH/g]
+ * What a fat is sure to take up, as a range. [mg KOH/g]
  *
  * With `waxAsAcids`, a wax counts only its acid value: in cold process its esters may not react at all.
  */
+export const rangeThatCounts = (fat: Fat, waxAsAcids: boolean): Range<MgKohPerGram> =>
+  waxAsAcids && fat.kind === 'wax' ? fat.acidValue : fat.saponificationValue;
+
+/** The same at one end of the range. [mg KOH/g] */
 export function valueAt(fat: Fat, end: End, waxAsAcids: boolean): MgKohPerGram {
-  const range = waxAsAcids && fat.kind === 'wax' ? fat.acidValue : fat.saponificationValue;
+  const range = rangeThatCounts(fat, waxAsAcids);
   return end === 'middle' ? (((range.low + range.high) / 2) as MgKohPerGram) : range[end];
 }
 

@@ -3,7 +3,7 @@ import type { Charge } from './charge.ts';
 import type { Constants } from './constants.ts';
 import type { WeighingError } from './margin.ts';
 import type { Stage } from './materials.ts';
-import { type Grams, given, grams, type Outcome, refused } from './quantity.ts';
+import { type Grams, given, grams, moles, type Outcome, refused } from './quantity.ts';
 import { isBeforeSaponification } from './saponification.ts';
 import { AS_USED, equivalentsOf, superfatFrom } from './superfat.ts';
 
@@ -89,7 +89,7 @@ export function weigh(
         ...entry.line,
         weighedMass,
         pureMass,
-        moles: (pureMass / constants.hydroxide[entry.line.supply.cation]) as never,
+        moles: moles(pureMass / constants.hydroxide[entry.line.supply.cation]),
       };
     }),
     water: grams(massOf(inLye) + massOf(heldBack)),

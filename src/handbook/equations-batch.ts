@@ -1,3 +1,4 @@
+import { at, koh, minus, of, plus, times, v } from './equation-symbols.ts';
 import {
   brackets,
   equals,
@@ -10,16 +11,8 @@ import {
   squared,
   sub,
   sum,
-  variable,
 } from './mathml.ts';
 
-const v = variable;
-const at = (base: string, index: string) => sub(v(base), v(index));
-const of = (base: string, index: string) => sub(v(base), named(index));
-const minus = sign('−');
-const plus = sign('+');
-const times = sign('·');
-const koh = of('M', 'KOH');
 const function_ = (name: string, ...body: string[]) => row(named(name), brackets(...body));
 const relative = (index: string) => squared(brackets(over(of('u', index), v(index))));
 

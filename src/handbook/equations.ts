@@ -1,3 +1,4 @@
+import { at, koh, minus, of, plus, times, v } from './equation-symbols.ts';
 import { BATCH_EQUATIONS } from './equations-batch.ts';
 import {
   brackets,
@@ -12,16 +13,7 @@ import {
   squared,
   sub,
   sum,
-  variable,
 } from './mathml.ts';
-
-const v = variable;
-const at = (base: string, index: string) => sub(v(base), v(index));
-const of = (base: string, index: string) => sub(v(base), named(index));
-const minus = sign('−');
-const plus = sign('+');
-const times = sign('·');
-const koh = of('M', 'KOH');
 
 /** The equations of the methods page, by the id of the model. The words stand in `src/words`. */
 export const EQUATIONS = {

@@ -1,6 +1,6 @@
 import { expandedHalfWidth } from '../../chemistry/margin.ts';
 import type { Range } from '../../chemistry/quantity.ts';
-import { isBeforeSaponification } from '../../chemistry/saponification.ts';
+import { isBeforeSaponification, rangeThatCounts } from '../../chemistry/saponification.ts';
 import type { Working } from './context.ts';
 import { exact, figure, fractionOf, minus, product, rootOf, type Term } from './term.ts';
 
@@ -15,14 +15,12 @@ export interface FatRange {
 
 /** Every fat that meets the alkali, with the range that its doubt comes from. */
 export function fatRanges({ charge }: Working, waxAsAcids: boolean): readonly FatRange[] {
-  const rangeOf = (fat: (typeof charge.fats)[number]['fat']) =>
-    waxAsAcids && fat.kind === 'wax' ? fat.acidValue : fat.saponificationValue;
   return [
     ...charge.fats.map(({ fat, mass }) => ({
       id: `fat:${fat.id}`,
       of: fat.id,
       mass,
-      range: rangeOf(fat),
+      range: rangeThatCounts(fat, waxAsAcids),
     })),
     ...charge.liquids.flatMap(({ liquid, mass, at }) =>
       liquid.fatData && isBeforeSaponification(at)
@@ -31,7 +29,7 @@ export function fatRanges({ charge }: Working, waxAsAcids: boolean): readonly Fa
               id: `liquid:${liquid.id}`,
               of: liquid.id,
               mass: mass * liquid.fat,
-              range: rangeOf(liquid.fatData),
+              range: rangeThatCounts(liquid.fatData, waxAsAcids),
             },
           ]
         : [],
