@@ -1,9 +1,11 @@
 import { resolve } from 'node:path';
 import { type EditionOptions, loadEdition } from '../edition/load-edition-fs.ts';
 import type { ShopFolders } from '../formulary/formulary.ts';
-import { packagedData } from '../formulary/load.ts';
+import { packagedData, readData } from '../formulary/load.ts';
 import { readEvidence } from '../reference/evidence/read-evidence-fs.ts';
 import { readPrices } from '../reference/prices-fs.ts';
+import type { Reference } from '../reference/reference.ts';
+import type { ReadReference } from '../reference/reference-from.ts';
 import { finderData } from '../site/find/finder-data.ts';
 import { readSavedSearches } from '../site/find/saved-searches-fs.ts';
 import type { SiteInput } from '../site/input.ts';
@@ -24,7 +26,10 @@ export function loadSite(folders: ShopFolders, options: SiteOptions): LoadedSite
   if (!loaded.ok) return loaded;
   const { edition, problems } = loaded;
   const { formulary, asOf } = edition;
-  const evidence = readEvidence(packagedData(), formulary.reference);
+  const packaged = options.packagedData ?? packagedData();
+  const published = packagedReference(packaged, folders, formulary.reference);
+  if (!published.reference) return { ok: false, problems: [...problems, ...published.problems] };
+  const evidence = readEvidence(packaged, published.reference);
   const kept = readSavedSearches(folders.data, finderData(formulary));
   const priced = readPrices(folders.data, formulary.reference);
   const more = [...evidence.problems, ...kept.problems, ...priced.problems];
@@ -35,11 +40,25 @@ export function loadSite(folders: ShopFolders, options: SiteOptions): LoadedSite
     input: {
       edition,
       formulary,
-      evidence: evidence.rows,
+      evidence: { rows: evidence.rows, reference: published.reference },
       searches: kept.searches,
       prices: options.withCosts ? priced.prices : null,
       asOf,
       formulasFolder: resolve(folders.formulas),
     },
   };
+}
+
+/**
+ * The reference data as they come, without a shop's own over them: the published values of the evidence belong to
+ * these, and a fat that a shop replaces must not stop its build over somebody else's row.
+ */
+function packagedReference(
+  packaged: string,
+  { data }: ShopFolders,
+  used: Reference,
+): ReadReference {
+  return resolve(packaged) === resolve(data)
+    ? { reference: used, problems: [] }
+    : readData(packaged, packaged);
 }

@@ -2,6 +2,7 @@ import type { Edition } from '../edition/edition.ts';
 import type { Formulary } from '../formulary/formulary.ts';
 import type { EvidenceRow } from '../reference/evidence/evidence.ts';
 import type { Prices } from '../reference/prices-fs.ts';
+import type { Reference } from '../reference/reference.ts';
 import type { SavedSearch } from '../search/saved/saved-search.ts';
 
 /** Everything that the pages are made from. */
@@ -10,8 +11,8 @@ export interface SiteInput {
   readonly edition: Edition;
   /** That of the edition: formulas in use only. */
   readonly formulary: Formulary;
-  /** Computed against published, for the models and the fats. */
-  readonly evidence: readonly EvidenceRow[];
+  /** Computed against published, for the models and the fats of the packaged data, and those data. */
+  readonly evidence: { readonly rows: readonly EvidenceRow[]; readonly reference: Reference };
   readonly searches: readonly SavedSearch[];
   /** Only where the build was asked for costs: what is not here can reach no page. */
   readonly prices: Prices | null;
