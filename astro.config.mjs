@@ -1,6 +1,7 @@
 import { defineConfig } from 'astro/config';
 import { benchCards } from './src/site/integrations/bench-cards.ts';
 import { formulaPictures } from './src/site/integrations/formula-pictures.ts';
+import { ownWords } from './src/site/integrations/own-words.ts';
 import { relativeLinks } from './src/site/integrations/relative-links.ts';
 import { searchIndex } from './src/site/integrations/search-index.ts';
 
@@ -16,5 +17,9 @@ export default defineConfig({
   devToolbar: { enabled: false },
   // pictures first: the links are checked against what is there
   integrations: [formulaPictures(), benchCards(), relativeLinks(), searchIndex()],
-  vite: { build: { assetsInlineLimit: 0 } },
+  vite: {
+    build: { assetsInlineLimit: 0 },
+    plugins: [ownWords()],
+    worker: { plugins: () => [ownWords()] },
+  },
 });

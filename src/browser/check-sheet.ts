@@ -1,3 +1,4 @@
+import './speak.ts';
 import { checkSheet, type SheetList, type SheetState } from '../edition/check-sheet.ts';
 import { checkPage as text } from '../words/en/check-page.ts';
 import { part } from './find-dom.ts';

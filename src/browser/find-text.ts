@@ -1,12 +1,13 @@
 import { dateOf, type Property } from '../search/finder/finder-data.ts';
 import type { LimitSubject } from '../search/finder/limits.ts';
+import { dateText } from '../words/dates.ts';
 import { findWords } from '../words/en/find.ts';
 import { fixed } from '../words/numbers.ts';
 
 /** A value as it is shown, with its unit. */
 export function valueText(value: number | null, property: Property): string {
   if (value === null) return findWords.noValue;
-  if (property.format === 'date') return dateOf(value);
+  if (property.format === 'date') return dateText(dateOf(value));
   const number = fixed(value, property.decimals);
   return property.unit === '' ? number : `${number} ${property.unit}`;
 }

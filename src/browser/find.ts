@@ -1,3 +1,4 @@
+import './speak.ts';
 import { readAddress, writeAddress } from '../search/finder/address.ts';
 import type { FinderData } from '../search/finder/finder-data.ts';
 import { type FinderState, NOTHING_ASKED } from '../search/finder/state.ts';

@@ -1,3 +1,4 @@
+import './speak.ts';
 import { shopping as text } from '../words/en/shopping.ts';
 import { element, part } from './find-dom.ts';
 import {

@@ -1,7 +1,8 @@
 import type { CautionDocument } from '../formulary/document.ts';
 import type { ComputedFormula, Formulary } from '../formulary/formulary.ts';
 import type { Reference } from '../reference/reference.ts';
-import { type CautionId, cautionTexts } from '../words/en/cautions.ts';
+import { words } from '../words/catalogue.ts';
+import type { CautionId } from '../words/en/cautions.ts';
 import { type Basis, type CautionContext, SEVERITIES } from './rule.ts';
 import { RULES } from './rules.ts';
 
@@ -40,7 +41,7 @@ function applied<Id extends CautionId>(id: Id, context: CautionContext): Caution
     id,
     severity,
     numbers: { ...numbers },
-    ...cautionTexts[id](numbers),
+    ...words.cautionTexts[id](numbers),
     basis: basisText(basis, context.reference),
   }));
 }

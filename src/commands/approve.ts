@@ -1,8 +1,9 @@
 import { completeApproval, prepareApproval } from '../edition/approve-fs.ts';
-import { approvalLines } from '../words/en/approval-lines.ts';
+import { words } from '../words/catalogue.ts';
 import { problemText } from '../words/problem-text.ts';
 import { FOLDERS, readArguments } from './arguments.ts';
 import { asOfFor } from './as-of.ts';
+import { speakFor } from './speak-for.ts';
 
 /**
  * Shows what changed in a formula since it was last approved, then writes the approval into its file and
@@ -26,6 +27,7 @@ export function main(args: readonly string[]): number {
     return read.status;
   }
   const { formulas = 'formulas', data = 'data', by = '', until = '' } = read.given;
+  speakFor(data);
   const on = asOfFor(read.given.on, data);
   const prepared = prepareApproval(
     { formulas, data },
@@ -36,7 +38,7 @@ export function main(args: readonly string[]): number {
     return 1;
   }
   const { pending } = prepared;
-  for (const line of approvalLines(pending)) console.log(line);
+  for (const line of words.approvalLines(pending)) console.log(line);
   if (read.given['show-only'] !== undefined) return 0;
   const problems = completeApproval(pending);
   for (const problem of problems) console.error(problemText(problem));

@@ -18,6 +18,7 @@ import { counted, problemSummary, problemText } from '../words/problem-text.ts';
 import { FOLDERS, readArguments } from './arguments.ts';
 import { asOfFor } from './as-of.ts';
 import { loadSite } from './load-site.ts';
+import { speakFor } from './speak-for.ts';
 
 // the build must not tell anybody that it ran
 process.env.ASTRO_TELEMETRY_DISABLED = '1';
@@ -50,6 +51,7 @@ export async function main(args: readonly string[]): Promise<number> {
     return read.status;
   }
   const { formulas = 'formulas', data = 'data', out = 'dist' } = read.given;
+  speakFor(data);
   const asOf = asOfFor(read.given['as-of'], data);
   if (!isCalendarDate(asOf)) {
     console.error(`--as-of: "${asOf}" is no date. Write it like 2026-12-01.`);

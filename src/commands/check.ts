@@ -2,6 +2,7 @@ import { loadFormulary } from '../formulary/load.ts';
 import { counted, problemSummary, problemText } from '../words/problem-text.ts';
 import { FOLDERS, readArguments } from './arguments.ts';
 import { asOfFor } from './as-of.ts';
+import { speakFor } from './speak-for.ts';
 
 /** Finds all problems of formulas and data, without building anything. Status 1 where there is an error. */
 export function main(args: readonly string[]): number {
@@ -16,6 +17,7 @@ export function main(args: readonly string[]): number {
   }
   const start = performance.now();
   const { formulas = 'formulas', data = 'data' } = read.given;
+  speakFor(data);
   const loaded = loadFormulary({ formulas, data }, { asOf: asOfFor(read.given['as-of'], data) });
   for (const problem of loaded.problems) console.error(problemText(problem));
   const counts = loaded.ok

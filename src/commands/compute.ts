@@ -3,6 +3,7 @@ import { withDigests } from '../edition/with-digests.ts';
 import { loadFiles } from '../formulary/load-files.ts';
 import { problemText } from '../words/problem-text.ts';
 import { FOLDERS, readArguments } from './arguments.ts';
+import { speakFor } from './speak-for.ts';
 
 /**
  * Prints the computed document of each file as JSON on standard output: one object for one file, an array for
@@ -19,7 +20,9 @@ export function main(args: readonly string[]): number {
     console.error(read.text);
     return read.status;
   }
-  const { reference, formulas, problems } = loadFiles(read.files, read.given.data ?? 'data');
+  const { data = 'data' } = read.given;
+  speakFor(data);
+  const { reference, formulas, problems } = loadFiles(read.files, data);
   for (const problem of problems) console.error(problemText(problem));
   if (reference) {
     const finished = withDigests(withCautions({ reference, formulas })).formulas;

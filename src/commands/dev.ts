@@ -9,6 +9,7 @@ import { counted, problemSummary, problemText } from '../words/problem-text.ts';
 import { FOLDERS, readArguments } from './arguments.ts';
 import { asOfFor } from './as-of.ts';
 import { loadSite } from './load-site.ts';
+import { speakFor } from './speak-for.ts';
 
 // the preview must not tell anybody that it ran
 process.env.ASTRO_TELEMETRY_DISABLED = '1';
@@ -36,6 +37,7 @@ export async function main(args: readonly string[]): Promise<number | undefined>
     return read.status;
   }
   const { formulas = 'formulas', data = 'data' } = read.given;
+  speakFor(data);
   const asOf = asOfFor(read.given['as-of'], data);
   const port = Number(read.given.port ?? 4321);
   if (!isCalendarDate(asOf)) {

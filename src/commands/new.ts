@@ -3,7 +3,7 @@ import { join } from 'node:path';
 import { readFormulas } from '../formulary/formulas-fs.ts';
 import { readFormula } from '../formulary/read-formula.ts';
 import { sameCode } from '../formulary/same-code.ts';
-import { starterFormula } from '../words/en/starter-formula.ts';
+import { words } from '../words/catalogue.ts';
 import { problemText } from '../words/problem-text.ts';
 import { FOLDERS, readArguments } from './arguments.ts';
 import { nextCode } from './next-code.ts';
@@ -31,7 +31,7 @@ export function main(args: readonly string[]): number {
     console.error(`The code ${code} is taken; the next free one is ${nextCode(codes)}.`);
     return 1;
   }
-  const text = starterFormula(code, name, today());
+  const text = words.starterFormula(code, name, today());
   const { problems } = readFormula(text, 'the new file', null);
   if (problems.length > 0) {
     for (const problem of problems) console.error(problemText(problem));

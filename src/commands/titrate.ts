@@ -1,6 +1,6 @@
 import { expandedUncertainty, type Titration, titrate } from '../chemistry/titration.ts';
 import { lotsSchema } from '../reference/schema/lots.ts';
-import { titrationLines as text } from '../words/en/titration-lines.ts';
+import { words } from '../words/catalogue.ts';
 import { readArguments } from './arguments.ts';
 
 const READINGS = ['blank', 'sample', 'mass', 'normality'] as const;
@@ -31,12 +31,13 @@ export function main(args: readonly string[]): number {
   }
   const { given } = read;
   const missing = READINGS.filter((name) => given[name] === undefined);
-  if (missing.length > 0) return refuse(text.missing(missing));
+  if (missing.length > 0) return refuse(words.titrationLines.missing(missing));
   const numbers = new Map<string, number>();
   for (const name of [...READINGS, ...UNCERTAINTIES.map((of) => `${of}-uncertainty` as const)]) {
     const written = given[name];
     if (written === undefined) continue;
-    if (!/^-?[0-9]+(\.[0-9]+)?$/.test(written)) return refuse(text.number(name, written));
+    if (!/^-?[0-9]+(\.[0-9]+)?$/.test(written))
+      return refuse(words.titrationLines.number(name, written));
     numbers.set(name, Number(written));
   }
   const [blank = 0, sample = 0, mass = 0, normality = 0] = READINGS.map((name) =>
@@ -44,10 +45,11 @@ export function main(args: readonly string[]): number {
   );
   const stated = UNCERTAINTIES.map((of) => numbers.get(`${of}-uncertainty`));
   if (stated.some((half) => half !== undefined && half < 0)) {
-    return refuse(text.noUncertaintyBelowZero);
+    return refuse(words.titrationLines.noUncertaintyBelowZero);
   }
   const [ofVolume = 0, ofMass = 0, ofNormality = 0] = stated;
-  if (!(mass > 0 && normality > 0 && sample >= 0 && blank > sample)) return refuse(text.unusable);
+  if (!(mass > 0 && normality > 0 && sample >= 0 && blank > sample))
+    return refuse(words.titrationLines.unusable);
   const reading: Titration = {
     blank,
     sample,
@@ -57,9 +59,9 @@ export function main(args: readonly string[]): number {
   };
   const { value } = titrate(reading);
   if (stated.some((half) => half === undefined)) {
-    console.log(text.value(value));
-    console.log(text.equation(normality, blank, sample, mass));
-    console.log(text.noUncertainty);
+    console.log(words.titrationLines.value(value));
+    console.log(words.titrationLines.equation(normality, blank, sample, mass));
+    console.log(words.titrationLines.noUncertainty);
     return 0;
   }
   const { together, volume, mass: byMass, normality: byNormality } = expandedUncertainty(reading);
@@ -79,16 +81,16 @@ export function main(args: readonly string[]): number {
     status: 'quarantine',
   };
   if (!lotsSchema.safeParse({ fats: [{ ...entry, 'retest-by': '2000-01-01' }] }).success) {
-    return refuse(text.outside(value, uncertainty));
+    return refuse(words.titrationLines.outside(value, uncertainty));
   }
-  console.log(text.valueWithin(rounded, uncertainty));
-  console.log(text.equation(normality, blank, sample, mass));
-  console.log(text.part.volume(volume));
-  console.log(text.part.mass(byMass));
-  console.log(text.part.normality(byNormality));
-  console.log(`\n${text.lotsLine}`);
+  console.log(words.titrationLines.valueWithin(rounded, uncertainty));
+  console.log(words.titrationLines.equation(normality, blank, sample, mass));
+  console.log(words.titrationLines.part.volume(volume));
+  console.log(words.titrationLines.part.mass(byMass));
+  console.log(words.titrationLines.part.normality(byNormality));
+  console.log(`\n${words.titrationLines.lotsLine}`);
   console.log(`  - ${flow({ ...entry, 'retest-by': retestBy })}`);
-  if (!given.fat || !given.lot || !given['retest-by']) console.log(text.fillIn);
+  if (!given.fat || !given.lot || !given['retest-by']) console.log(words.titrationLines.fillIn);
   return 0;
 }
 

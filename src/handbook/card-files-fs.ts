@@ -2,6 +2,7 @@ import { createHash } from 'node:crypto';
 import { existsSync, mkdirSync, readFileSync, renameSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
+import { voice } from '../words/voice.ts';
 import type { CardContent } from './card-content.ts';
 import { drawCard } from './card-drawing.ts';
 import { cardFonts } from './card-fonts.ts';
@@ -22,7 +23,6 @@ const DRAWING = [
   'card-side.ts',
   'card-svg.ts',
   'short-path.ts',
-  '../words/en/card.ts',
   '../../package-lock.json',
 ];
 
@@ -35,6 +35,7 @@ let drawing: string | undefined;
 export async function cardFiles(content: CardContent, folder: string): Promise<CardFiles> {
   const name = createHash('sha256')
     .update(drawingHash())
+    .update(JSON.stringify(voice()))
     .update(JSON.stringify(content))
     .digest('hex');
   const paths = { svg: join(folder, `${name}.svg`), png: join(folder, `${name}.png`) };
@@ -59,7 +60,7 @@ function keep(path: string, bytes: Buffer): void {
 function drawingHash(): string {
   if (drawing === undefined) {
     const hash = createHash('sha256');
-    for (const file of DRAWING) {
+    for (const file of [...DRAWING, `../words/${voice().language}/card.ts`]) {
       hash.update(readFileSync(fileURLToPath(new URL(file, import.meta.url))));
     }
     for (const { data } of cardFonts()) hash.update(new Uint8Array(data as ArrayBuffer));

@@ -1,9 +1,11 @@
 /** Small builders for MathML; every argument is MathML already. */
+import { withDecimalSign } from '../words/numbers.ts';
 
 export const variable = (name: string) => `<mi>${name}</mi>`;
 /** A name of several letters, set upright. */
 export const named = (name: string) => `<mi mathvariant="normal">${name}</mi>`;
-export const number = (value: string | number) => `<mn>${value}</mn>`;
+/** A number written with a point; it is shown with the shop's decimal sign. */
+export const number = (value: string | number) => `<mn>${withDecimalSign(String(value))}</mn>`;
 export const sign = (operator: string) => `<mo>${operator}</mo>`;
 export const row = (...parts: string[]) => `<mrow>${parts.join('')}</mrow>`;
 export const over = (top: string, bottom: string) => `<mfrac>${top}${bottom}</mfrac>`;

@@ -1,69 +1,20 @@
-import { breachText } from './en/breaches.ts';
-import { cardWords } from './en/card.ts';
-import { changesPage } from './en/changes-page.ts';
-import { checkPage } from './en/check-page.ts';
-import { contentsPage } from './en/contents-page.ts';
-import { contradictionsPage } from './en/contradictions-page.ts';
-import { declaration } from './en/declaration.ts';
-import { evidencePage } from './en/evidence-page.ts';
-import { fatPages } from './en/fat-pages.ts';
-import { formulaPage } from './en/formula-page.ts';
-import { frame } from './en/frame.ts';
-import { hazardWords, STATEMENTS } from './en/hazard-statements.ts';
-import { lostPage } from './en/lost-page.ts';
-import { lotsPage } from './en/lots-page.ts';
-import { lyeHeatWords } from './en/lye-heat.ts';
-import { lyePage } from './en/lye-page.ts';
-import { marginWords } from './en/margin.ts';
-import { materialPages } from './en/material-pages.ts';
-import { methodWords } from './en/methods.ts';
-import { methodsPage } from './en/methods-page.ts';
-import { profileWords, propertyNames, propertyUnits } from './en/profile.ts';
-import { safetyPage } from './en/safety.ts';
-import { safetySections } from './en/safety-sections.ts';
-import { safetyPoster, safetyRecord } from './en/safety-sheets.ts';
-import { sheetWords } from './en/sheet.ts';
-import { shopping } from './en/shopping.ts';
-import { standingWords } from './en/standing.ts';
-import { withdrawnPage } from './en/withdrawn-page.ts';
-import { workingWords } from './en/working.ts';
-import { dilutionWords, yieldWords } from './en/yields.ts';
+import { english } from './en.ts';
+import type { Language } from './languages.ts';
+import { setVoice, voice, voiceOf } from './voice.ts';
 
-/** Every word that a page shows. Pages take their text from here and nowhere else. */
-export const words = {
-  changesPage,
-  checkPage,
-  breachText,
-  cardWords,
-  contentsPage,
-  contradictionsPage,
-  declaration,
-  dilutionWords,
-  evidencePage,
-  fatPages,
-  formulaPage,
-  frame,
-  hazardWords,
-  lostPage,
-  lyeHeatWords,
-  lotsPage,
-  lyePage,
-  marginWords,
-  materialPages,
-  methodWords,
-  methodsPage,
-  profileWords,
-  propertyNames,
-  propertyUnits,
-  safetyPage,
-  safetyPoster,
-  safetyRecord,
-  safetySections,
-  shopping,
-  sheetWords,
-  standingWords,
-  statements: STATEMENTS,
-  withdrawnPage,
-  workingWords,
-  yieldWords,
-} as const;
+/** The shape that every catalogue has. */
+export type Catalogue = typeof english;
+
+const CATALOGUES: Readonly<Record<Language, Catalogue>> = { en: english, es: english };
+
+/**
+ * Every word that a page, a picture or a document shows, in the language of the shop. Read it where it is used, not
+ * while modules load: `speak` changes it.
+ */
+export let words: Catalogue = CATALOGUES[voice().language];
+
+/** Puts everything into the words, numbers and dates of a locale. Throws a `RangeError` for an unknown one. */
+export function speak(locale: string): void {
+  setVoice(voiceOf(locale));
+  words = CATALOGUES[voice().language];
+}

@@ -1,4 +1,6 @@
-/** Formats of numbers, one place for all pages. Decimal point, no digit grouping, true minus sign. */
+import { voice } from './voice.ts';
+
+/** Formats of numbers, one place for all pages. The shop's decimal sign, no digit grouping, true minus sign. */
 
 /** Digits after the decimal point that a scale's step needs: 0.1 -> 1, 5 -> 0. */
 export function decimalsOf(step: number): number {
@@ -12,9 +14,13 @@ export const weight = (mass: number, step: number): string => fixed(mass, decima
 
 /** A number to a fixed count of decimals; a value that rounds to nothing has no sign. */
 export function fixed(value: number, decimals: number): string {
-  const text = Math.abs(value).toFixed(decimals);
-  return value < 0 && Number(text) !== 0 ? `\u2212${text}` : text;
+  const digits = Math.abs(value).toFixed(decimals);
+  const text = withDecimalSign(digits);
+  return value < 0 && Number(digits) !== 0 ? `\u2212${text}` : text;
 }
+
+/** A number written with a point, as the shop's locale writes it. */
+export const withDecimalSign = (text: string): string => text.replace('.', voice().decimalSign);
 
 /** Kilograms to the gram, for totals only: `2.431`. Takes grams. */
 export const kilograms = (grams: number): string => fixed(grams / 1000, 3);
@@ -33,8 +39,8 @@ export function range(low: number, high: number, decimals: number): string {
   return a === b ? a : `${a} to ${b}`;
 }
 
-/** The part before the decimal point and the rest with it, so that a column can align on the point. */
+/** The part before the decimal sign and the rest with it, so that a column can align on the sign. */
 export function splitAtPoint(text: string): readonly [string, string] {
-  const point = text.indexOf('.');
+  const point = text.indexOf(voice().decimalSign);
   return point < 0 ? [text, ''] : [text.slice(0, point), text.slice(point)];
 }

@@ -1,5 +1,5 @@
 import { interpolate } from '../../chemistry/interpolate.ts';
-import { frame } from '../../words/en/frame.ts';
+import { words } from '../../words/catalogue.ts';
 import { materialNames } from '../material-names.ts';
 import type { CautionRule } from '../rule.ts';
 
@@ -17,7 +17,7 @@ export const rule: CautionRule<'stock-crystallises'> = {
       const set = reference.tables.sets.crystallisation.find(
         ({ used, solute }) => used && solute === id,
       );
-      const how = set ? frame.how[set.how] : '';
+      const how = set ? words.frame.how[set.how] : '';
       const name = materialNames(reference, [id]);
       return [{ name, lot, assay: assay.value * 100, crystals, how }];
     }),

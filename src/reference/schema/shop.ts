@@ -1,4 +1,6 @@
 import { z } from 'zod';
+import { LANGUAGES } from '../../words/languages.ts';
+import { voiceOf } from '../../words/voice.ts';
 import { date } from './date.ts';
 import { measure } from './measure.ts';
 import { broken, line } from './value.ts';
@@ -25,6 +27,22 @@ const siteAddress = line.superRefine((text, context) => {
         found: `the address "${text}"`,
         expected: 'where the handbook is served, like https://example.org/handbook/',
         advice: 'leave the key out where the handbook has no address',
+      }),
+    );
+  }
+});
+
+/** The language of the handbook and how it writes numbers and dates. */
+const locale = z.string().superRefine((text, context) => {
+  try {
+    voiceOf(text);
+  } catch {
+    context.addIssue(
+      broken({
+        rule: 'data/locale',
+        found: `the locale "${text}"`,
+        expected: `a BCP 47 tag, like en-GB or es-US, that begins with one of ${LANGUAGES.join(', ')}`,
+        advice: 'the first part is the language; the second says how numbers and dates are written',
       }),
     );
   }
@@ -68,7 +86,6 @@ const batch = z
     }
   });
 
-/** `data/shop.yaml`. */
 /** The day of an invented shop stands still, so that a demonstration does not expire; no other shop's may. */
 function checkFixedDay(
   { invented, 'as-of': asOf }: { invented?: boolean | undefined; 'as-of'?: string | undefined },
@@ -85,11 +102,13 @@ function checkFixedDay(
   );
 }
 
+/** `data/shop.yaml`. */
 export const shopSchema = z
   .strictObject({
     name: line,
     invented: z.boolean().optional(),
     'as-of': date.optional(),
+    locale: locale.optional(),
     'site-address': siteAddress.optional(),
     batches: z.array(batch).min(1),
     scales: z

@@ -1,6 +1,6 @@
 import type { Formulary } from '../../formulary/formulary.ts';
 import type { FinderData, Property } from '../../search/finder/finder-data.ts';
-import { findWords } from '../../words/en/find.ts';
+import { words } from '../../words/catalogue.ts';
 import { traitsOf } from './finder-traits.ts';
 import { NUMBER_PROPERTIES } from './number-properties.ts';
 
@@ -13,9 +13,9 @@ export function finderData(formulary: Formulary): FinderData {
   const properties = NUMBER_PROPERTIES.map(
     ({ id, group, format, decimals, value }): Property => ({
       id,
-      name: findWords.properties[id][0],
-      unit: findWords.properties[id][1],
-      group: findWords.groups[group],
+      name: words.findWords.properties[id][0],
+      unit: words.findWords.properties[id][1],
+      group: words.findWords.groups[group],
       format,
       decimals,
       values: formulas.map((computed) => rounded(value(computed), decimals)),
@@ -41,8 +41,8 @@ function acidProperties({ formulas, reference }: Formulary): readonly Property[]
       return {
         id: acid.toLowerCase().replaceAll(':', '-'),
         name: `${reference.acids.get(acid)?.name ?? acid} ${acid}`,
-        unit: findWords.percent,
-        group: findWords.groups.acids,
+        unit: words.findWords.percent,
+        group: words.findWords.groups.acids,
         format: 'number',
         decimals: 1,
         values,

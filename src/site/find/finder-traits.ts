@@ -1,11 +1,10 @@
 import type { ComputedFormula, Formulary } from '../../formulary/formulary.ts';
 import { nameOf } from '../../handbook/names.ts';
 import type { Trait } from '../../search/finder/finder-data.ts';
-import { findWords } from '../../words/en/find.ts';
-import { frame } from '../../words/en/frame.ts';
+import { words } from '../../words/catalogue.ts';
 
 interface TraitSource {
-  readonly id: keyof typeof findWords.traits;
+  readonly id: keyof typeof words.findWords.traits;
   readonly holds: 'one' | 'many';
   readonly only?: true;
   /** Known beside those in use, so that a kept search stays valid when the last formula with one goes. */
@@ -22,16 +21,16 @@ export function traitsOf({ formulas, reference }: Formulary): readonly Trait[] {
     {
       id: 'kind',
       holds: 'one',
-      known: Object.keys(frame.kinds),
+      known: Object.keys(words.frame.kinds),
       of: ({ document }) => [document.kind],
-      name: (id) => frame.kinds[id as keyof typeof frame.kinds],
+      name: (id) => words.frame.kinds[id as keyof typeof words.frame.kinds],
     },
     {
       id: 'process',
       holds: 'one',
-      known: Object.keys(frame.processes),
+      known: Object.keys(words.frame.processes),
       of: ({ document }) => [document.process],
-      name: (id) => frame.processes[id as keyof typeof frame.processes],
+      name: (id) => words.frame.processes[id as keyof typeof words.frame.processes],
     },
     {
       id: 'fats',
@@ -84,7 +83,7 @@ export function traitsOf({ formulas, reference }: Formulary): readonly Trait[] {
     const place = new Map(choices.map((choice, i) => [choice.id, i]));
     return {
       id,
-      name: findWords.traits[id],
+      name: words.findWords.traits[id],
       holds,
       only,
       choices,

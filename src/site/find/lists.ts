@@ -7,8 +7,8 @@ import {
   type Property,
   type Trait,
 } from '../../search/finder/finder-data.ts';
-import { findWords } from '../../words/en/find.ts';
-import { frame } from '../../words/en/frame.ts';
+import { words } from '../../words/catalogue.ts';
+import { dateText, monthText } from '../../words/dates.ts';
 import { fixed, plain } from '../../words/numbers.ts';
 
 /** A list of formulas in a fixed order that needs no script. */
@@ -33,7 +33,7 @@ export interface ListEntry {
 
 /** All lists: by fat, by kind, by caution, and one per property. */
 export function listsOf(formulary: Formulary, data: FinderData): readonly FormulaList[] {
-  const { listTitles, listLeads } = findWords;
+  const { listTitles, listLeads } = words.findWords;
   const trait = (id: string) => data.traits.find((each) => each.id === id);
   const lists: FormulaList[] = [
     { id: 'fats', title: listTitles.fats, lead: listLeads.fats, groups: byFat(formulary) },
@@ -57,7 +57,7 @@ function byFat({ formulas, reference }: Formulary): FormulaList['groups'] {
       entries: formulas.flatMap(({ document }) => {
         const lines = [...document.fats, ...document.afterCookFats].filter(({ id }) => id === fat);
         const share = lines.reduce((sum, line) => sum + line.share, 0);
-        const note = `${plain(share, 1)} ${findWords.percent}`;
+        const note = `${plain(share, 1)} ${words.findWords.percent}`;
         return lines.length > 0 ? [{ code: document.code, name: document.name, note }] : [];
       }),
     }))
@@ -66,12 +66,12 @@ function byFat({ formulas, reference }: Formulary): FormulaList['groups'] {
 }
 
 function byKind({ formulas }: Formulary): FormulaList['groups'] {
-  const kinds = Object.keys(frame.kinds) as (keyof typeof frame.kinds)[];
-  const processes = Object.keys(frame.processes) as (keyof typeof frame.processes)[];
+  const kinds = Object.keys(words.frame.kinds) as (keyof typeof words.frame.kinds)[];
+  const processes = Object.keys(words.frame.processes) as (keyof typeof words.frame.processes)[];
   return kinds
     .flatMap((kind) =>
       processes.map((process) => ({
-        title: `${frame.kinds[kind]}, ${frame.processes[process]}`,
+        title: `${words.frame.kinds[kind]}, ${words.frame.processes[process]}`,
         href: null,
         entries: formulas.flatMap(({ document }) =>
           document.kind === kind && document.process === process
@@ -95,23 +95,26 @@ function byTrait(data: FinderData, trait: Trait | undefined): FormulaList['group
 
 function propertyList(data: FinderData, property: Property): FormulaList {
   const { id, name, unit, format, decimals } = property;
-  const shown = (value: number) => (format === 'date' ? dateOf(value) : fixed(value, decimals));
+  const shown = (value: number) =>
+    format === 'date' ? dateText(dateOf(value)) : fixed(value, decimals);
   const bands = bandsOf(property).map(({ from, to, rows }) => ({
     title:
-      format === 'date' ? dateOf(from).slice(0, 7) : findWords.band(plain(from), plain(to), unit),
+      format === 'date'
+        ? monthText(dateOf(from))
+        : words.findWords.band(plain(from), plain(to), unit),
     href: null,
     entries: rows.map((row) => entryOf(data, row, shown(property.values[row] ?? 0))),
   }));
   const without = [...data.codes.keys()].filter((row) => (property.values[row] ?? null) === null);
   const none = {
-    title: findWords.noNumber,
+    title: words.findWords.noNumber,
     href: null,
     entries: without.map((row) => entryOf(data, row, '')),
   };
   return {
     id: `by-${id}`,
-    title: findWords.listTitles.property(name),
-    lead: findWords.listLeads.property(unit),
+    title: words.findWords.listTitles.property(name),
+    lead: words.findWords.listLeads.property(unit),
     property: name,
     groups: without.length > 0 ? [...bands, none] : bands,
   };

@@ -1,10 +1,11 @@
+import { dateText } from '../dates.ts';
 /** Words of the bench card. Short: it is read at arm's length. */
 export const cardWords = {
   title: (code: string, name: string, label: string) => `${code} ${name}, ${label}: bench card`,
   revision: (revision: number) => `Revision ${revision}`,
   fingerprint: (text: string) => `Formula ${text}`,
   digest: (text: string) => `weights ${text}`,
-  asOf: (date: string) => `as of ${date}`,
+  asOf: (date: string) => `as of ${dateText(date)}`,
   lots: (lots: string) => `Only with lots ${lots}.`,
   noLots: 'No lots: reckoned on trade ranges.',
   order: 'Alkali into water, never water onto alkali.',

@@ -1,3 +1,4 @@
+import { dateText } from '../dates.ts';
 import { fixed, plain } from '../numbers.ts';
 
 const STRONG_LYE =
@@ -61,8 +62,8 @@ export const lyeCautions = {
   'alkali-lot-retest': (n: { name: string; lot: string; retestBy: string; days: number }) => ({
     text:
       n.days < 0
-        ? `Lot ${n.lot} of ${n.name} was due for its retest on ${n.retestBy}.`
-        : `Lot ${n.lot} of ${n.name} is due for its retest on ${n.retestBy}, in ${plain(n.days)} days.`,
+        ? `Lot ${n.lot} of ${n.name} was due for its retest on ${dateText(n.retestBy)}.`
+        : `Lot ${n.lot} of ${n.name} is due for its retest on ${dateText(n.retestBy)}, in ${plain(n.days)} days.`,
     action:
       n.days < 0
         ? 'Do not weigh from it. Titrate it, or release another lot.'

@@ -1,3 +1,4 @@
+import { dateText } from '../dates.ts';
 import { fixed, plain } from '../numbers.ts';
 
 const atSize = (batch: string) => (batch === '' ? '' : ` at size ${batch}`);
@@ -19,7 +20,7 @@ export const superfatCautions = {
       'Weigh the acid before the alkali and tick it off when it is in. Not sure that it went in? Stop the batch.',
   }),
   'concession-in-force': (n: { floor: number; lowest: number; by: string; on: string }) => ({
-    text: `Made by concession below the release limit: lowest superfat ${fixed(n.lowest, 2)} %, limit ${plain(n.floor)} %. Given by ${n.by} on ${n.on}.`,
+    text: `Made by concession below the release limit: lowest superfat ${fixed(n.lowest, 2)} %, limit ${plain(n.floor)} %. Given by ${n.by} on ${dateText(n.on)}.`,
     action: 'Read the reason on the formula page and keep every condition in it.',
   }),
   'after-cook-fats': (n: { materials: string; percent: number }) => ({

@@ -1,10 +1,11 @@
+import { dateText } from '../dates.ts';
 import { fixed } from '../numbers.ts';
 
 /** Words of the page of what an edition has new. */
 export const changesPage = {
   title: 'Changes',
   about: 'what this edition has new; the revisions of every formula',
-  since: (id: string, asOf: string) => `Against edition ${id} of ${asOf}.`,
+  since: (id: string, asOf: string) => `Against edition ${id} of ${dateText(asOf)}.`,
   first:
     'No earlier edition was given to this build, so there is nothing to compare with. The revisions of each formula stand below.',
   nothing: 'Nothing has changed since then.',
@@ -16,7 +17,7 @@ export const changesPage = {
   reweighedLead:
     'The formula is the same; lots, scales or batch sizes are not. Sheets printed before are superseded.',
   withdrawnTitle: 'Withdrawn',
-  withdrawn: (on: string, reason: string) => `on ${on}: ${reason}`,
+  withdrawn: (on: string, reason: string) => `on ${dateText(on)}: ${reason}`,
   goneTitle: 'No longer there',
   historyTitle: 'Revisions',
   columns: {

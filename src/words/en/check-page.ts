@@ -1,3 +1,4 @@
+import { dateText } from '../dates.ts';
 /** Words of the page on which a printed sheet is checked against the edition. */
 export const checkPage = {
   title: 'Check a sheet',
@@ -14,13 +15,13 @@ export const checkPage = {
   current: (code: string, revision: number) =>
     `Current. This is the sheet of ${code}, revision ${revision}, in this edition.`,
   superseded: (code: string, revision: number, by: number, on: string) =>
-    `Superseded. ${code}, revision ${revision}, has been replaced by revision ${by} since ${on}. Do not weigh by it; print the new sheet.`,
+    `Superseded. ${code}, revision ${revision}, has been replaced by revision ${by} since ${dateText(on)}. Do not weigh by it; print the new sheet.`,
   reweighed: (code: string, revision: number, on: string) =>
-    `Superseded. ${code}, revision ${revision}, is weighed otherwise since ${on}: lots or settings have changed. Do not weigh by it; print the new sheet.`,
+    `Superseded. ${code}, revision ${revision}, is weighed otherwise since ${dateText(on)}: lots or settings have changed. Do not weigh by it; print the new sheet.`,
   left: (code: string, revision: number, on: string) =>
-    `No longer in the edition since ${on}: ${code}, revision ${revision}. Do not weigh by it; ask the formulator.`,
+    `No longer in the edition since ${dateText(on)}: ${code}, revision ${revision}. Do not weigh by it; ask the formulator.`,
   withdrawn: (code: string, on: string) =>
-    `Withdrawn on ${on}: ${code} must not be made. Ask the formulator.`,
+    `Withdrawn on ${dateText(on)}: ${code} must not be made. Ask the formulator.`,
   unknown: 'Unknown. This edition knows no such sheet. Do not weigh by it; ask the formulator.',
   mistypedDigest:
     'The digest has a symbol that is wrong, missing or too many. Read it from the sheet once more.',
@@ -28,7 +29,7 @@ export const checkPage = {
   proof: 'This is a proof edition: what it holds that is not approved is current nowhere.',
   listTitle: 'All current digests',
   listLead: (edition: string, asOf: string) =>
-    `Edition ${edition} as of ${asOf}. A sheet whose digest does not stand here is not current.`,
+    `Edition ${edition} as of ${dateText(asOf)}. A sheet whose digest does not stand here is not current.`,
   columns: {
     code: 'Code',
     formula: 'Formula',
@@ -38,7 +39,7 @@ export const checkPage = {
   },
   nothing: 'No formula of this edition is approved.',
   withdrawnTitle: 'Withdrawn',
-  withdrawnOn: (on: string) => `withdrawn on ${on}`,
+  withdrawnOn: (on: string) => `withdrawn on ${dateText(on)}`,
   whatItProves:
     'A digest shows that a sheet is the one that was published. It detects change, not forgery.',
 } as const;

@@ -1,3 +1,4 @@
+import { dateText } from '../dates.ts';
 import { plain } from '../numbers.ts';
 
 /** What is looked for by number: name and unit of each property, under its head. */
@@ -115,7 +116,7 @@ export const findWords = {
   lists: 'Lists',
   listsLead: 'Made with the handbook, in a fixed order.',
   savedTitle: 'Searches that the shop keeps',
-  savedLead: (date: string) => `As found in this edition, as of ${date}.`,
+  savedLead: (date: string) => `As found in this edition, as of ${dateText(date)}.`,
   savedOpen: 'Open it in the finder to change it',
   savedNone: 'No formula of this edition answers.',
   listTitles: {

@@ -1,3 +1,4 @@
+import { dateText } from '../dates.ts';
 import { fixed, kilograms, plain } from '../numbers.ts';
 
 export const formulaPage = {
@@ -5,9 +6,9 @@ export const formulaPage = {
   notApproved: 'not approved',
   fingerprint: 'Fingerprint',
   approved: (by: string, on: string, until: string) =>
-    `Approved by ${by} on ${on}, to be reviewed by ${until}`,
+    `Approved by ${by} on ${dateText(on)}, to be reviewed by ${dateText(until)}`,
   concession: (reason: string, by: string, on: string) =>
-    `Published under a concession: ${reason} Given by ${by} on ${on}.`,
+    `Published under a concession: ${reason} Given by ${by} on ${dateText(on)}.`,
   sections: {
     weights: 'Weights',
     margin: 'Superfat margin',

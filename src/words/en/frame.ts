@@ -1,8 +1,8 @@
+import { dateText } from '../dates.ts';
 import { fixed, plain } from '../numbers.ts';
 
 /** What stands around every page, and the small words that many pages share. */
 export const frame = {
-  language: 'en',
   skip: 'To the content',
   menu: 'Handbook',
   contents: 'Contents',
@@ -11,7 +11,7 @@ export const frame = {
   fats: 'Fats',
   safety: 'Safety',
   methods: 'Methods',
-  asOf: (date: string) => `As of ${date}`,
+  asOf: (date: string) => `As of ${dateText(date)}`,
   edition: (id: string) => `Edition ${id}`,
   proof: 'Proof edition, not for use: it holds formulas that are not approved.',
   invented: 'Demonstration: an invented workshop, not a formulary to work from.',

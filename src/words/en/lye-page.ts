@@ -1,3 +1,4 @@
+import { dateText } from '../dates.ts';
 export const lyePage = {
   title: (label: string) => `Lye table: ${label}`,
   lead: 'Weigh everything on one line, to its last column, each into a cup of its own. The code stands at both ends of the line: they must be the same.',
@@ -18,14 +19,14 @@ export const lyePage = {
   lots: {
     title: 'What this table was reckoned for',
     lead: 'Hold it against the bags and drums. With any other lot the weights do not hold.',
-    lot: (lot: string, until: string) => `lot ${lot}, retest by ${until}`,
+    lot: (lot: string, until: string) => `lot ${lot}, retest by ${dateText(until)}`,
     without: (names: string) => `No lot, reckoned on the published range: ${names}.`,
     until: (date: string | null) =>
-      date === null ? 'until a lot is released' : `not after ${date}`,
+      date === null ? 'until a lot is released' : `not after ${dateText(date)}`,
     validity: (asOf: string, until: string) =>
-      `As of ${asOf}. Take it down after ${until}, or as soon as a lot, a formula or the edition changes.`,
+      `As of ${dateText(asOf)}. Take it down after ${dateText(until)}, or as soon as a lot, a formula or the edition changes.`,
     noUntil: (asOf: string) =>
-      `As of ${asOf}. Take it down as soon as a lot is released or a formula or the edition changes.`,
+      `As of ${dateText(asOf)}. Take it down as soon as a lot is released or a formula or the edition changes.`,
   },
   fats: {
     title: 'Alkali for 100\u00a0g of one fat',

@@ -1,3 +1,4 @@
+import { dateText } from '../dates.ts';
 import { fixed, plain } from '../numbers.ts';
 
 const grams = (mass: number) => `${fixed(mass, 0)} g`;
@@ -9,12 +10,12 @@ export const sheetWords = {
   front: 'Front: weigh',
   back: 'Back: make and release',
   revision: (revision: number) => `Revision ${revision}`,
-  asOf: (date: string) => `as of ${date}`,
+  asOf: (date: string) => `as of ${dateText(date)}`,
   edition: (id: string) => `Edition ${id}`,
   digest: (text: string) => `Weights ${text}`,
   fingerprint: (text: string) => `Formula ${text}`,
   approved: (by: string, on: string, until: string) =>
-    `Approved by ${by} on ${on}, review by ${until}`,
+    `Approved by ${by} on ${dateText(on)}, review by ${dateText(until)}`,
   print: 'Print on A4 or Letter, both sides of one leaf, at actual size.',
   backToFormula: 'To the formula',
   card: 'Bench card',
@@ -30,7 +31,7 @@ export const sheetWords = {
     current:
       'This sheet is the current one: code and weights digest looked up in the handbook today.',
     lots: 'The bags and drums in front of me bear these lots:',
-    lot: (lot: string, until: string) => `${lot}, retest by ${until}`,
+    lot: (lot: string, until: string) => `${lot}, retest by ${dateText(until)}`,
     noLot: '(any lot inside the published range)',
     scales: (scales: string) => `The scale is level and checked today: ${scales}.`,
     scale: (name: string, step: string) => `${name}, steps of ${step} g`,

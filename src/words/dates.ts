@@ -1,0 +1,12 @@
+import { voice } from './voice.ts';
+
+/** A calendar date as the shop's locale writes it: `2026-12-01` -> `1 Dec 2026`. Data keep the ISO form. */
+export const dateText = (iso: string): string => written(iso, { dateStyle: 'medium' });
+
+/** The month of a calendar date: `2026-12-01` -> `Dec 2026`. */
+export const monthText = (iso: string): string => written(iso, { year: 'numeric', month: 'short' });
+
+function written(iso: string, style: Intl.DateTimeFormatOptions): string {
+  const format = new Intl.DateTimeFormat(voice().locale, { ...style, timeZone: 'UTC' });
+  return format.format(new Date(`${iso}T00:00:00Z`));
+}
