@@ -78,7 +78,7 @@ export const LYE_CASES: Cases<keyof typeof lyeCautions> = {
   'alkali-lot-retest': {
     fires: { reference: sodiumLot({ retestBy: '2027-01-30' }), asOf: '2026-12-31' },
     numbers: { days: 30, lot: 'T-1' },
-    says: ['2027-01-30', '30 days', 'T-1'],
+    says: ['30 Jan 2027', '30 days', 'T-1'],
     silent: { reference: sodiumLot({ retestBy: '2027-01-31' }), asOf: '2026-12-31' },
   },
   'lye-and-metals': {

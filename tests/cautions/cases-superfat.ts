@@ -49,7 +49,7 @@ export const SUPERFAT_CASES: Cases<keyof typeof superfatCautions> = {
   'concession-in-force': {
     fires: { document: release(false) },
     numbers: { floor: 1, lowest: 0.7 },
-    says: ['0.70 %', 'limit 1 %', 'Head of the bench', '2026-10-30'],
+    says: ['0.70 %', 'limit 1 %', 'Head of the bench', '30 Oct 2026'],
     silent: { document: release(true) },
   },
   'after-cook-fats': {
