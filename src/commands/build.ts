@@ -1,17 +1,20 @@
-import { mkdirSync, mkdtempSync, readdirSync, rmSync } from 'node:fs';
-import { isAbsolute, join, relative, resolve } from 'node:path';
+import { readdirSync, rmSync } from 'node:fs';
+import { isAbsolute, relative, resolve } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { build } from 'astro';
 import { APPROVAL_RULES } from '../edition/approval.ts';
+import { type FolderLock, lockFolder, lostHold } from '../edition/lock-fs.ts';
 import { sealEdition } from '../edition/seal-fs.ts';
 import {
   dropPrevious,
   healSwap,
   mayBeReplaced,
   moveFolder,
+  type SwapFolders,
   swap,
   swapFolders,
 } from '../edition/swap-fs.ts';
+import { writeProblem } from '../edition/write-problem.ts';
 import { isCalendarDate } from '../formulary/calendar-date.ts';
 import { handOver } from '../site/input.ts';
 import { counted, problemSummary, problemText } from '../words/problem-text.ts';
@@ -19,6 +22,7 @@ import { FOLDERS, readArguments } from './arguments.ts';
 import { asOfFor } from './as-of.ts';
 import { loadSite } from './load-site.ts';
 import { speakFor } from './speak-for.ts';
+import { workFolder } from './work-folder.ts';
 
 // the build must not tell anybody that it ran
 process.env.ASTRO_TELEMETRY_DISABLED = '1';
@@ -63,6 +67,32 @@ export async function main(args: readonly string[]): Promise<number> {
     console.error(`--out: ${out} holds folders that the build reads. Choose another one.`);
     return 1;
   }
+  const taken = lockFolder(out, { makeParent: true });
+  if (!taken.ok) {
+    for (const problem of taken.problems) console.error(problemText(problem));
+    return 1;
+  }
+  try {
+    return await buildInto(folders, taken.lock, { out, formulas, data, asOf, given: read.given });
+  } finally {
+    taken.lock.release();
+  }
+}
+
+interface BuildRequest {
+  readonly out: string;
+  readonly formulas: string;
+  readonly data: string;
+  readonly asOf: string;
+  readonly given: Readonly<Partial<Record<'last' | 'drafts' | 'with-costs', string>>>;
+}
+
+/** The build itself, while no other command may write the folder. */
+async function buildInto(
+  folders: SwapFolders,
+  lock: FolderLock,
+  { out, formulas, data, asOf, given }: BuildRequest,
+): Promise<number> {
   healSwap(folders);
   if (!mayBeReplaced(folders)) {
     console.error(
@@ -76,9 +106,9 @@ export async function main(args: readonly string[]): Promise<number> {
     { formulas, data },
     {
       asOf,
-      drafts: read.given.drafts !== undefined,
-      last: read.given.last ?? null,
-      withCosts: read.given['with-costs'] !== undefined,
+      drafts: given.drafts !== undefined,
+      last: given.last ?? null,
+      withCosts: given['with-costs'] !== undefined,
     },
   );
   for (const problem of loaded.problems) console.error(problemText(problem));
@@ -92,25 +122,26 @@ export async function main(args: readonly string[]): Promise<number> {
   const count = loaded.input.formulary.formulas.length;
   console.log(`Building ${counted(count, 'formula')} as of ${asOf} ...`);
   handOver(loaded.input);
-  const work = workFolder();
+  const work = workFolder(PROJECT);
   const here = process.cwd();
   try {
     // Astro looks at the folder it runs in to choose where its own output goes
     process.chdir(PROJECT);
     await build({ root: PROJECT, outDir: work, logLevel: 'error', vite: { logLevel: 'error' } });
     sealEdition(work, loaded.input.edition.document);
+    if (!lock.isHeld()) throw new Error(problemText(lostHold(out)));
     moveFolder(work, folders.next);
+    swap(folders);
+    dropPrevious(folders);
   } catch (error) {
-    healSwap(folders);
+    if (lock.isHeld()) healSwap(folders);
     rmSync(work, { recursive: true, force: true });
-    console.error(error instanceof Error ? error.message : error);
+    console.error(reasonOf(error, out));
     console.error('The build failed. The published folder is as it was.');
     return 1;
   } finally {
     process.chdir(here);
   }
-  swap(folders);
-  dropPrevious(folders);
   const pages = readdirSync(folders.current, { recursive: true }).filter((file) =>
     String(file).endsWith('.html'),
   ).length;
@@ -121,11 +152,10 @@ export async function main(args: readonly string[]): Promise<number> {
   return 0;
 }
 
-/** While it builds, Astro runs its own output, which must lie where its packages can be found. */
-function workFolder(): string {
-  const cache = join(PROJECT, '.cache');
-  mkdirSync(cache, { recursive: true });
-  return mkdtempSync(join(cache, 'build-'));
+/** What the disk refused in words; what else went wrong as it was said. */
+function reasonOf(error: unknown, out: string): unknown {
+  if (!(error instanceof Error)) return error;
+  return 'syscall' in error ? problemText(writeProblem(out, error)) : error.message;
 }
 
 /** Whether `inner` is `outer` or lies within it. */

@@ -8,6 +8,7 @@ import { editionProblem } from './edition-problem.ts';
 import type { PublishedEntry } from './ledger.ts';
 import { appendToLedger, ledgerPath, readLedger } from './ledger-fs.ts';
 import { ledgerProblems } from './ledger-rules.ts';
+import { type FolderLock, IN_USE, lockFolder } from './lock-fs.ts';
 import { targetProblems } from './publish-target-fs.ts';
 import { readEdition } from './read-edition-fs.ts';
 import { healSwap, swap, swapFolders } from './swap-fs.ts';
@@ -40,9 +41,29 @@ export type PublishResult =
  * was. Never throws for bad input.
  */
 export function publishEdition(request: PublishRequest): PublishResult {
-  const { from, to, data, drafts } = request;
+  const source = lockSource(request.from);
+  if (!source.ok) return source;
+  try {
+    if (source.lock) healSwap(swapFolders(request.from));
+    return publishHeld(request);
+  } finally {
+    source.lock?.release();
+  }
+}
+
+/** The hold on the folder that is copied from; none is needed where nobody can write beside it. */
+function lockSource(
+  from: string,
+):
+  | { readonly ok: true; readonly lock: FolderLock | null }
+  | Extract<PublishResult, { readonly ok: false }> {
+  const taken = lockFolder(from);
+  if (taken.ok) return taken;
+  return taken.problems.some(({ rule }) => rule === IN_USE) ? taken : { ok: true, lock: null };
+}
+
+function publishHeld({ from, to, data, drafts }: PublishRequest): PublishResult {
   const refused = (problems: readonly Problem[]): PublishResult => ({ ok: false, problems });
-  healSwap(swapFolders(from));
   const read = readEdition(from);
   if (!read.ok) return refused(read.problems);
   const { edition } = read;
@@ -62,6 +83,8 @@ export function publishEdition(request: PublishRequest): PublishResult {
         })),
   ];
   if (wrong.length > 0) return refused(wrong);
+  const taken = lockFolder(to);
+  if (!taken.ok) return taken;
   try {
     healSwap(folders);
     copyWhole(from, folders.next);
@@ -82,6 +105,8 @@ export function publishEdition(request: PublishRequest): PublishResult {
   } catch (error) {
     rmSync(folders.next, { recursive: true, force: true });
     return refused([writeProblem(to, error)]);
+  } finally {
+    taken.lock.release();
   }
   return {
     ok: true,

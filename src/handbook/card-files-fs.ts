@@ -1,5 +1,15 @@
 import { createHash } from 'node:crypto';
-import { existsSync, mkdirSync, readFileSync, renameSync, writeFileSync } from 'node:fs';
+import {
+  existsSync,
+  mkdirSync,
+  readdirSync,
+  readFileSync,
+  renameSync,
+  rmSync,
+  statSync,
+  utimesSync,
+  writeFileSync,
+} from 'node:fs';
 import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { voice } from '../words/voice.ts';
@@ -40,6 +50,8 @@ export async function cardFiles(content: CardContent, folder: string): Promise<C
     .digest('hex');
   const paths = { svg: join(folder, `${name}.svg`), png: join(folder, `${name}.png`) };
   if (existsSync(paths.svg) && existsSync(paths.png)) {
+    markUsed(paths.svg);
+    markUsed(paths.png);
     return { svg: readFileSync(paths.svg), png: readFileSync(paths.png) };
   }
   const { svg: text } = await drawCard(content);
@@ -48,6 +60,28 @@ export async function cardFiles(content: CardContent, folder: string): Promise<C
   keep(paths.svg, files.svg);
   keep(paths.png, files.png);
   return files;
+}
+
+const DAY = 24 * 60 * 60 * 1000;
+/** A card that no build has asked for in this time is of a formula that has changed since. [ms] */
+const LONGEST_UNUSED = 60 * DAY;
+
+/**
+ * Deletes the cards that no build has asked for in sixty days before `now`, and what broken writes have left. What
+ * is published never depends on it: a card that is missed is drawn again, the same to the byte.
+ */
+export function pruneCards(folder: string, now: number): void {
+  for (const name of existsSync(folder) ? readdirSync(folder) : []) {
+    const path = join(folder, name);
+    const used = statSync(path, { throwIfNoEntry: false })?.mtimeMs;
+    if (used !== undefined && now - used > LONGEST_UNUSED) rmSync(path, { force: true });
+  }
+}
+
+/** The time of a file is when it was last used, to the day: most builds then leave it alone. */
+function markUsed(path: string): void {
+  const now = new Date();
+  if (now.getTime() - statSync(path).mtimeMs > DAY) utimesSync(path, now, now);
 }
 
 /** Under another name first, so that a broken write is never taken for a card. */

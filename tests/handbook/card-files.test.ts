@@ -1,10 +1,10 @@
-import { mkdtempSync, readdirSync, rmSync, statSync } from 'node:fs';
+import { mkdtempSync, readdirSync, rmSync, statSync, utimesSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { crc32, inflateSync } from 'node:zlib';
 import { Resvg } from '@resvg/resvg-js';
 import { afterAll, expect, test } from 'vitest';
-import { cardFiles } from '../../src/handbook/card-files-fs.ts';
+import { cardFiles, pruneCards } from '../../src/handbook/card-files-fs.ts';
 import { shortPath } from '../../src/handbook/short-path.ts';
 import { CARD } from './card-fixture.ts';
 
@@ -20,6 +20,32 @@ test('a card is drawn once for each content', async () => {
   expect(times()).toEqual(before);
   await cardFiles({ ...CARD, foot: ['Revision 3'] }, folder);
   expect(readdirSync(folder)).toHaveLength(4);
+});
+
+test('what no build has asked for in sixty days goes, and what was used lately stays', async () => {
+  const cache = mkdtempSync(join(tmpdir(), 'cards-'));
+  const day = 24 * 60 * 60 * 1000;
+  const now = Date.now();
+  const age = (days: number) => {
+    const then = new Date(now - days * day);
+    for (const file of readdirSync(cache)) utimesSync(join(cache, file), then, then);
+  };
+  const { png } = await cardFiles(CARD, cache);
+  writeFileSync(join(cache, 'broken.svg.123'), '<svg');
+  age(59);
+  pruneCards(cache, now);
+  expect(readdirSync(cache)).toHaveLength(3);
+  age(61);
+  // asked for again, the card counts as used; the rest of a broken write does not
+  await cardFiles(CARD, cache);
+  pruneCards(cache, now);
+  expect(readdirSync(cache)).toHaveLength(2);
+  age(61);
+  pruneCards(cache, now);
+  expect(readdirSync(cache)).toEqual([]);
+  expect((await cardFiles(CARD, cache)).png.equals(png)).toBe(true);
+  pruneCards(join(cache, 'none'), now);
+  rmSync(cache, { recursive: true });
 });
 
 // the chunks and their order are those of the PNG specification, third edition, clauses 5 and 11

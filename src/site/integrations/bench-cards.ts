@@ -3,7 +3,7 @@ import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import type { AstroIntegration } from 'astro';
 import { type CardContent, cardContent } from '../../handbook/card-content.ts';
-import { cardFiles } from '../../handbook/card-files-fs.ts';
+import { cardFiles, pruneCards } from '../../handbook/card-files-fs.ts';
 import { siteInput } from '../input.ts';
 
 /** Puts the bench card of every batch that has weights beside the pages, as SVG and PNG. */
@@ -23,6 +23,7 @@ export function benchCards(): AstroIntegration {
           writeFileSync(join(folder, `${name}.svg`), svg);
           writeFileSync(join(folder, `${name}.png`), png);
         }
+        pruneCards(cache, Date.now());
       },
       'astro:server:setup': ({ server }) => {
         server.middlewares.use('/cards', (request, response, next) => {

@@ -25,6 +25,7 @@ export const EDITION_PROBLEMS = {
   'edition/approval-date': { title: 'A date of approval or review that cannot be' },
   'edition/file-changed': { title: 'A file that changed while it was being approved' },
   'edition/approval-place': { title: 'Frontmatter that the approval cannot be written into' },
+  'edition/in-use': { title: 'A folder that another command is writing' },
   'edition/cannot-write': { title: 'Something that cannot be written' },
   'edition/checksums': { title: 'A list of checksums that cannot be used' },
   'edition/not-whole': { title: 'An edition that is not as it was built' },
