@@ -1,9 +1,11 @@
 import { english } from './en.ts';
 import type { Language } from './languages.ts';
+import type { SameShape } from './same-shape.ts';
 import { setVoice, voice, voiceOf } from './voice.ts';
 
-/** The shape that every catalogue has. */
-export type Catalogue = typeof english;
+/** The shape that every catalogue has. The texts of cautions are typed without any language already. */
+export type Catalogue = SameShape<Omit<typeof english, 'cautionTexts'>> &
+  Pick<typeof english, 'cautionTexts'>;
 
 const CATALOGUES: Readonly<Record<Language, Catalogue>> = { en: english, es: english };
 
