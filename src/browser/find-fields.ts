@@ -86,7 +86,9 @@ export function readFields(fields: Fields, before: FinderState): FinderState {
 /** Makes the fields say a state. A field that is being typed in is left alone where it means the same. */
 export function fillFields(fields: Fields, state: FinderState, columns: ReadonlySet<string>): void {
   if (fields.words && fields.words.value !== state.words) fields.words.value = state.words;
-  if (fields.where) fields.where.value = state.where ?? '';
+  // a choice that is set anew, though the same, costs as much as a change
+  const where = state.where ?? '';
+  if (fields.where && fields.where.value !== where) fields.where.value = where;
   for (const { property, min, max, column } of fields.properties) {
     const range = state.ranges[property.id];
     fill(min, range?.min ?? null, property);

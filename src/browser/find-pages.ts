@@ -30,7 +30,7 @@ export async function pageList(
 }
 
 function excerpt(content: string, { places }: Hit) {
-  const { parts, cutBefore, cutAfter } = excerptOf(content, places);
+  const { parts, cutBefore, cutAfter } = excerptOf(content, places());
   const words = parts.flatMap(({ text, found }) => [found ? element('mark', {}, text) : text, ' ']);
   return element(
     'p',

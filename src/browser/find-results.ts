@@ -4,12 +4,11 @@ import { limitsOf } from '../search/finder/limits.ts';
 import { PAGE_FILTER, type PageType } from '../search/finder/page-types.ts';
 import type { FinderState } from '../search/finder/state.ts';
 import { findWords } from '../words/en/find.ts';
-import { shownColumns } from './find-columns.ts';
 import { element, part } from './find-dom.ts';
 import { limitList } from './find-limits.ts';
+import { drawList } from './find-list.ts';
 import { sayBroken } from './find-notes.ts';
 import { pageList } from './find-pages.ts';
-import { FIRST_ROWS, resultTable } from './find-table.ts';
 import type { WordsFound } from './find-words.ts';
 
 /** What is drawn beside the form. */
@@ -32,36 +31,14 @@ export function drawResults(
   found: WordsFound | null,
   shown: Shown,
 ): Results {
-  const limits = limitsOf(state, data, found && new Set(found.rows));
+  const limits = limitsOf(state, data, found?.rowSet ?? null);
   const { rows, withoutLimit } = answer(data, limits);
   part('find-count').textContent = findWords.found(rows.length, data.codes.length);
   part('find-limits').replaceChildren(...limitList(limits, rows.length, withoutLimit));
-  drawTable(data, state, inOrder(rows, data, state.sort, found?.rows ?? null), shown);
+  drawList(data, state, inOrder(rows, data, state.sort, found?.rows ?? null), shown.allRows);
   const limited = limits.length > (found ? 1 : 0);
   drawPages(found, limited ? new Set(rows) : null, state.where, shown.pages).catch(sayBroken);
   return { rows, dropped: limits.map((limit) => limit.dropped) };
-}
-
-function drawTable(
-  data: FinderData,
-  state: FinderState,
-  rows: readonly number[],
-  { allRows }: Shown,
-): void {
-  const first = allRows ? rows : rows.slice(0, FIRST_ROWS);
-  const place = part('find-table');
-  const focused = place.contains(document.activeElement)
-    ? document.activeElement?.getAttribute('data-sort')
-    : null;
-  place.replaceChildren(
-    ...(rows.length > 0 ? [resultTable(data, state, first, shownColumns(data, state))] : []),
-  );
-  if (focused) place.querySelector<HTMLElement>(`[data-sort="${focused}"]`)?.focus();
-  part('find-all').replaceChildren(
-    ...(first.length < rows.length
-      ? [element('button', { type: 'button' }, findWords.showAll(rows.length))]
-      : []),
-  );
 }
 
 let turn = 0;

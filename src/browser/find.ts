@@ -17,8 +17,10 @@ declare global {
   var handbookFinder: FinderData | undefined;
 }
 
-/** Between the last letter typed and the search, and between the last change and the address. [ms] */
+/** Between the last letter typed and the search. [ms] */
 const PAUSE = 120;
+/** Between the last change and the address, which is written when the page has been drawn. [ms] */
+const ADDRESS_PAUSE = 250;
 const FIRST: Shown = { allRows: false, pages: 5 };
 const MORE_PAGES = 20;
 
@@ -28,7 +30,7 @@ else say('find-broken', findWords.searchBroken('search/finder.js'));
 function start(data: FinderData): void {
   const form = part('find-form');
   const fields = fieldsOf(form, data);
-  const look = wordSearch(document.documentElement.lang);
+  const words = wordSearch(document.documentElement.lang);
   const drawStrips = strips(data, form, (change) => become(change(state)));
   let state: FinderState = NOTHING_ASKED;
   let shown = FIRST;
@@ -48,6 +50,7 @@ function start(data: FinderData): void {
       // a search that has not ended yet is for other words
       turn++;
       if (state.words.trim() !== '') {
+        words.open();
         pause = setTimeout(lookForWords, PAUSE);
         return;
       }
@@ -66,15 +69,14 @@ function start(data: FinderData): void {
 
   async function lookForWords(): Promise<void> {
     const mine = ++turn;
-    const { words } = state;
-    const empty = words.trim() === '';
+    const asked = state.words;
     try {
-      const answered = empty ? null : await look(words);
+      const answered = await words.find(asked);
       if (mine !== turn) return;
       found = answered;
       say('find-broken', '');
-      const tooLong = words.length > LONGEST_QUERY ? findWords.wordsCut(LONGEST_QUERY) : '';
-      say('find-words-note', !found && !empty ? findWords.noWord : tooLong);
+      const tooLong = asked.length > LONGEST_QUERY ? findWords.wordsCut(LONGEST_QUERY) : '';
+      say('find-words-note', found ? tooLong : findWords.noWord);
     } catch (error) {
       if (mine !== turn) return;
       found = null;
@@ -88,22 +90,29 @@ function start(data: FinderData): void {
     clearTimeout(writing);
     writing = setTimeout(() => {
       history.replaceState(null, '', `#${writeAddress(state, data)}`);
-    }, PAUSE);
+    }, ADDRESS_PAUSE);
   }
 
   function readFromAddress(): void {
     // a link to a part of this page asks for nothing
     if (document.getElementById(location.hash.slice(1))) {
       keepAddress();
+      draw();
       return;
     }
     clearTimeout(writing);
+    clearTimeout(pause);
     const read = readAddress(location.hash, data);
+    if (read.state.words !== state.words) {
+      turn++;
+      found = null;
+      say('find-words-note', '');
+    }
     state = read.state;
     shown = FIRST;
     say('find-ignored', read.ignored.length > 0 ? findWords.ignored(read.ignored.join(' · ')) : '');
     draw();
-    lookForWords();
+    if (!found && state.words.trim() !== '') lookForWords();
   }
 
   const buttonIn = ({ target }: Event) => (target as Element).closest('button');
@@ -148,5 +157,4 @@ function start(data: FinderData): void {
   const narrow = !matchMedia('(min-width: 60rem)').matches;
   if (narrow) part('find-limits-box').removeAttribute('open');
   readFromAddress();
-  draw();
 }

@@ -5,7 +5,7 @@ import { describe, expect, inject, test } from 'vitest';
 import { chunksIn } from '../../src/search/build/chunk-scripts.ts';
 import { PAGE_TYPES } from '../../src/search/finder/page-types.ts';
 import { wordsOfText } from '../../src/search/reader/excerpt.ts';
-import { type Filters, sortedBy } from '../../src/search/reader/narrow.ts';
+import type { Filters } from '../../src/search/reader/narrow.ts';
 import { inflatePayload } from '../../src/search/reader/payload.ts';
 import { openSearch, type SearchEntry } from '../../src/search/reader/search.ts';
 import { siteFiles } from '../support/site-files.ts';
@@ -95,7 +95,11 @@ describe('the search of the demo', () => {
 
   test('pages are narrowed by type, kind and process, as the data of the formulas says', async () => {
     const search = await open();
-    const all = [...search.contents.pages.keys()].map((page) => ({ page, score: 0, places: [] }));
+    const all = [...search.contents.pages.keys()].map((page) => ({
+      page,
+      score: 0,
+      places: () => [],
+    }));
     const urls = async (filters: Filters) =>
       Promise.all(
         (await search.narrow(all, filters)).map(
@@ -116,38 +120,12 @@ describe('the search of the demo', () => {
       }
     }
   });
-
-  test('formulas can be sorted by superfat, iodine value and revision', async () => {
-    const search = await open();
-    const all = entry.rows.map((page) => ({ page, score: 0, places: [] }));
-    const formulas = new Map(formulaData().map((each) => [each.code, each]));
-    const values = {
-      superfat: (each: FormulaData) => each.superfat.written,
-      'iodine-value': (each: FormulaData) => each.profile?.iodineValue ?? null,
-      revision: (each: FormulaData) => each.revision,
-    };
-    expect([...search.contents.sorts.keys()].sort()).toEqual(Object.keys(values).sort());
-    for (const [key, numberOf] of Object.entries(values)) {
-      const sorted = await Promise.all(
-        sortedBy(search.contents, all, key, false).map(async ({ page }) => {
-          const formula = formulas.get((await search.pageText(page)).meta.code ?? '');
-          return Number((formula && numberOf(formula))?.toFixed(1));
-        }),
-      );
-      expect(sorted, key).toEqual([...sorted].sort((a, b) => a - b));
-      const having = [...formulas.values()].filter((each) => numberOf(each) !== null);
-      expect(sorted, key).toHaveLength(having.length);
-    }
-  });
 });
 
 interface FormulaData {
   readonly code: string;
   readonly kind: string;
   readonly process: string;
-  readonly revision: number;
-  readonly superfat: { readonly written: number };
-  readonly profile: { readonly iodineValue: number | null } | null;
 }
 
 /** What the handbook gives out as files, by code. */

@@ -1,4 +1,4 @@
-import { type IndexedWord, placesOf } from '../../src/search/reader/index-format.ts';
+import { type IndexedWord, positionsOf } from '../../src/search/reader/index-format.ts';
 import type { Filters } from '../../src/search/reader/narrow.ts';
 import { readQuery } from '../../src/search/reader/query.ts';
 import { stemmerFor } from '../../src/search/reader/stemmer.ts';
@@ -57,7 +57,7 @@ function isTied(words: readonly IndexedWord[], stems: readonly string[], page: n
       .filter(({ word }) => word.startsWith(stem))
       .flatMap(({ forms }) => forms.flatMap(({ pages }) => pages))
       .filter((onPage) => onPage.page === page)
-      .flatMap((onPage) => placesOf(onPage).map(({ position }) => position)),
+      .flatMap(positionsOf),
   );
   const shared = positions.some((list) => new Set(list).size < list.length);
   return shared && positions.flat().length > STABLE;

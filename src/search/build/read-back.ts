@@ -1,4 +1,4 @@
-import { type IndexedWord, placesOf, readFilter, readWords } from '../reader/index-format.ts';
+import { type IndexedWord, positionsOf, readFilter, readWords } from '../reader/index-format.ts';
 import { type LoadPayload, openSearch, type SearchEntry } from '../reader/search.ts';
 
 export interface WholeIndex {
@@ -25,7 +25,7 @@ export async function readWholeIndex(entry: SearchEntry, load: LoadPayload): Pro
   for (const { word, forms } of words) {
     for (const onPage of forms.flatMap((form) => form.pages)) {
       const length = pages[onPage.page]?.words ?? 0;
-      if (placesOf(onPage).some(({ position }) => position >= length)) {
+      if (positionsOf(onPage).some((position) => position >= length)) {
         throw new Error(`The search index puts "${word}" where page ${onPage.page} has no word.`);
       }
     }

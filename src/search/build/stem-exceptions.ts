@@ -1,6 +1,6 @@
 import { wordsOfText } from '../reader/excerpt.ts';
 import type { IndexedWord } from '../reader/index-format.ts';
-import { placesOf } from '../reader/index-format.ts';
+import { positionsOf } from '../reader/index-format.ts';
 import { withoutMarks } from '../reader/query.ts';
 import type { Stem } from '../reader/stemmer.ts';
 
@@ -54,7 +54,7 @@ function storedAt(index: readonly IndexedWord[], keys: ReadonlySet<string>) {
   const stored = new Map<string, string[]>([...keys].map((key) => [key, []]));
   for (const { word, forms } of index) {
     for (const onPage of forms.flatMap(({ pages }) => pages)) {
-      for (const { position } of placesOf(onPage)) {
+      for (const position of positionsOf(onPage)) {
         stored.get(keyOf({ page: onPage.page, position }))?.push(word);
       }
     }

@@ -51,7 +51,8 @@ export function countsOn(places: Int16Array, rows: Iterable<number>): Uint32Arra
 /** SVG path of one upright mark per step; a mark grows with the root of the rows it stands for, up to `tallest`. */
 export function marksPath(counts: Uint32Array, tallest: number): string {
   let path = '';
-  for (const [place, count] of counts.entries()) {
+  for (let place = 0; place < counts.length; place++) {
+    const count = counts[place] ?? 0;
     if (count === 0) continue;
     const share = tallest > 1 ? (Math.sqrt(count) - 1) / (Math.sqrt(tallest) - 1) : 0;
     const height = Math.round(STRIP_HEIGHT * (0.45 + 0.55 * Math.min(1, share)));

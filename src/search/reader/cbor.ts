@@ -2,6 +2,8 @@
 export type CborValue = number | string | readonly CborValue[];
 
 const DEEPEST = 16;
+/** [bytes] */
+const LONGEST_ASCII = 32;
 
 /**
  * Decodes one CBOR item (RFC 8949) of the subset that Pagefind writes: unsigned and negative integers, texts and
@@ -36,9 +38,9 @@ export function decodeCbor(bytes: Uint8Array): CborValue {
         return -1 - value;
       case 3: {
         if (value > bytes.length - at) throw new RangeError('CBOR: text is cut off');
-        const text = texts.decode(bytes.subarray(at, at + value));
+        const start = at;
         at += value;
-        return text;
+        return asciiText(bytes, start, at) ?? texts.decode(bytes.subarray(start, at));
       }
       case 4: {
         if (value > bytes.length - at || depth > DEEPEST) {
@@ -56,4 +58,16 @@ export function decodeCbor(bytes: Uint8Array): CborValue {
   const whole = item(0);
   if (at !== bytes.length) throw new RangeError(`CBOR: ${bytes.length - at} bytes left over`);
   return whole;
+}
+
+/** Most texts of an index are short and plain, and a decoder's call costs more than their letters. */
+function asciiText(bytes: Uint8Array, start: number, end: number): string | null {
+  if (end - start > LONGEST_ASCII) return null;
+  let text = '';
+  for (let at = start; at < end; at++) {
+    const letter = bytes[at] ?? 0;
+    if (letter > 127) return null;
+    text += String.fromCharCode(letter);
+  }
+  return text;
 }

@@ -11,7 +11,8 @@ export interface TermWords {
 export interface Hit {
   readonly page: number;
   readonly score: number;
-  readonly places: readonly HitPlace[];
+  /** Worked out when they are asked for: only the pages that are shown need them. */
+  readonly places: () => readonly HitPlace[];
 }
 
 /** A word of the page that was looked for, and how much it says. */
@@ -27,9 +28,3 @@ export const fieldWeight = ({ fields }: IndexContents, field: number): number =>
 /** Best first; equal scores in the order of the pages. */
 export const inOrder = (hits: readonly Hit[]): readonly Hit[] =>
   hits.toSorted((a, b) => b.score - a.score || a.page - b.page);
-
-/** The numbers that are in all sets; all of none is none. */
-export function inAll(sets: readonly ReadonlySet<number>[]): ReadonlySet<number> {
-  const [first, ...rest] = sets.toSorted((a, b) => a.size - b.size);
-  return new Set([...(first ?? [])].filter((each) => rest.every((set) => set.has(each))));
-}

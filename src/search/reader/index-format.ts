@@ -5,8 +5,6 @@ export interface IndexContents {
   readonly pages: readonly IndexedPage[];
   readonly chunks: readonly WordChunk[];
   readonly filters: readonly { readonly filter: string; readonly hash: string }[];
-  /** By sort key, the numbers of the pages that have it, in ascending order of its values. */
-  readonly sorts: ReadonlyMap<string, readonly number[]>;
   /** Names of the metadata fields; fields are numbered by their place here. */
   readonly fields: readonly string[];
 }
@@ -34,20 +32,15 @@ export interface IndexedWord {
 
 export interface WordOnPage {
   readonly page: number;
-  /** Packed: see `placesOf` and `fieldPlacesOf`. */
+  /** Packed: see `eachPlace` and `eachFieldPlace`; 24 is the weight of plain text, a position the number of the word in the page. */
   readonly places: readonly number[];
   readonly fieldPlaces: readonly number[];
 }
 
-/** One occurrence: its weight (24 is plain text) and the number of the word in the page. */
-export interface Place {
-  readonly weight: number;
-  readonly position: number;
-}
-
 /** Reads a `pf_meta` payload. Throws a `RangeError` where it is not one. */
 export function readContents(payload: Uint8Array): IndexContents {
-  const [, pages, chunks, filters, sorts, fields] = listOf(decodeCbor(payload), 6);
+  // the fifth are orders of pages, which the finder takes from its own data
+  const [, pages, chunks, filters, , fields] = listOf(decodeCbor(payload), 6);
   return {
     pages: listOf(pages).map((each) => {
       const [hash, words, group] = listOf(each, 3);
@@ -61,12 +54,6 @@ export function readContents(payload: Uint8Array): IndexContents {
       const [filter, hash] = listOf(each, 2);
       return { filter: textOf(filter), hash: textOf(hash) };
     }),
-    sorts: new Map(
-      listOf(sorts).map((each) => {
-        const [key, sorted] = listOf(each, 2);
-        return [textOf(key), listOf(sorted).map(countOf)];
-      }),
-    ),
     fields: listOf(fields).map(textOf),
   };
 }
@@ -96,19 +83,35 @@ export function readFilter(payload: Uint8Array): ReadonlyMap<string, readonly nu
   );
 }
 
-/** Unpacks the places of a word on a page, in the order stored: by weight, then position. */
-export function placesOf({ places }: WordOnPage): readonly Place[] {
-  return unpack(places, 25).map(([weight, position]) => ({ weight, position }));
+/** Calls `take` with weight and position of each place of a word on a page, in the order stored: by weight, then position. */
+export const eachPlace = (
+  { places }: WordOnPage,
+  take: (weight: number, position: number) => void,
+): void => unpack(places, 25, take);
+
+/** The positions alone, in the same order. */
+export function positionsOf({ places }: WordOnPage): readonly number[] {
+  const positions: number[] = [];
+  let position = 0;
+  for (const number of places) {
+    position = number < 0 ? 0 : position + number;
+    if (number >= 0) positions.push(position);
+  }
+  return positions;
 }
 
-/** Unpacks the places of a word in the page's metadata. */
-export function fieldPlacesOf({ fieldPlaces }: WordOnPage) {
-  return unpack(fieldPlaces, 0).map(([field, position]) => ({ field, position }));
-}
+/** Calls `take` with field and position of each place of a word in the page's metadata. */
+export const eachFieldPlace = (
+  { fieldPlaces }: WordOnPage,
+  take: (field: number, position: number) => void,
+): void => unpack(fieldPlaces, 0, take);
 
 /** A negative number switches the label (weight or field) and starts positions anew; others are steps. */
-function unpack(packed: readonly number[], initial: number): readonly [number, number][] {
-  const found: [number, number][] = [];
+function unpack(
+  packed: readonly number[],
+  initial: number,
+  take: (label: number, position: number) => void,
+): void {
   let label = initial;
   let position = 0;
   for (const number of packed) {
@@ -117,10 +120,9 @@ function unpack(packed: readonly number[], initial: number): readonly [number, n
       position = 0;
     } else {
       position += number;
-      found.push([label, position]);
+      take(label, position);
     }
   }
-  return found;
 }
 
 function pagesOf(value: CborValue | undefined): readonly WordOnPage[] {
@@ -152,8 +154,8 @@ function countOf(value: CborValue | undefined): number {
 
 function numbersOf(value: CborValue | undefined): readonly number[] {
   const list = listOf(value);
-  if (list.some((each) => typeof each !== 'number')) {
-    throw new RangeError('Search index: expected numbers');
+  for (const each of list) {
+    if (typeof each !== 'number') throw new RangeError('Search index: expected numbers');
   }
   return list as readonly number[];
 }

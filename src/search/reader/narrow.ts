@@ -23,20 +23,3 @@ export async function narrowed(
   );
   return hits.filter(({ page }) => sets.every((pages) => pages.has(page)));
 }
-
-/**
- * The hits whose pages have the sort key, in the order of its values. Throws a `RangeError` where the index has no
- * such key.
- */
-export function sortedBy(
-  { sorts }: IndexContents,
-  hits: readonly Hit[],
-  key: string,
-  descending: boolean,
-): readonly Hit[] {
-  const pages = sorts.get(key);
-  if (!pages) throw new RangeError(`Search index: there is no sort "${key}"`);
-  const byPage = new Map(hits.map((hit) => [hit.page, hit]));
-  const ascending = pages.flatMap((page) => byPage.get(page) ?? []);
-  return descending ? ascending.reverse() : ascending;
-}

@@ -1,34 +1,55 @@
 import { byCodePoint } from './code-points.ts';
 import type { HitPlace } from './hit.ts';
-import type { Place } from './index-format.ts';
+import { eachPlace } from './index-format.ts';
 import type { Match } from './rank.ts';
 
 const LARGEST_WEIGHT = 255;
 
 /**
- * Scores each place of a page where a term was found, and adds up the weight of each word, in the order of the words'
- * letters. Terms that meet in one place (the parts of a compound) count together there.
+ * The weight of each word on a page, added up over its places, in the order of the words' letters. Terms that meet in
+ * one place (the parts of a compound) count together there.
  */
-export function scorePlaces(found: readonly { readonly match: Match; readonly place: Place }[]): {
-  readonly places: readonly HitPlace[];
-  readonly weights: ReadonlyMap<string, number>;
-} {
+export function weightsOf(matches: readonly Match[]): ReadonlyMap<string, number> {
   const weights = new Map<string, number>();
+  eachPosition(matches, (_, weight, terms) => {
+    for (const { word } of terms) weights.set(word, (weights.get(word) ?? 0) + weight);
+  });
+  if (weights.size < 2) return weights;
+  return new Map([...weights].sort(([a], [b]) => byCodePoint(a, b)));
+}
+
+/** Scores each place of a page where a term was found. */
+export function scorePlaces(matches: readonly Match[]): readonly HitPlace[] {
   const places: HitPlace[] = [];
-  const sorted = found.toSorted((a, b) => a.place.position - b.place.position);
-  for (let start = 0, end = 0; start < sorted.length; start = end) {
-    const position = sorted[start]?.place.position ?? 0;
-    const firsts = new Map<number, { readonly match: Match; readonly place: Place }>();
-    for (end = start; sorted[end]?.place.position === position; end++) {
-      const each = sorted[end];
-      if (each && !firsts.has(each.match.term)) firsts.set(each.match.term, each);
-    }
-    const terms = [...firsts.values()];
-    const least = Math.min(...terms.map(({ place }) => place.weight));
-    const weight = Math.min(least * terms.length, LARGEST_WEIGHT);
-    for (const { match } of terms) weights.set(match.word, (weights.get(match.word) ?? 0) + weight);
-    const closeness = terms.reduce((sum, { match }) => sum + match.closeness, 0);
+  eachPosition(matches, (position, weight, terms) => {
+    const closeness = terms.reduce((sum, match) => sum + match.closeness, 0);
     places.push({ position, score: weight ** 2 * closeness });
+  });
+  return places;
+}
+
+/** Calls `take` for each position in ascending order with its weight and the first match of each term there. */
+function eachPosition(
+  matches: readonly Match[],
+  take: (position: number, weight: number, terms: readonly Match[]) => void,
+): void {
+  const found: { readonly match: Match; readonly weight: number; readonly position: number }[] = [];
+  for (const match of matches) {
+    eachPlace(match.onPage, (weight, position) => {
+      found.push({ match, weight, position });
+    });
   }
-  return { places, weights: new Map([...weights].sort(([a], [b]) => byCodePoint(a, b))) };
+  found.sort((a, b) => a.position - b.position);
+  for (let start = 0, end = 0; start < found.length; start = end) {
+    const position = found[start]?.position ?? 0;
+    const terms: Match[] = [];
+    let least = Number.POSITIVE_INFINITY;
+    for (end = start; found[end]?.position === position; end++) {
+      const each = found[end];
+      if (!each || terms.some(({ term }) => term === each.match.term)) continue;
+      terms.push(each.match);
+      least = Math.min(least, each.weight);
+    }
+    take(position, Math.min(least * terms.length, LARGEST_WEIGHT), terms);
+  }
 }

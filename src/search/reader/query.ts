@@ -29,11 +29,10 @@ const MARKS = /(?![\u3099\u309A])\p{M}/gu;
 /** Reads a query. Never throws: lone surrogates, markup and control characters are letters like others. */
 export function readQuery(typed: string, include: ReadonlySet<string>, stem: Stem): Query {
   const text = typed.slice(0, LONGEST_QUERY);
-  const letters = new Intl.Segmenter(undefined, { granularity: 'grapheme' }).segment(text);
   let kept = '';
-  for (const { segment } of letters) {
-    if (include.has(segment)) kept += segment;
-    else if (!PUNCTUATION.test(segment)) kept += segment.toLowerCase();
+  for (const letter of lettersOf(text)) {
+    if (include.has(letter)) kept += letter;
+    else if (!PUNCTUATION.test(letter)) kept += letter.toLowerCase();
   }
   const terms = kept
     .replace(/\s{2,}/g, ' ')
@@ -47,6 +46,15 @@ export function readQuery(typed: string, include: ReadonlySet<string>, stem: Ste
       return { typed, bare, stem: stem(bare), withoutSymbols };
     });
   return { phrase: /^\s*".+"\s*$/.test(typed), terms };
+}
+
+/** What a reader takes for one letter. Printable ASCII has no others than its characters, and needs no segmenter made. */
+function* lettersOf(text: string): Iterable<string> {
+  if (/^[ -~]*$/.test(text)) yield* text;
+  else {
+    const letters = new Intl.Segmenter(undefined, { granularity: 'grapheme' }).segment(text);
+    for (const { segment } of letters) yield segment;
+  }
 }
 
 /** The text without its combining marks. */

@@ -1,6 +1,6 @@
-import { fieldWeight, type Hit, inAll, inOrder, type TermWords } from './hit.ts';
-import { fieldPlacesOf, type IndexContents, placesOf, type WordOnPage } from './index-format.ts';
-import { scorePlaces } from './places.ts';
+import { fieldWeight, type Hit, inOrder, type TermWords } from './hit.ts';
+import { eachFieldPlace, type IndexContents, type WordOnPage } from './index-format.ts';
+import { scorePlaces, weightsOf } from './places.ts';
 
 /** A word of the index that answers a term of the query on one page. */
 export interface Match {
@@ -22,22 +22,23 @@ const ACCENT_BONUS = 0.8;
 
 /** Ranks the pages that have all terms; a term that no word answers is passed over unless none is answered. */
 export function rank(contents: IndexContents, terms: readonly TermWords[]): readonly Hit[] {
-  const pagesOfTerm = terms.map(({ words }) => pagesWith(words));
-  const results = inAll(pagesOfTerm.filter((_, i) => terms[i]?.words.length));
-  const rarity = pagesOfTerm.map((pages) => rarityOf(contents.pages.length, pages.size));
-  const meanLength =
-    contents.pages.reduce((sum, { words }) => sum + words, 0) / contents.pages.length;
-  return inOrder(
-    [...matchesByPage(terms, results)].map(([page, matches]) => {
-      const { places, weights } = scorePlaces(
-        matches.flatMap((match) => placesOf(match.onPage).map((place) => ({ match, place }))),
-      );
-      const length = (contents.pages[page]?.words ?? 0) / meanLength;
-      const score =
-        textScore(matches, weights, rarity, length) + fieldScore(contents, matches, rarity);
-      return { page, score, places };
-    }),
-  );
+  const { pages } = contents;
+  const having = terms.map(({ words }) => pagesWith(words, pages.length));
+  const rarity = having.map(({ count }) => rarityOf(pages.length, count));
+  const answered = having.filter((_, i) => terms[i]?.words.length);
+  const isResult = (page: number) =>
+    answered.length > 0 && answered.every(({ has }) => has[page] === 1);
+  const meanLength = pages.reduce((sum, { words }) => sum + words, 0) / pages.length;
+  const hits: Hit[] = [];
+  for (const [page, matches] of matchesByPage(terms, pages.length, isResult).entries()) {
+    if (!matches) continue;
+    const length = (pages[page]?.words ?? 0) / meanLength;
+    const score =
+      textScore(matches, weightsOf(matches), rarity, length) +
+      fieldScore(contents, matches, rarity);
+    hits.push({ page, score, places: () => scorePlaces(matches) });
+  }
+  return inOrder(hits);
 }
 
 /** ln((N - n + 0.5) / (n + 0.5) + 1): the fewer pages have a word, the more it says. */
@@ -68,12 +69,13 @@ function textScore(
 
 /** Each field counts by the share of the query's rarity that it covers, squared. */
 function fieldScore(contents: IndexContents, matches: readonly Match[], rarity: readonly number[]) {
+  if (matches.every(({ onPage }) => onPage.fieldPlaces.length === 0)) return 0;
   const whole = rarity.reduce((sum, each) => sum + each, 0);
   const termsOfField = new Map<number, Set<number>>();
   for (const { term, onPage } of matches) {
-    for (const { field } of fieldPlacesOf(onPage)) {
+    eachFieldPlace(onPage, (field) => {
       termsOfField.set(field, (termsOfField.get(field) ?? new Set()).add(term));
-    }
+    });
   }
   let score = 0;
   for (const [field, terms] of termsOfField) {
@@ -83,8 +85,15 @@ function fieldScore(contents: IndexContents, matches: readonly Match[], rarity: 
   return score;
 }
 
-function matchesByPage(terms: readonly TermWords[], results: ReadonlySet<number>) {
-  const byPage = new Map([...results].sort((a, b) => a - b).map((page) => [page, [] as Match[]]));
+/** The matches by page number; pages that are no result have none. */
+function matchesByPage(
+  terms: readonly TermWords[],
+  pages: number,
+  isResult: (page: number) => boolean,
+): readonly (readonly Match[] | undefined)[] {
+  const byPage = Array.from({ length: pages }, (_, page): Match[] | undefined =>
+    isResult(page) ? [] : undefined,
+  );
   for (const [number, { term, words }] of terms.entries()) {
     const typedBytes = bytesIn(term.stem);
     for (const { word, forms } of words) {
@@ -93,7 +102,7 @@ function matchesByPage(terms: readonly TermWords[], results: ReadonlySet<number>
         const alike = form.startsWith(term.typed) || term.typed.startsWith(form);
         const accent = alike ? 1 + ACCENT_BONUS : 1;
         for (const onPage of pages) {
-          byPage.get(onPage.page)?.push({ term: number, word, onPage, closeness, accent });
+          byPage[onPage.page]?.push({ term: number, word, onPage, closeness, accent });
         }
       }
     }
@@ -110,7 +119,18 @@ function closenessOf(difference: number): number {
 const encoder = new TextEncoder();
 const bytesIn = (text: string) => encoder.encode(text).length;
 
-const pagesWith = (words: TermWords['words']): ReadonlySet<number> =>
-  new Set(
-    words.flatMap(({ forms }) => forms.flatMap(({ pages }) => pages.map(({ page }) => page))),
-  );
+/** Which pages have any of the words, by page number, and how many they are. */
+function pagesWith(words: TermWords['words'], length: number) {
+  const has = new Uint8Array(length);
+  let count = 0;
+  for (const { forms } of words) {
+    for (const { pages } of forms) {
+      for (const { page } of pages) {
+        if (has[page]) continue;
+        has[page] = 1;
+        count++;
+      }
+    }
+  }
+  return { has, count };
+}
