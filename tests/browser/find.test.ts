@@ -1,6 +1,7 @@
 import { pathToFileURL } from 'node:url';
 import type { Browser, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, inject, test } from 'vitest';
+import type { FinderData } from '../../src/search/finder/finder-data.ts';
 import { launch } from './launch.ts';
 import { serve } from './serve.ts';
 
@@ -204,6 +205,50 @@ describe.each(['under a sub-path', 'opened as a file'])('the finder %s', (where)
     expect(await hash(page)).toBe('#superfat=5');
     await page.close();
   });
+});
+
+test('many rows: a screen at once, sixty soon, all when asked for; paper takes what is listed', async () => {
+  const copies = 40;
+  const page = await browser.newPage();
+  await page.route('**/search/finder.js', async (route) => {
+    const body = await (await route.fetch()).text();
+    const data: FinderData = JSON.parse(body.replace(/^[^{]*/, '').replace(/;\s*$/, ''));
+    const many = <T>(list: readonly T[]) => Array.from({ length: copies }, () => list).flat();
+    const multiplied: FinderData = {
+      codes: many(data.codes).map((_, i) => `QY-${i}`),
+      names: many(data.names),
+      properties: data.properties.map((each) => ({ ...each, values: many(each.values) })),
+      traits: data.traits.map((each) => ({ ...each, members: many(each.members) })),
+    };
+    await route.fulfill({
+      body: `self.handbookFinder=${JSON.stringify(multiplied)};`,
+      contentType: 'text/javascript',
+    });
+  });
+  await page.goto(`${bases['under a sub-path']}find.html`);
+  const rows = page.locator('#find-table tbody tr');
+  await rows.nth(59).waitFor();
+  const all = await number(page);
+  expect(all % copies).toBe(0);
+  expect(await page.locator('#find-all').textContent()).toContain(`The first 60 of ${all} `);
+  expect(await page.locator('#find-table table').getAttribute('aria-rowcount')).toBe(`${all + 1}`);
+  const atOnce = await page.evaluate(() => {
+    const { rows } = document.querySelector('#find-table tbody') as HTMLTableSectionElement;
+    const field = document.querySelector<HTMLInputElement>('[data-property="revision"] .end-min');
+    if (field) field.value = '1';
+    field?.dispatchEvent(new Event('input', { bubbles: true }));
+    const first = rows.length;
+    dispatchEvent(new Event('beforeprint'));
+    return { first, printed: rows.length };
+  });
+  expect(atOnce.first).toBeLessThan(60);
+  expect(atOnce.printed).toBe(60);
+  await page.getByRole('button', { name: `Show all ${all}` }).click();
+  await rows.nth(all - 1).waitFor();
+  const codes = await page.locator('#find-table tbody td.code').allInnerTexts();
+  expect(codes).toEqual(Array.from({ length: all }, (_, i) => `QY-${i}`));
+  expect(await page.locator('#find-all').textContent()).toBe('');
+  await page.close();
 });
 
 describe('search files that are missing or damaged', () => {
