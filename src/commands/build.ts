@@ -16,6 +16,7 @@ import {
 } from '../edition/swap-fs.ts';
 import { writeProblem } from '../edition/write-problem.ts';
 import { isCalendarDate } from '../formulary/calendar-date.ts';
+import { measureStage, onStage } from '../formulary/stages.ts';
 import { handOver } from '../site/input.ts';
 import { counted, problemSummary, problemText } from '../words/problem-text.ts';
 import { FOLDERS, readArguments } from './arguments.ts';
@@ -102,6 +103,9 @@ async function buildInto(
   }
 
   const start = performance.now();
+  onStage((stage, milliseconds) => {
+    console.log(`  ${stage.padEnd(9)} ${(milliseconds / 1000).toFixed(1).padStart(6)} s`);
+  });
   const loaded = loadSite(
     { formulas, data },
     {
@@ -128,7 +132,9 @@ async function buildInto(
     // Astro looks at the folder it runs in to choose where its own output goes
     process.chdir(PROJECT);
     await build({ root: PROJECT, outDir: work, logLevel: 'error', vite: { logLevel: 'error' } });
+    const startOfSeal = performance.now();
     sealEdition(work, loaded.input.edition.document);
+    measureStage('checksums', startOfSeal);
     if (!lock.isHeld()) throw new Error(problemText(lostHold(out)));
     moveFolder(work, folders.next);
     swap(folders);
@@ -142,6 +148,8 @@ async function buildInto(
   } finally {
     process.chdir(here);
   }
+  // what the last stages say comes before the end
+  await new Promise((told) => setImmediate(told));
   const pages = readdirSync(folders.current, { recursive: true }).filter((file) =>
     String(file).endsWith('.html'),
   ).length;

@@ -3,6 +3,7 @@ import { withCautions } from '../cautions/with-cautions.ts';
 import { isCalendarDate } from '../formulary/calendar-date.ts';
 import type { ShopFolders } from '../formulary/formulary.ts';
 import { loadFormulary, PACKAGED_DATA } from '../formulary/load.ts';
+import { measureStage } from '../formulary/stages.ts';
 import { SHOP_FILES } from '../reference/data-files.ts';
 import type { Problem } from '../words/problem.ts';
 import { type Edition, editionOf, editionProblems } from './edition.ts';
@@ -47,6 +48,7 @@ export function loadEdition(
   const found = [...loaded.problems, ...ledger.problems];
   if (!loaded.ok) return { ok: false, problems: found };
 
+  const start = performance.now();
   const { formulary } = loaded;
   const before = last === null ? null : readLastEdition(last, formulary.reference.shop.name);
   const inputs = {
@@ -62,7 +64,9 @@ export function loadEdition(
     ...editionProblems(formulary, inputs, ledgerFile),
   ];
   if (problems.some(({ severity }) => severity === 'error')) return { ok: false, problems };
-  return { ok: true, edition: editionOf(withCautions(formulary, asOf), inputs), problems };
+  const edition = editionOf(withCautions(formulary, asOf), inputs);
+  measureStage('edition', start);
+  return { ok: true, edition, problems };
 }
 
 /** The packaged folder's own shop and lots are no input of another shop's edition. */

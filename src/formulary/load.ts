@@ -10,6 +10,7 @@ import { type FormulasRead, readFormulas } from './formulas-fs.ts';
 import { knownFrom } from './known.ts';
 import { lotProblems } from './lot-problems.ts';
 import { releaseProblems } from './release.ts';
+import { measureStage } from './stages.ts';
 
 export interface LoadOptions {
   /** The reference data that the shop's own lies over; without it the one that comes with the code. */
@@ -50,9 +51,12 @@ export function loadParts(
   readonly problems: readonly Problem[];
   readonly codes: FormulasRead['codes'];
 } {
+  const start = performance.now();
   const { reference, problems: dataProblems } = readData(folders.data, packagedData);
   const read = readFormulas(asTyped(folders.formulas), reference ? knownFrom(reference) : null);
   const problems: Problem[] = [...dataProblems, ...read.problems];
+  measureStage('read', start);
+  const startOfComputing = performance.now();
   const formulas: ComputedFormula[] = [];
   if (reference) {
     if (asOf !== null) problems.push(...lotProblems(reference, read.formulas, asOf));
@@ -64,6 +68,7 @@ export function loadParts(
       formulas.push(result.computed);
     }
   }
+  measureStage('compute', startOfComputing);
   formulas.sort((a, b) => (a.formula.code < b.formula.code ? -1 : 1));
   return { reference, formulas, problems, codes: read.codes };
 }

@@ -43,7 +43,7 @@ function greyPng(rgba: Uint8Array, width: number, height: number): Buffer {
     Buffer.from([0x89, 0x50, 0x4e, 0x47, 0x0d, 0x0a, 0x1a, 0x0a]),
     chunk('IHDR', header),
     chunk('pHYs', size),
-    chunk('IDAT', deflateSync(rows, { level: 9 })),
+    chunk('IDAT', deflateSync(rows, { level: 6 })),
     chunk('IEND', Buffer.alloc(0)),
   ]);
 }

@@ -2,6 +2,7 @@ import { mkdirSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import type { AstroIntegration } from 'astro';
+import { measureStage } from '../../formulary/stages.ts';
 import { type CardContent, cardContent } from '../../handbook/card-content.ts';
 import { cardFiles, pruneCards } from '../../handbook/card-files-fs.ts';
 import { siteInput } from '../input.ts';
@@ -16,6 +17,7 @@ export function benchCards(): AstroIntegration {
         cache = fileURLToPath(new URL('.cache/cards', config.root));
       },
       'astro:build:done': async ({ dir }) => {
+        const start = performance.now();
         const folder = join(fileURLToPath(dir), 'cards');
         mkdirSync(folder, { recursive: true });
         for (const [name, content] of contents()) {
@@ -24,6 +26,7 @@ export function benchCards(): AstroIntegration {
           writeFileSync(join(folder, `${name}.png`), png);
         }
         pruneCards(cache, Date.now());
+        measureStage('cards', start);
       },
       'astro:server:setup': ({ server }) => {
         server.middlewares.use('/cards', (request, response, next) => {

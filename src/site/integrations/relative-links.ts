@@ -3,6 +3,7 @@ import { join, posix, relative, sep } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import type { AstroIntegration } from 'astro';
 import { SEAL_FILES } from '../../edition/seal-fs.ts';
+import { measureStage } from '../../formulary/stages.ts';
 import { rewriteLinks } from './rewrite-links.ts';
 
 /**
@@ -14,6 +15,7 @@ export function relativeLinks(): AstroIntegration {
     name: 'relative-links',
     hooks: {
       'astro:build:done': ({ dir }) => {
+        const start = performance.now();
         const folder = fileURLToPath(dir);
         const files = filesIn(folder);
         const texts = new Map(
@@ -32,6 +34,7 @@ export function relativeLinks(): AstroIntegration {
         if (dangling.length > 0) {
           throw new Error(`Links that lead nowhere:\n${dangling.join('\n')}`);
         }
+        measureStage('links', start);
       },
     },
   };

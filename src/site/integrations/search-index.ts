@@ -2,6 +2,7 @@ import { mkdirSync, readdirSync, readFileSync, writeFileSync } from 'node:fs';
 import { dirname, join, posix, sep } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import type { AstroIntegration } from 'astro';
+import { measureStage } from '../../formulary/stages.ts';
 import { buildSearch } from '../../search/build/build-search.ts';
 import { siteInput } from '../input.ts';
 
@@ -11,6 +12,7 @@ export function searchIndex(): AstroIntegration {
     name: 'search-index',
     hooks: {
       'astro:build:done': async ({ dir }) => {
+        const start = performance.now();
         const folder = fileURLToPath(dir);
         const pages = readdirSync(folder, { recursive: true, encoding: 'utf8' })
           .filter((path) => path.endsWith('.html'))
@@ -27,6 +29,7 @@ export function searchIndex(): AstroIntegration {
           mkdirSync(dirname(target), { recursive: true });
           writeFileSync(target, text);
         }
+        measureStage('search', start);
       },
     },
   };
