@@ -48,7 +48,10 @@ export async function main(args: readonly string[]): Promise<number> {
       'as-of': { value: 'DATE', about: 'the date the edition is of (today)' },
       last: { value: 'DIR', about: 'the edition before, for the page of changes' },
       drafts: { value: null, about: 'a proof edition, with what is not approved' },
-      'with-costs': { value: null, about: 'costs on the shopping page, by data/prices.yaml' },
+      'with-costs': {
+        value: null,
+        about: 'costs on the shopping page and in the finder, by data/prices.yaml',
+      },
     },
   });
   if (!read.ok) {

@@ -16,7 +16,7 @@ export type LoadedSite =
   | { readonly ok: false; readonly problems: readonly Problem[] };
 
 export interface SiteOptions extends EditionOptions {
-  /** Costs on the shopping page. Never for an edition that hangs at the bench. */
+  /** Costs on the shopping page and in the finder. Never for an edition that hangs at the bench. */
   readonly withCosts?: boolean;
 }
 
@@ -30,7 +30,8 @@ export function loadSite(folders: ShopFolders, options: SiteOptions): LoadedSite
   const published = packagedReference(packaged, folders, formulary.reference);
   if (!published.reference) return { ok: false, problems: [...problems, ...published.problems] };
   const evidence = readEvidence(packaged, published.reference);
-  const kept = readSavedSearches(folders.data, finderData(formulary));
+  // without prices: what is kept must hold in every edition, and most show no costs
+  const kept = readSavedSearches(folders.data, finderData(formulary, null));
   const priced = readPrices(folders.data, formulary.reference);
   const more = [...evidence.problems, ...kept.problems, ...priced.problems];
   if (more.length > 0) return { ok: false, problems: [...problems, ...more] };

@@ -2,6 +2,7 @@ import { approvalLines } from './en/approval-lines.ts';
 import { breachText } from './en/breaches.ts';
 import { cardWords } from './en/card.ts';
 import { cautionTexts } from './en/cautions.ts';
+import { cautionNames } from './en/cautions-names.ts';
 import { changesPage } from './en/changes-page.ts';
 import { checkPage } from './en/check-page.ts';
 import { contentsPage } from './en/contents-page.ts';
@@ -10,6 +11,7 @@ import { declaration } from './en/declaration.ts';
 import { evidencePage } from './en/evidence-page.ts';
 import { fatPages } from './en/fat-pages.ts';
 import { findWords } from './en/find.ts';
+import { findCost } from './en/find-cost.ts';
 import { formulaPage } from './en/formula-page.ts';
 import { frame } from './en/frame.ts';
 import { hazardWords, STATEMENTS } from './en/hazard-statements.ts';
@@ -37,6 +39,7 @@ import { dilutionWords, yieldWords } from './en/yields.ts';
 /** Every word that is shown, in English. The other catalogues have its shape. */
 export const english = {
   approvalLines,
+  cautionNames,
   cautionTexts,
   changesPage,
   checkPage,
@@ -48,6 +51,7 @@ export const english = {
   dilutionWords,
   evidencePage,
   fatPages,
+  findCost,
   findWords,
   formulaPage,
   frame,

@@ -4,6 +4,7 @@ import { join } from 'node:path';
 import { afterAll, describe, expect, test } from 'vitest';
 import { costOf } from '../../src/browser/shopping-sums.ts';
 import { readPrices } from '../../src/reference/prices-fs.ts';
+import { finderData } from '../../src/site/find/finder-data.ts';
 import { shoppingData } from '../../src/site/shopping/shopping-data.ts';
 import { computedWith, REFERENCE } from '../cautions/context.ts';
 
@@ -63,5 +64,35 @@ test('asked for, a batch of one kilogram of olive oil costs its oil and its alka
   expect(costOf(data, batch?.lines ?? [])).toEqual({
     cost: expect.closeTo(6.43 + (2 * grams) / 1000, 10),
     unpriced: [],
+  });
+});
+
+describe('in the finder', () => {
+  const costIn = (text: string) =>
+    finderData({ reference: REFERENCE, formulas }, pricesOf(text).prices).properties.find(
+      ({ id }) => id === 'cost',
+    );
+
+  test('cost is a property where prices are handed in, by the kilogram of all that goes in', () => {
+    const property = costIn(GOOD);
+    const batch = formulas[0]?.document.batches[0];
+    const alkali = batch?.alkali[0]?.weighedMass ?? 0;
+    const olive = batch?.fats[0]?.weighedMass ?? 0;
+    const whole = olive + alkali + (batch?.weighedWater ?? 0);
+    expect(property?.unit).toBe('XTS/kg');
+    // both prices are per kilogram, so grams over grams
+    expect(property?.values).toEqual([expect.closeTo((6.43 * olive + 2 * alkali) / whole, 2)]);
+  });
+
+  test('a formula with a material that has no price has no number', () => {
+    const text = GOOD.split('\n')
+      .filter((line) => !line.includes('hydroxide'))
+      .join('\n');
+    expect(costIn(text)?.values).toEqual([null]);
+  });
+
+  test('without prices there is no such property, and no word of one', () => {
+    const data = finderData({ reference: REFERENCE, formulas }, null);
+    expect(JSON.stringify(data)).not.toMatch(/cost|XTS|kilogram of/i);
   });
 });

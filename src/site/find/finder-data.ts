@@ -1,14 +1,16 @@
 import type { Formulary } from '../../formulary/formulary.ts';
+import type { Prices } from '../../reference/prices-fs.ts';
 import type { FinderData, Property } from '../../search/finder/finder-data.ts';
 import { words } from '../../words/catalogue.ts';
+import { costProperty } from './cost-property.ts';
 import { traitsOf } from './finder-traits.ts';
 import { NUMBER_PROPERTIES } from './number-properties.ts';
 
 /** Acids below this in every formula are traces of the standards' ranges. [percent of the fatty acids] */
 const LEAST_ACID = 0.5;
 
-/** All that the finder knows of a formulary. */
-export function finderData(formulary: Formulary): FinderData {
+/** All that the finder knows of a formulary. Cost is in it only where prices are handed in. */
+export function finderData(formulary: Formulary, prices: Prices | null): FinderData {
   const { formulas } = formulary;
   const properties = NUMBER_PROPERTIES.map(
     ({ id, group, format, decimals, value }): Property => ({
@@ -24,7 +26,11 @@ export function finderData(formulary: Formulary): FinderData {
   return {
     codes: formulas.map(({ document }) => document.code),
     names: formulas.map(({ document }) => document.name),
-    properties: [...properties, ...acidProperties(formulary)],
+    properties: [
+      ...properties,
+      ...acidProperties(formulary),
+      ...(prices ? [costProperty(formulary, prices)] : []),
+    ],
     traits: traitsOf(formulary),
   };
 }

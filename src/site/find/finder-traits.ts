@@ -2,6 +2,7 @@ import type { ComputedFormula, Formulary } from '../../formulary/formulary.ts';
 import { nameOf } from '../../handbook/names.ts';
 import type { Trait } from '../../search/finder/finder-data.ts';
 import { words } from '../../words/catalogue.ts';
+import type { CautionId } from '../../words/en/cautions.ts';
 
 interface TraitSource {
   readonly id: keyof typeof words.findWords.traits;
@@ -72,7 +73,7 @@ export function traitsOf({ formulas, reference }: Formulary): readonly Trait[] {
       id: 'cautions',
       holds: 'many',
       of: ({ document }) => document.cautions.map(({ id }) => id),
-      name: (id) => id.replaceAll('-', ' '),
+      name: (id) => words.cautionNames[id as CautionId],
     },
   ];
   return sources.map(({ id, holds, only = false, known = [], of, name }) => {
