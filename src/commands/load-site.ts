@@ -1,5 +1,6 @@
 import { resolve } from 'node:path';
 import { type EditionOptions, loadEdition } from '../edition/load-edition-fs.ts';
+import { softwareOfBuild } from '../edition/software-fs.ts';
 import type { ShopFolders } from '../formulary/formulary.ts';
 import { packagedData, readData } from '../formulary/load.ts';
 import { readEvidence } from '../reference/evidence/read-evidence-fs.ts';
@@ -45,6 +46,7 @@ export function loadSite(folders: ShopFolders, options: SiteOptions): LoadedSite
       searches: kept.searches,
       prices: options.withCosts ? priced.prices : null,
       asOf,
+      software: softwareOfBuild(),
       formulasFolder: resolve(folders.formulas),
     },
   };

@@ -18,6 +18,8 @@ export interface SiteInput {
   readonly prices: Prices | null;
   /** The one date that comparisons use and that pages show, `2026-12-01`. */
   readonly asOf: string;
+  /** The software that builds the pages, as CycloneDX. */
+  readonly software: string;
   /** Folder of the formula files, for the pictures that they show. */
   readonly formulasFolder: string;
 }

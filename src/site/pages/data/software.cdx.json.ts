@@ -1,9 +1,8 @@
 import type { APIRoute } from 'astro';
-import lockfile from '../../../../package-lock.json?raw';
-import { billOfMaterials } from '../../../edition/bill-of-materials.ts';
+import { siteInput } from '../../input.ts';
 
 /** The software that this handbook was built with. */
 export const GET: APIRoute = () =>
-  new Response(billOfMaterials(lockfile), {
+  new Response(siteInput().software, {
     headers: { 'Content-Type': 'application/vnd.cyclonedx+json' },
   });
