@@ -4,7 +4,7 @@ import type { FormulaRule } from '../words/en/problems-formula.ts';
 import type { Problem } from '../words/problem.ts';
 import { amountNames } from './amount-names.ts';
 import { assembleFormula } from './assemble.ts';
-import { checkCharacters } from './checks/characters.ts';
+import { checkCharacters, checkReferences } from './checks/characters.ts';
 import { checkDirectives } from './checks/directives.ts';
 import { checkIds } from './checks/ids.ts';
 import { checkLinks, type FormulaLink } from './checks/links.ts';
@@ -41,6 +41,7 @@ const FAULT_RULES = {
   tab: 'formula/tab',
   'duplicate-key': 'formula/repeated-key',
   anchor: 'formula/anchor',
+  'hidden-character': 'formula/hidden-character',
 } as const satisfies Record<ReadYaml['faults'][number]['kind'], FormulaRule>;
 
 /**
@@ -66,12 +67,13 @@ export function readFormula(
   }
   const yaml = parseYaml(parts.yaml, { firstLine: parts.yamlLine });
   const report = reportOn(file, yaml);
-  checkCharacters(text.replace(/^\uFEFF/, ''), report);
+  checkCharacters(text, report);
   const front = checkFrontmatter(yaml, known, report);
   let method: Root | null = null;
   let links: readonly FormulaLink[] = [];
   if (isShallow(parts.body, parts.bodyPlace, report)) {
     method = parseMethod(parts.body);
+    checkReferences(method, parts.body, report);
     checkStructure(method, parts.bodyPlace, report);
     links = checkLinks(method, images, report);
     checkDirectives(method, front ? amountNames(front.value, known) : null, report);

@@ -1,9 +1,9 @@
-/** Small builders for MathML; every argument is MathML already. */
+/** Small builders for MathML; names are plain text, every other argument is MathML already. */
 import { withDecimalSign } from '../words/numbers.ts';
 
-export const variable = (name: string) => `<mi>${name}</mi>`;
+export const variable = (name: string) => `<mi>${escaped(name)}</mi>`;
 /** A name of several letters, set upright. */
-export const named = (name: string) => `<mi mathvariant="normal">${name}</mi>`;
+export const named = (name: string) => `<mi mathvariant="normal">${escaped(name)}</mi>`;
 /** A number written with a point; it is shown with the shop's decimal sign. */
 export const number = (value: string | number) => `<mn>${withDecimalSign(String(value))}</mn>`;
 export const sign = (operator: string) => `<mo>${operator}</mo>`;
@@ -20,3 +20,7 @@ export const equals = (left: string, right: string) => row(left, sign('='), righ
 /** A displayed equation. */
 export const display = (body: string) =>
   `<math xmlns="http://www.w3.org/1998/Math/MathML" display="block">${body}</math>`;
+
+function escaped(text: string): string {
+  return text.replaceAll('&', '&amp;').replaceAll('<', '&lt;');
+}

@@ -1,3 +1,4 @@
+import { whatIsWrongWith } from './ids.ts';
 import type { KnownFats } from './materials.ts';
 import { didYouMean } from './nearest.ts';
 import type { DataReport } from './report.ts';
@@ -19,10 +20,11 @@ export function blendsFrom(
 ): Map<string, Blend> {
   const blends = new Map<string, Blend>();
   for (const [id, { name, parts, notes = [] }] of Object.entries(raw)) {
-    if (!/^[a-z0-9]+(-[a-z0-9]+)*$/.test(id)) {
+    const expected = whatIsWrongWith(id);
+    if (expected !== null) {
       report.inKey([id], 'data/text-form', {
         found: `the id "${id}"`,
-        expected: 'small letters, digits and single hyphens',
+        expected,
         advice: 'the name may be anything',
       });
     }

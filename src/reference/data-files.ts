@@ -1,3 +1,4 @@
+import { whatIsWrongWith } from './ids.ts';
 import { didYouMean } from './nearest.ts';
 import { TABLES, type TableName } from './tables.ts';
 
@@ -34,13 +35,15 @@ const OTHER_FILES = ['evidence.yaml', 'searches.yaml'];
 
 export const DATA_FOLDERS = ['fats', 'alkalis', 'tables'] as const;
 
-const FAT_FILE = /^fats\/[a-z0-9]+(-[a-z0-9]+)*\.yaml$/;
-
 /** Whether a name is one of a data folder, and if not, what may have been meant. */
 export function dataFileAdvice(name: string): string | null {
   const known = [...PACKAGED_FILES, ...SHOP_FILES, ...OTHER_FILES];
-  if (known.includes(name) || FAT_FILE.test(name)) return null;
-  if (name.startsWith('fats/'))
-    return 'name it with small letters, digits and hyphens, then ".yaml"';
+  if (known.includes(name)) return null;
+  if (name.startsWith('fats/')) {
+    const expected = name.endsWith('.yaml')
+      ? whatIsWrongWith(name.slice(5, -5))
+      : '".yaml" at its end';
+    return expected === null ? null : `name it after the fat, with ${expected}`;
+  }
   return didYouMean(name, known, 'move it out of the data folder');
 }

@@ -2,6 +2,7 @@ import type { z } from 'zod';
 import type { DataRule } from '../words/en/problems-data.ts';
 import type { Problem } from '../words/problem.ts';
 import type { DataFile } from './data-files.ts';
+import { hiddenPlaces } from './hidden-places.ts';
 import { type DataReport, dataProblem, reportOn } from './report.ts';
 import { fit } from './schema-problems.ts';
 import { parseYaml } from './yaml.ts';
@@ -12,6 +13,7 @@ const RULE_OF_FAULT: Readonly<Record<YamlFault['kind'], DataRule>> = {
   tab: 'data/tab',
   'duplicate-key': 'data/duplicate-key',
   anchor: 'data/anchor',
+  'hidden-character': 'data/hidden-character',
 };
 
 export interface OpenedFile<T> {
@@ -25,6 +27,17 @@ export function openFile<T>(
   schema: z.ZodType<T>,
   problems: Problem[],
 ): OpenedFile<T> | null {
+  const hidden = hiddenPlaces(text);
+  for (const { place, name } of hidden) {
+    problems.push(
+      dataProblem(file, place, 'data/hidden-character', {
+        found: `the invisible character ${name}`,
+        expected: 'text that can be seen',
+        advice: 'delete it and type the text around it again',
+      }),
+    );
+  }
+  if (hidden.length > 0) return null;
   const yaml = parseYaml(text);
   for (const { kind, line, column, ...parts } of yaml.faults) {
     problems.push(dataProblem(file, { line, column }, RULE_OF_FAULT[kind], parts));

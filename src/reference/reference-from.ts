@@ -7,11 +7,12 @@ import { blendsFrom } from './blends.ts';
 import { cautionThresholdsFrom } from './caution-thresholds.ts';
 import type { DataFile } from './data-files.ts';
 import { fatRecord } from './fat.ts';
+import { checkIds } from './ids.ts';
 import { lintFat } from './lint/lint-fat.ts';
 import { lotsFrom } from './lots.ts';
 import type { AlkaliRecord, FatRecord } from './material-records.ts';
 import { additiveRecords, liquidRecords } from './materials.ts';
-import { openAll, type RawData } from './raw-data.ts';
+import { ALKALIS, openAll, type RawData } from './raw-data.ts';
 import type { Reference } from './reference.ts';
 import { valueRecord } from './schema/value.ts';
 import { shopFrom } from './shop.ts';
@@ -65,6 +66,19 @@ function assemble(raw: RawData): Reference | null {
     const alkali = opened && alkaliRecord(id, opened.value, opened.report);
     if (alkali) alkalis.set(id, alkali);
   }
+  const taken = new Map<string, string>([
+    ...ALKALIS.map((id) => [id, 'an alkali'] as const),
+    ...[...fatIds].map((id) => [id, 'a fat'] as const),
+  ]);
+  for (const { file, owner } of [
+    { file: raw.additives, owner: 'an additive' },
+    { file: raw.liquids, owner: 'a liquid' },
+  ]) {
+    if (!file) continue;
+    const ids = Object.keys(file.value);
+    checkIds(ids, taken, file.report);
+    for (const id of ids) taken.set(id, owner);
+  }
   const additives =
     raw.additives && additiveRecords(raw.additives.value, weights, constants, raw.additives.report);
   const liquids =
@@ -73,10 +87,8 @@ function assemble(raw: RawData): Reference | null {
   const lots = raw.lots
     ? lotsFrom(raw.lots.value, { fats, fatIds }, raw.lots.report)
     : { fats: [], alkalis: [] };
-  const taken = new Set([...fatIds, ...alkalis.keys(), ...(additives?.keys() ?? [])]);
-  for (const id of liquids?.keys() ?? []) taken.add(id);
   const blends = raw.blends
-    ? blendsFrom(raw.blends.value, { fats, fatIds }, taken, raw.blends.report)
+    ? blendsFrom(raw.blends.value, { fats, fatIds }, new Set(taken.keys()), raw.blends.report)
     : new Map<string, never>();
   const tables = everyTable(raw.tables) ? modelTables(raw.tables, sources) : null;
   if (!additives || !liquids || !shop || !tables || !raw.cautions || !raw.soapGrades) return null;

@@ -1,9 +1,19 @@
-import { type Document, isAlias, isNode, isPair, isScalar, type Node, visit } from 'yaml';
+import {
+  type Document,
+  isAlias,
+  isNode,
+  isPair,
+  isScalar,
+  type Node,
+  type Scalar,
+  visit,
+} from 'yaml';
+import { hiddenCharacters } from '../words/hidden-characters.ts';
 import type { Place } from './yaml.ts';
 
 /** Why a text could not be taken as it stands; the caller gives it its rule id. */
 export interface YamlFault extends Place {
-  readonly kind: 'syntax' | 'tab' | 'duplicate-key' | 'anchor';
+  readonly kind: 'syntax' | 'tab' | 'duplicate-key' | 'anchor' | 'hidden-character';
   readonly found: string;
   readonly expected: string;
   readonly advice: string;
@@ -12,6 +22,7 @@ export interface YamlFault extends Place {
 /** What is wrong with a document as YAML, and what YAML allows and no file here needs. */
 export function faultsOf(
   document: Document.Parsed,
+  text: string,
   placeAt: (offset: number) => Place,
 ): readonly YamlFault[] {
   return [
@@ -19,7 +30,7 @@ export function faultsOf(
       ...placeAt(error.pos[0]),
       ...describe(error),
     })),
-    ...forbidden(document, placeAt),
+    ...forbidden(document, text, placeAt),
   ];
 }
 
@@ -75,7 +86,11 @@ function describe(error: {
 }
 
 /** What YAML allows and no file here needs. */
-function forbidden(document: Document.Parsed, placeAt: (offset: number) => Place): YamlFault[] {
+function forbidden(
+  document: Document.Parsed,
+  text: string,
+  placeAt: (offset: number) => Place,
+): YamlFault[] {
   const faults: YamlFault[] = [];
   const anchor = (node: Node, found: string) => {
     faults.push({
@@ -87,6 +102,16 @@ function forbidden(document: Document.Parsed, placeAt: (offset: number) => Place
     });
   };
   visit(document, (_, node) => {
+    const escaped = isScalar(node) ? escapedCharacter(node, text) : undefined;
+    if (escaped && isNode(node)) {
+      faults.push({
+        ...placeAt(node.range?.[0] ?? 0),
+        kind: 'hidden-character',
+        found: `an escape of the invisible character ${escaped}`,
+        expected: 'text that can be seen',
+        advice: 'take the escape out',
+      });
+    }
     if (isAlias(node)) anchor(node, `the alias "*${node.source}"`);
     else if (isPair(node)) {
       if (isScalar(node.key) && node.key.value === '<<') anchor(node.key, 'the merge key "<<"');
@@ -104,4 +129,12 @@ function forbidden(document: Document.Parsed, placeAt: (offset: number) => Place
     }
   });
   return faults;
+}
+
+/** A character that cannot be seen and that the text of a file hides behind an escape, `"\\u202E"`. */
+function escapedCharacter({ value, range }: Scalar, text: string): string | undefined {
+  if (typeof value !== 'string' || !range) return undefined;
+  // no line of a file ends in a carriage return alone once YAML has read it
+  const hidden = hiddenCharacters(value)[0]?.name ?? (value.includes('\r') ? 'U+000D' : undefined);
+  return hiddenCharacters(text.slice(range[0], range[1])).length > 0 ? undefined : hidden;
 }

@@ -39,7 +39,7 @@ export function parseYaml(text: string, { firstLine = 1 }: { firstLine?: number 
     prettyErrors: false,
     version: '1.2',
   });
-  const faults = faultsOf(document, placeAt);
+  const faults = faultsOf(document, text, placeAt);
   const start = placeAt(isNode(document.contents) ? (document.contents.range?.[0] ?? 0) : 0);
   if (faults.length > 0) return failed(faults, start);
   const offsetOf = (node: unknown) => (isNode(node) && node.range ? node.range[0] : null);

@@ -1,3 +1,4 @@
+import { madeVisible } from './hidden-characters.ts';
 import type { Problem } from './problem.ts';
 /**
  * One line for one problem:
@@ -5,14 +6,19 @@ import type { Problem } from './problem.ts';
  */
 export function problemText(problem: Problem): string {
   const { file, line, column, found, expected, advice, rule, severity } = problem;
-  const parts = [`Found ${found}`];
-  if (expected !== '') parts.push(`, expected ${expected}`);
-  if (advice !== '') parts.push(`; ${advice}`);
+  const parts = [`Found ${cut(found)}`];
+  if (expected !== '') parts.push(`, expected ${cut(expected)}`);
+  if (advice !== '') parts.push(`; ${cut(advice)}`);
   const sentence = parts.join('');
   const end = /[.?!]$/.test(sentence) ? '' : '.';
   const warning = severity === 'warning' ? 'Warning: ' : '';
-  return `${file}:${line}:${column}  ${warning}${sentence}${end}  [${rule}]`;
+  return madeVisible(`${file}:${line}:${column}  ${warning}${sentence}${end}  [${rule}]`);
 }
+
+/** Longer parts are cut: what was found may be a whole file on one line. [characters] */
+const LONGEST = 400;
+
+const cut = (text: string) => (text.length > LONGEST ? `${text.slice(0, LONGEST)}…` : text);
 
 /** `3 errors and 1 warning in 2 files`, or `no problems`. */
 export function problemSummary(problems: readonly Problem[]): string {

@@ -3,8 +3,8 @@ import { tmpdir } from 'node:os';
 import { dirname, join } from 'node:path';
 import { buildSearch } from '../../src/search/build/build-search.ts';
 import type { FinderData } from '../../src/search/finder/finder-data.ts';
-import { chance } from '../search/chance.ts';
 import { WORDS } from '../search/synthetic-pages.ts';
+import { chance } from '../support/chance.ts';
 import { sitePages } from '../support/site-files.ts';
 
 /** A folder with the find page and all that it loads. */

@@ -1,7 +1,7 @@
 import { mkdirSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
-import { chance } from '../search/chance.ts';
 import { WORDS } from '../search/synthetic-pages.ts';
+import { chance } from '../support/chance.ts';
 
 /** Fats that a workshop pours much and little of, by their ids in the packaged data. */
 const BASES = ['olive', 'sunflower-ho', 'rapeseed-lear', 'tallow', 'lard', 'rice-bran', 'palm'];

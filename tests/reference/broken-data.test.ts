@@ -103,7 +103,7 @@ describe('folders on a disk', () => {
     write('lot.yaml', 'fats: []\n');
     write('fats/Olive Oil.yaml', 'name: x\n');
     expect(textsOfFolders(['data', root])).toEqual([
-      'ROOT/fats/Olive Oil.yaml:1:1  Found the file "fats/Olive Oil.yaml", expected only data files in the data folder; name it with small letters, digits and hyphens, then ".yaml".  [data/unknown-file]',
+      'ROOT/fats/Olive Oil.yaml:1:1  Found the file "fats/Olive Oil.yaml", expected only data files in the data folder; name it after the fat, with small letters, digits and single hyphens, at most 40.  [data/unknown-file]',
       'ROOT/lot.yaml:1:1  Found the file "lot.yaml", expected only data files in the data folder; did you mean "lots.yaml"?  [data/unknown-file]',
     ]);
   });

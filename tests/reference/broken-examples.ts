@@ -29,6 +29,15 @@ export const BROKEN: readonly {
     rule: 'data/duplicate-key',
     files: withText('fats/trial.yaml', `${SMALL_FAT}palm: false\npalm: true\n`),
   },
+  {
+    rule: 'data/hidden-character',
+    files: [
+      ...withText('fats/trial.yaml', `# \u202Enot seen\n${SMALL_FAT}`).filter(
+        ({ name }) => name !== 'lots.yaml',
+      ),
+      file('lots.yaml', 'fats:\n  - { fat: "ol\\u200Bive" }\n'),
+    ],
+  },
   { rule: 'data/anchor', files: withText('fats/trial.yaml', `${SMALL_FAT}notes: &all [one]\n`) },
   {
     rule: 'data/unknown-key',

@@ -1,5 +1,5 @@
 import type { Page } from '../../src/search/build/index-pages.ts';
-import { type Chance, chance } from './chance.ts';
+import { type Chance, chance } from '../support/chance.ts';
 
 const ROOTS =
   'soap olive coconut lye water batch mould cure trace superfat glycerol alkali weigh shea castor lard tallow fat bar paste liquid kettle temper salt clay oat honey milk yoghurt rosemary lavender citric lactate batter stir melt gel slab cut stamp harbour lamp bell rope jetty quay lantern goat linen chalk barge slip oxide carbon linole palmit stear ricinole titrate phenol sheet scale danger caution glove goggle'.split(

@@ -1,21 +1,22 @@
 import { z } from 'zod';
 import { LANGUAGES } from '../../words/languages.ts';
 import { voiceOf } from '../../words/voice.ts';
+import { whatIsWrongWith } from '../ids.ts';
 import { date } from './date.ts';
 import { measure } from './measure.ts';
 import { broken, line } from './value.ts';
 
 const id = z.string().superRefine((text, context) => {
-  if (!/^[a-z0-9]+(-[a-z0-9]+)*$/.test(text) || text.length > 40) {
-    context.addIssue(
-      broken({
-        rule: 'data/text-form',
-        found: `the id "${text}"`,
-        expected: 'small letters, digits and single hyphens',
-        advice: 'ids become addresses of pages; the label may be anything',
-      }),
-    );
-  }
+  const expected = whatIsWrongWith(text);
+  if (expected === null) return;
+  context.addIssue(
+    broken({
+      rule: 'data/text-form',
+      found: `the id "${text}"`,
+      expected,
+      advice: 'ids become addresses of pages; the label may be anything',
+    }),
+  );
 });
 
 /** Ends up in pictures that are printed, so it must be a plain address. */

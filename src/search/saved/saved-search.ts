@@ -16,7 +16,7 @@ const text = z.string().trim().min(1).max(300);
 export const savedSearchesSchema = z.strictObject({
   searches: z.array(
     z.strictObject({
-      id: z.string().regex(/^[a-z0-9]+(-[a-z0-9]+)*$/),
+      id: z.string(),
       title: text,
       note: text.optional(),
       search: z.string().min(1).max(2000),

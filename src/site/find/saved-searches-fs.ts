@@ -1,3 +1,4 @@
+import { whatIsWrongWith } from '../../reference/ids.ts';
 import { openFile } from '../../reference/open-file.ts';
 import { readText } from '../../reference/read-text-fs.ts';
 import { readAddress } from '../../search/finder/address.ts';
@@ -32,6 +33,14 @@ export function readSavedSearches(
       });
     }
     ids.add(id);
+    const expected = whatIsWrongWith(id);
+    if (expected !== null) {
+      opened.report.in(['searches', i, 'id'], 'data/text-form', {
+        found: `the id "${id}"`,
+        expected,
+        advice: 'the title may be anything',
+      });
+    }
     const { state, ignored } = readAddress(search, data);
     const unknown = [
       ...ignored,

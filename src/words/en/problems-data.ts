@@ -10,6 +10,7 @@ export const DATA_PROBLEMS = {
   'data/yaml': { title: 'The file is not valid YAML' },
   'data/tab': { title: 'A tab where spaces are due' },
   'data/duplicate-key': { title: 'A key that stands there twice' },
+  'data/hidden-character': { title: 'A character that cannot be seen' },
   'data/anchor': { title: 'Anchors, aliases and merge keys are not used in data files' },
   'data/unknown-key': { title: 'A key that this file does not have' },
   'data/missing-key': { title: 'A key that is needed is not there' },

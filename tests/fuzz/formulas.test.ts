@@ -1,0 +1,21 @@
+import { mkdtempSync, rmSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
+import { afterAll, test } from 'vitest';
+import { otherBytes, otherValues } from './formula-cases.ts';
+import { IS_LONG, runCases } from './run.ts';
+
+const folder = mkdtempSync(join(tmpdir(), 'fuzz-'));
+afterAll(() => rmSync(folder, { recursive: true, force: true }));
+
+const SEEDS = IS_LONG ? [1, 2, 3, 4, 5, 6, 7, 8] : [1];
+const CASES = IS_LONG ? 1400 : 120;
+
+test.each(SEEDS)(
+  'a formula with other values is refused with a place, or sound (seed %i)',
+  (seed) => runCases(seed, CASES, otherValues),
+);
+
+test.each(SEEDS)('a damaged formula file is refused with a place, or sound (seed %i)', (seed) =>
+  runCases(seed + 1000, CASES, (random) => otherBytes(random, join(folder, `${seed}.md`))),
+);
