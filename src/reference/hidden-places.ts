@@ -7,7 +7,7 @@ export function hiddenPlaces(
 ): readonly { readonly place: Place; readonly name: string }[] {
   const text = fileText.replace(/^\uFEFF/, '');
   if (hiddenCharacters(text).length === 0) return [];
-  return text.split('\n').flatMap((line, index) =>
+  return text.split(/\r?\n/).flatMap((line, index) =>
     hiddenCharacters(line).map(({ index: column, name }) => ({
       place: { line: index + 1, column: column + 1 },
       name,

@@ -134,7 +134,6 @@ function forbidden(
 /** A character that cannot be seen and that the text of a file hides behind an escape, `"\\u202E"`. */
 function escapedCharacter({ value, range }: Scalar, text: string): string | undefined {
   if (typeof value !== 'string' || !range) return undefined;
-  // no line of a file ends in a carriage return alone once YAML has read it
-  const hidden = hiddenCharacters(value)[0]?.name ?? (value.includes('\r') ? 'U+000D' : undefined);
+  const hidden = hiddenCharacters(value)[0]?.name;
   return hiddenCharacters(text.slice(range[0], range[1])).length > 0 ? undefined : hidden;
 }

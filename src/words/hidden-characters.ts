@@ -1,8 +1,8 @@
 /**
  * Control characters, marks that make text read in another order than it is written, and what else is never seen
- * (Unicode's default ignorable code points). Not the joiners and the selectors of emoji and of many scripts.
+ * (Unicode's default ignorable code points), and a carriage return that ends no line. Not the joiners and the selectors of emoji and of many scripts.
  */
-const HIDDEN = /[[\p{Cc}--[\t\n\r]][\p{DI}--[\u200C\u200D\uFE0E\uFE0F]]\u2028\u2029]/gv;
+const HIDDEN = /[[\p{Cc}--[\t\n\r]][\p{DI}--[\u200C\u200D\uFE0E\uFE0F]]\u2028\u2029]|\r(?!\n)/gv;
 
 /** A character that cannot be seen, by its name, `U+202E`, and its place in the text. */
 export interface HiddenCharacter {
