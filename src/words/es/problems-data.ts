@@ -57,17 +57,17 @@ export const DATA_PROBLEMS: SameShape<typeof english> = {
   'data/fixed-day': { title: 'Un día fijo para un taller que no es inventado' },
   'data/two-released-lots': { title: 'Dos partidas liberadas de un mismo material' },
   'data/lot-dates': {
-    title: 'Una partida abierta después de la fecha de su nueva comprobación',
+    title: 'Una partida abierta después de su fecha de reanálisis',
   },
   'data/lot-outside-range': {
     title: 'Una partida medida muy lejos del intervalo publicado',
   },
   'data/lot-acid-value': { title: 'Una partida con más ácido libre del que puede tener' },
   'data/lot-past-retest': {
-    title: 'Una partida liberada cuya fecha de nueva comprobación ya pasó',
+    title: 'Una partida liberada cuya fecha de reanálisis ya pasó',
   },
   'data/blend-id': { title: 'Una mezcla con el id de otro material' },
   'data/blend-part': { title: 'Una mezcla con una grasa con la que no se puede calcular' },
-  'data/blend-sum': { title: 'Una mezcla cuyas partes no suman 100 %' },
+  'data/blend-sum': { title: 'Una mezcla cuyas proporciones no suman 100 %' },
   'data/lot-sum': { title: 'Una partida cuyas partes suman más de 100 %' },
 };

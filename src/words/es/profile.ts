@@ -14,13 +14,13 @@ export const profileWords: SameShape<typeof englishProfile> = {
     polyunsaturated: 'Poliinsaturados',
     hydroxy: 'Hidroxilados',
   },
-  columns: { acid: 'Ácido', share: 'Parte' },
+  columns: { acid: 'Ácido', share: 'Proporción' },
   sum: (name) => `${name}, en conjunto`,
 };
 
 /** Names of the measures in the properties table, each with the id of its method. */
 export const propertyNames: SameShape<typeof englishNames> = {
-  superfat: 'Sobreengrasado, como está escrito',
+  superfat: 'Sobreengrasado, según la fórmula',
   saponificationValue: 'Índice de saponificación de las grasas',
   iodineValue: 'Índice de yodo de las grasas',
   oxidisability: 'Oxidabilidad, COX',

@@ -12,7 +12,7 @@ export const sheetWords: SameShape<typeof english> = {
   front: 'Anverso: pesar',
   back: 'Reverso: elaborar y liberar',
   revision: (revision) => `Revisión ${revision}`,
-  asOf: (date) => `al ${dateText(date)}`,
+  asOf: (date) => `con fecha ${dateText(date)}`,
   edition: (id) => `Edición ${id}`,
   digest: (text) => `Pesadas ${text}`,
   fingerprint: (text) => `Fórmula ${text}`,
@@ -30,15 +30,15 @@ export const sheetWords: SameShape<typeof english> = {
   },
   stop: {
     title: 'Primero, alto. Marque todas estas casillas o no pese.',
-    current: 'Esta hoja es la vigente: código y código de pesadas buscados hoy en el formulario.',
+    current: 'Esta hoja es la vigente: código y código de pesadas buscados hoy en el manual.',
     lots: 'Los sacos y bidones que tengo delante llevan estas partidas:',
-    lot: (lot, until) => `${lot}, comprobar de nuevo antes del ${dateText(until)}`,
+    lot: (lot, until) => `${lot}, reanalizar antes del ${dateText(until)}`,
     noLot: '(cualquier partida dentro del intervalo publicado)',
     scales: (scales) => `La balanza está nivelada y comprobada hoy: ${scales}.`,
     scale: (name, step) => `${name}, escalones de ${step} g`,
     checkWeight: 'Pesa de control / lectura',
     ready:
-      'Llevo puestos las gafas protectoras, los guantes y el delantal, el grifo funciona y hay otra persona en el edificio.',
+      'Llevo puestos las gafas de protección, los guantes y el delantal, el grifo funciona y hay otra persona en el edificio.',
     cautions: 'Las advertencias de esta hoja están leídas.',
     otherwise:
       'Otra partida, otra revisión, una balanza dudosa: deténgase y pregunte a quien formula. Nunca cambie las cantidades a mano.',
@@ -56,7 +56,7 @@ export const sheetWords: SameShape<typeof english> = {
       by: 'Por',
       checked: 'Visto',
     },
-    order: 'El álcali al agua, nunca agua sobre el álcali.',
+    order: 'El álcali al agua, nunca el agua sobre el álcali.',
     afterCook:
       'Alto. Mida el álcali libre del jabón cocido. Nada de lo que sigue entra antes de que haya pasado la prueba.',
     afterCookLimit: (limit) => `Hallado / máximo ${limit}`,
@@ -86,10 +86,10 @@ export const sheetWords: SameShape<typeof english> = {
   record: {
     title: 'Lo que se hizo de otro modo',
     deviations: 'Desviaciones y lo que se decidió',
-    rework: 'Jabón reincorporado: lote, masa, acordado por',
+    rework: 'Jabón reprocesado: lote, masa, acordado por',
     /** Cut off, never rounded up: it is the most. */
     reworkAtMost: (percent, mass) =>
-      `Jabón reincorporado (máximo ${plain(percent)} %, ${grams(Math.floor(mass))}): lote, masa, acordado por`,
+      `Jabón reprocesado (máximo ${plain(percent)} %, ${grams(Math.floor(mass))}): lote, masa, acordado por`,
     portions: 'Masa de jabón dividida: porción, peso, qué se le unió',
   },
   yield: {

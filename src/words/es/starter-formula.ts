@@ -34,7 +34,7 @@ water: { lye-concentration: 32 }
 # liquids:
 #   - { liquid: goat-milk, replaces-water: 50, at: lye }
 
-# Jabón anterior que se puede reincorporar, en porcentaje de la masa de jabón; no cuenta en ningún peso.
+# Jabón anterior que se puede reprocesar, en porcentaje de la masa de jabón; no cuenta en ningún peso.
 # rework: 5
 
 targets: { fats: 38 C, lye: 35 C, combine: 35-40 C, unmould: 24-36 h, cure: 42 d }
@@ -51,10 +51,10 @@ changes:
 
 ## Method
 
-1. Lea la ficha de datos de seguridad del proveedor. Gafas protectoras y guantes puestos; ningún recipiente
+1. Lea la ficha de datos de seguridad del proveedor. Gafas de protección y guantes puestos; ningún recipiente
    de aluminio.
 2. Pese :water de agua fría en una jarra de acero o de polipropileno.
-3. Incorpore :alkali[sodium] de hidróxido de sodio poco a poco y removiendo. El álcali al agua, nunca agua
+3. Incorpore :alkali[sodium] de hidróxido de sodio poco a poco y removiendo. El álcali al agua, nunca el agua
    sobre el álcali. Deje que la solución alcalina se enfríe a :temperature[lye].
 4. Funda :weight[coconut] de aceite de coco, añada :weight[olive] de aceite de oliva y :weight[castor] de
    aceite de ricino, y lleve las grasas a :temperature[fats].

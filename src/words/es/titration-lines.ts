@@ -16,7 +16,7 @@ export const titrationLines: SameShape<typeof english> = {
   },
   lotsLine: 'Para lots.yaml, bajo fats; otra persona la libera:',
   fillIn:
-    'Donde hay mayúsculas, ponga el id de la grasa, el número de la partida y la fecha de la nueva comprobación.',
+    'Donde hay mayúsculas, ponga el id de la grasa, el número de la partida y la fecha de reanálisis.',
   noUncertainty:
     'No hay línea para lots.yaml: un valor sin su incertidumbre no dice nada del margen. Indique --volume-uncertainty, --mass-uncertainty y --normality-uncertainty, semianchuras con k = 2; 0 solo donde sea despreciable.',
   number: (option, given) =>
