@@ -9,6 +9,7 @@ export const DATA_PROBLEMS: SameShape<typeof english> = {
   'data/unreadable': { title: 'El archivo no se puede leer' },
   'data/too-large': { title: 'El archivo es mayor de lo que puede ser un archivo de datos' },
   'data/not-utf8': { title: 'El archivo no es texto UTF-8' },
+  'data/hidden-character': { title: 'Un carácter que no se ve' },
   'data/empty-file': { title: 'El archivo está vacío' },
   'data/yaml': { title: 'El archivo no es YAML válido' },
   'data/tab': { title: 'Un tabulador donde corresponden espacios' },
