@@ -3,20 +3,30 @@ import { expect, test } from 'vitest';
 import { hazardWords, STATEMENTS } from '../../src/words/en/hazard-statements.ts';
 import { safetyPage } from '../../src/words/en/safety.ts';
 import { safetySections } from '../../src/words/en/safety-sections.ts';
+import { STATEMENTS as SPANISH } from '../../src/words/es/hazard-statements.ts';
 
-const PUBLISHED = new Map(
-  readFileSync(new URL('./clp-statements.txt', import.meta.url), 'utf8')
-    .split('\n')
-    .filter((line) => line !== '' && !line.startsWith('#'))
-    .map((line) => line.split('\t') as [string, string]),
-);
+const published = (file: string) =>
+  new Map(
+    readFileSync(new URL(file, import.meta.url), 'utf8')
+      .split('\n')
+      .filter((line) => line !== '' && !line.startsWith('#'))
+      .map((line) => line.split('\t') as [string, string]),
+  );
+
+const ENGLISH_PUBLISHED = published('./clp-statements.txt');
+const SPANISH_PUBLISHED = published('./clp-statements-es.txt');
 
 test('there are published wordings to hold against', () => {
-  expect(PUBLISHED.size).toBe(36);
+  expect(ENGLISH_PUBLISHED.size).toBe(36);
+  expect(SPANISH_PUBLISHED.size).toBe(20);
 });
 
 test.each(Object.entries(STATEMENTS))('%s is quoted to the letter', (code, text) => {
-  expect(text).toBe(PUBLISHED.get(code));
+  expect(text).toBe(ENGLISH_PUBLISHED.get(code));
+});
+
+test.each(Object.entries(SPANISH))('%s is quoted to the letter in Spanish', (code, text) => {
+  expect(text).toBe(SPANISH_PUBLISHED.get(code));
 });
 
 // CLP Annex VI: sodium hydroxide H314; potassium hydroxide H302 and H314. H290 is the suppliers' own addition.

@@ -8,10 +8,10 @@ export const cardWords: SameShape<typeof english> = {
   revision: (revision) => `Revisión ${revision}`,
   fingerprint: (text) => `Fórmula ${text}`,
   digest: (text) => `pesadas ${text}`,
-  asOf: (date) => `con fecha ${dateText(date)}`,
+  asOf: (date) => `al ${dateText(date)}`,
   lots: (lots) => `Solo con las partidas ${lots}.`,
   noLots: 'Sin partidas: calculado con los intervalos comerciales.',
-  order: 'El álcali al agua, nunca el agua sobre el álcali.',
+  order: 'El álcali al agua, nunca agua sobre el álcali.',
   more: (count) =>
     count === 1
       ? 'Una advertencia más: lea la página de la fórmula.'

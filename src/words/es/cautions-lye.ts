@@ -33,12 +33,12 @@ export const lyeCautions: SameShape<typeof english> = {
   'potassium-lye': (n) => ({
     text: `El ${fixed(n.potassium, 0)} % del hidróxido es hidróxido de potasio. Absorbe agua del aire en pocos minutos y salpica al tocar el agua.`,
     action:
-      'Lea la etiqueta dos veces: ninguno de los dos álcalis sustituye al otro gramo por gramo. Pese rápido, cierre la bolsa y mantenga la cara apartada de la jarra.',
+      'Lea la etiqueta dos veces: ninguno de los dos álcalis sustituye al otro gramo por gramo. Pese rápido, cierre el saco y mantenga la cara apartada de la jarra.',
   }),
   'stock-lye': (n) => ({
     text: `${n.name}, partida ${n.lot}, es una solución de reserva al ${fixed(n.assay, 1)} %: es cáustica tal como está, y con el frío forma cristales que dejan el resto más débil.`,
     action:
-      'Póngase las gafas de protección y los guantes antes de quitar el tapón. No pese de ella mientras haya cristales; caliéntela solo como lo permita su ficha de datos de seguridad.',
+      'Póngase las gafas protectoras y los guantes antes de quitar el tapón. No pese de ella mientras haya cristales; caliéntela solo como lo permita su ficha de datos de seguridad.',
   }),
   'stock-crystallises': (n) => ({
     text: `${n.name}, partida ${n.lot}, al ${fixed(n.assay, 1)} %, empieza a cristalizar a unos ${fixed(n.crystals, 0)} °C (${n.how}).`,
@@ -48,17 +48,17 @@ export const lyeCautions: SameShape<typeof english> = {
   'alkali-without-lot': (n) => ({
     text: `No hay ninguna partida liberada de ${n.name}. Se calcula con una riqueza de ${fixed(n.reckoned, 1)} %, el extremo fuerte del intervalo de ${fixed(n.low, 1)} a ${fixed(n.high, 1)} %.`,
     action:
-      'Haga la titulación de la partida o registre su certificado. Hasta entonces espere más sobreengrasado que el de la fórmula, y nunca use una bolsa con una riqueza por encima de ese intervalo.',
+      'Haga la titulación de la partida o registre su certificado. Hasta entonces espere más sobreengrasado que el de la fórmula, y nunca use un saco con una riqueza por encima de ese intervalo.',
   }),
   'alkali-lot-retest': (n) => ({
     text:
       n.days < 0
-        ? `La partida ${n.lot} de ${n.name} debía reanalizarse el ${dateText(n.retestBy)}.`
-        : `La partida ${n.lot} de ${n.name} debe reanalizarse el ${dateText(n.retestBy)}, dentro de ${plain(n.days)} ${n.days === 1 ? 'día' : 'días'}.`,
+        ? `La partida ${n.lot} de ${n.name} debía comprobarse de nuevo el ${dateText(n.retestBy)}.`
+        : `La partida ${n.lot} de ${n.name} debe comprobarse de nuevo el ${dateText(n.retestBy)}, dentro de ${plain(n.days)} ${n.days === 1 ? 'día' : 'días'}.`,
     action:
       n.days < 0
         ? 'No pese de ella. Haga su titulación o libere otra partida.'
-        : 'Haga su titulación ahora o pida la próxima partida. Mantenga la bolsa cerrada.',
+        : 'Haga su titulación ahora o pida la próxima partida. Mantenga el saco cerrado.',
   }),
   'lye-and-metals': (n) => ({
     text: `Una solución alcalina al ${fixed(n.concentration, 0)} % corroe el aluminio, el zinc y el estaño, y desprende hidrógeno, que es inflamable.`,

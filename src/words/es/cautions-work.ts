@@ -20,9 +20,9 @@ export const workCautions: SameShape<typeof english> = {
       'Use un tamaño menor o varios moldes separados entre sí. Un bloque que no puede perder su calor se agrieta, hierve y se desborda.',
   }),
   'rework-above-cap': (n) => ({
-    text: `Jabón reprocesado: ${plain(n.percent)} % de la masa de jabón. El tope del taller es ${plain(n.cap)} %.`,
+    text: `Jabón reincorporado: ${plain(n.percent)} % de la masa de jabón. El tope del taller es ${plain(n.cap)} %.`,
     action:
-      'No lo elabore con tanto. Quien formula debe reducirlo. El jabón reprocesado no cuenta en ninguna pesada ni en ningún sobreengrasado de este manual: solo puede añadirse jabón que haya pasado su ensayo de liberación.',
+      'No lo elabore con tanto. Quien formula debe reducirlo. El jabón reincorporado no cuenta en ninguna pesada ni en ningún sobreengrasado de este manual: solo puede añadirse jabón que haya pasado su ensayo de liberación.',
   }),
   'hot-process-boil-over': (n) => ({
     text: 'El jabón puede subir en segundos durante la cocción y desbordarse, caliente y cáustico.',
@@ -31,7 +31,7 @@ export const workCautions: SameShape<typeof english> = {
   'alcohol-near-heat': (n) => ({
     text: `${n.materials}: el vapor se inflama, y este jabón está caliente.`,
     action:
-      'Ninguna llama ni placa al rojo en el local. Retire la olla del calor, deje que se enfríe por debajo de lo que indique la ficha de datos de seguridad, ventile el local y solo entonces añádalo.',
+      'Ninguna llama ni placa al rojo en la sala. Retire la olla del calor, deje que se enfríe por debajo de lo que indique la ficha de datos de seguridad, ventile la sala y solo entonces añádalo.',
   }),
   'heats-batter': (n) => ({
     text: `${n.materials} (azúcares: ${fixed(n.sugar, 1)} % de las grasas) calienta la masa de jabón. Puede agrietarse, salirse del molde o, dentro de la solución alcalina, quemarse.`,
@@ -74,6 +74,6 @@ export const workCautions: SameShape<typeof english> = {
   'fragrance-near-flash-point': (n) => ({
     text: `${n.materials} tiene su punto de inflamación a ${fixed(n.flashPoint, 0)} °C, y este jabón se trabaja a hasta ${fixed(n.hottest, 0)} °C.`,
     action:
-      'Ninguna llama ni placa al rojo en el local. Deje que el jabón se enfríe antes de añadir la fragancia.',
+      'Ninguna llama ni placa al rojo en la sala. Deje que el jabón se enfríe antes de añadir la fragancia.',
   }),
 };

@@ -34,7 +34,7 @@ export const checkPage: SameShape<typeof english> = {
     'Esta es una edición de prueba: lo que contiene sin aprobar no está vigente en ninguna parte.',
   listTitle: 'Todos los códigos de pesadas vigentes',
   listLead: (edition, asOf) =>
-    `Edición ${edition} con fecha ${dateText(asOf)}. Una hoja cuyo código de pesadas no figura aquí no está vigente.`,
+    `Edición ${edition} al ${dateText(asOf)}. Una hoja cuyo código de pesadas no figura aquí no está vigente.`,
   columns: {
     code: 'Código',
     formula: 'Fórmula',

@@ -6,7 +6,7 @@ export const contentsPage: SameShape<typeof english> = {
   lead: 'Cada fórmula de este manual se ha calculado, redondeado a los escalones de las balanzas del taller y comprobado. En el puesto de trabajo nadie calcula el álcali: busque la fórmula, elija el tamaño de lote y pese lo que dice la página.',
   beforeTitle: 'Antes de abrir el álcali',
   before:
-    'Gafas de protección, guantes, manga larga. El álcali al agua, nunca el agua sobre el álcali. Agua para enjuagar al alcance de la mano.',
+    'Gafas protectoras, guantes, manga larga. El álcali al agua, nunca agua sobre el álcali. Agua para enjuagar al alcance de la mano.',
   beforeLink: 'Lea la página de seguridad',
   groups: {
     'bar cold': 'Pastillas, proceso en frío',
@@ -32,8 +32,8 @@ export const contentsPage: SameShape<typeof english> = {
   howTitle: 'Cómo se usa',
   how: [
     'Busque la fórmula por su código. El código de la etiqueta del molde y el código de la página deben ser el mismo.',
-    'Use el bloque de su tamaño de lote y solo ese. Pese cada línea en un recipiente aparte, de arriba abajo; cada línea lleva su unidad.',
-    'Compruebe que la partida de la bolsa es la partida que nombra la página, cuando nombra una.',
+    'Use el bloque de su tamaño de lote y solo ese. Pese cada línea en un vaso propio, de arriba abajo; cada línea lleva su unidad.',
+    'Compruebe que la partida del saco es la partida que nombra la página, cuando nombra una.',
     'Donde la página da un motivo en lugar de un peso, no hay peso. No lo calcule usted en el puesto de trabajo; pregunte a quien formula.',
     'En papel, mire la fecha de la parte superior. Una hoja de una edición anterior va a la basura.',
   ],

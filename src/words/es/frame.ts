@@ -1,0 +1,47 @@
+import { dateText } from '../dates.ts';
+import type { frame as english } from '../en/frame.ts';
+import { fixed, plain } from '../numbers.ts';
+import type { SameShape } from '../same-shape.ts';
+
+/** What stands around every page, and the small words that many pages share. */
+export const frame: SameShape<typeof english> = {
+  skip: 'Ir al contenido',
+  menu: 'Manual',
+  contents: 'Índice',
+  find: 'Buscar',
+  lyeTables: 'Tablas de álcali',
+  fats: 'Grasas',
+  safety: 'Seguridad',
+  methods: 'Métodos',
+  asOf: (date) => `Al ${dateText(date)}`,
+  edition: (id) => `Edición ${id}`,
+  proof: 'Edición de prueba, no para el uso: contiene fórmulas sin aprobar.',
+  invented: 'Demostración: un taller inventado, no un formulario con el que trabajar.',
+  foot: 'No sustituye la ficha de datos de seguridad (FDS) del proveedor, las normas locales ni el consejo de un profesional habilitado. Eso va primero.',
+  grams: 'g',
+  percent: '%',
+  kinds: { bar: 'Pastilla', paste: 'Pasta', liquid: 'Líquido' },
+  processes: { cold: 'proceso en frío', hot: 'proceso en caliente' },
+  stages: {
+    lye: 'en la solución alcalina',
+    fats: 'en las grasas',
+    trace: 'en la traza',
+    'after-cook': 'después de la cocción',
+    dilution: 'en la dilución',
+  },
+  severities: { danger: 'Peligro', warning: 'Atención', care: 'Cuidado', note: 'Nota' },
+  batchSize: {
+    fats: (grams) => `${plain(grams)} g de grasas`,
+    batter: (grams) => `${plain(grams)} g de masa de jabón`,
+    bars: (count, grams) => `${count} pastillas de ${plain(grams)} g, peso al verter`,
+    mould: (millilitres) => `molde de ${fixed(millilitres / 1000, 1)} L`,
+  },
+  how: {
+    measured: 'medido',
+    standard: 'norma',
+    handbook: 'manual',
+    supplier: 'cifra del proveedor',
+    'common practice': 'práctica común, sin fuente',
+    'from memory': 'de memoria, no comprobado con el impreso',
+  },
+};
