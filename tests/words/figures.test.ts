@@ -45,14 +45,32 @@ function symbolsDiffer(english: unknown, spanish: unknown, path: string): readon
   return first(english) === first(spanish) ? [] : [`${path}: ${first(spanish)}`];
 }
 
-// one of these is what a phrase takes in the place: a number, a date, a list, an object of numbers or dates
+const DAY = '2026-11-30';
+
+const PENDING = {
+  formula: { code: 'QY-014', name: 'Harbour Lamp', revision: 3 },
+  fingerprint: '4f2a-91c0-7be3',
+  stateBefore: 'changed-since-approval',
+  last: { revision: 2, fingerprint: '7be3-4f2a-91c0', by: 'QA lead', on: DAY },
+  moves: [{ part: 'water', id: 'water', at: null, before: 290.5, after: 296.75 }],
+};
+
+/** The numbers and dates of a caution, each number of its own. */
+const facts = new Proxy(
+  {},
+  {
+    get: (_, name) => (name === 'on' || name === 'retestBy' ? DAY : 3 + String(name).length),
+  },
+);
+
+// one of these is what a phrase takes in the place
 const KINDS: readonly ((place: number) => unknown)[] = [
   (place) => 2 + place * 7,
   () => 1,
-  () => '2026-11-30',
+  () => DAY,
   (place) => [`L${place}`, `M${place}`],
-  () => new Proxy({}, { get: (_, name) => (typeof name === 'string' ? name.length + 3 : '') }),
-  () => new Proxy({}, { get: () => '2026-11-30' }),
+  () => facts,
+  () => PENDING,
 ];
 
 /** Says both phrases with all that the English one can be said with, and compares what comes out. */
