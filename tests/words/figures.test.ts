@@ -19,6 +19,7 @@ describe.each(topics)('es/%s', (topic) => {
 function differences(english: unknown, spanish: unknown, path: string): readonly string[] {
   if (typeof english !== typeof spanish) return [`${path}: ${english} | ${spanish}`];
   if (typeof english === 'string') {
+    if (SAYS_MORE.includes(path)) return [];
     return figures(english) === figures(spanish) ? [] : [`${path}: ${english} | ${spanish}`];
   }
   if (typeof english === 'function') return spoken(english as Phrase, spanish as Phrase, path);
@@ -64,14 +65,23 @@ const facts = new Proxy(
 );
 
 // one of these is what a phrase takes in the place
-const KINDS: readonly ((place: number) => unknown)[] = [
+const PLAIN: readonly ((place: number) => unknown)[] = [
   (place) => 2 + place * 7,
   () => 1,
   () => DAY,
   (place) => [`L${place}`, `M${place}`],
+];
+const KINDS = [
+  ...PLAIN,
+  () => [0.5],
+  () => [0.5, 5],
+  () => [{ name: 'olive', share: 62.5 }],
   () => facts,
   () => PENDING,
 ];
+
+/** Phrases that say more in Spanish: a slip in the source of their wording is mended and named there. */
+const SAYS_MORE = ['hazardWords.source'];
 
 /** Says both phrases with all that the English one can be said with, and compares what comes out. */
 function spoken(english: Phrase, spanish: Phrase, path: string): readonly string[] {
@@ -85,8 +95,9 @@ function spoken(english: Phrase, spanish: Phrase, path: string): readonly string
 
 function samples(places: number): readonly (readonly unknown[])[] {
   const sizes: readonly (readonly unknown[])[] = [[]];
+  const kinds = places > 2 ? PLAIN : KINDS;
   return Array.from({ length: places }).reduce<readonly (readonly unknown[])[]>(
-    (begun, _, place) => begun.flatMap((given) => KINDS.map((kind) => [...given, kind(place)])),
+    (begun, _, place) => begun.flatMap((given) => kinds.map((kind) => [...given, kind(place)])),
     sizes,
   );
 }

@@ -70,7 +70,7 @@ export const materialPages: SameShape<typeof english> = {
     assay: 'Hidróxido',
     carbonate: 'Carbonato',
     opened: 'Abierta',
-    retest: 'Reanalizar antes de',
+    retest: 'Reanalizar a más tardar',
   },
   statuses: { quarantine: 'en cuarentena', released: 'liberada', rejected: 'rechazada' },
   assay: (value, uncertainty) => `${plain(value, 2)} ± ${plain(uncertainty, 2)} %`,

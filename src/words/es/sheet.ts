@@ -17,7 +17,7 @@ export const sheetWords: SameShape<typeof english> = {
   digest: (text) => `Pesadas ${text}`,
   fingerprint: (text) => `Fórmula ${text}`,
   approved: (by, on, until) =>
-    `Aprobada por ${by} el ${dateText(on)}, revisar antes del ${dateText(until)}`,
+    `Aprobada por ${by} el ${dateText(on)}, revisar a más tardar el ${dateText(until)}`,
   print: 'Imprima en A4 o Carta, por las dos caras de una hoja, a tamaño real.',
   backToFormula: 'A la fórmula',
   card: 'Tarjeta de trabajo',
@@ -32,7 +32,7 @@ export const sheetWords: SameShape<typeof english> = {
     title: 'Primero, alto. Marque todas estas casillas o no pese.',
     current: 'Esta hoja es la vigente: código y código de pesadas buscados hoy en el manual.',
     lots: 'Los sacos y bidones que tengo delante llevan estas partidas:',
-    lot: (lot, until) => `${lot}, reanalizar antes del ${dateText(until)}`,
+    lot: (lot, until) => `${lot}, reanalizar a más tardar el ${dateText(until)}`,
     noLot: '(cualquier partida dentro del intervalo publicado)',
     scales: (scales) => `La balanza está nivelada y comprobada hoy: ${scales}.`,
     scale: (name, step) => `${name}, escalones de ${step} g`,
