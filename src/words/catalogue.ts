@@ -1,4 +1,5 @@
 import { english } from './en.ts';
+import { spanish } from './es.ts';
 import type { Language } from './languages.ts';
 import type { SameShape } from './same-shape.ts';
 import { setVoice, voice, voiceOf } from './voice.ts';
@@ -7,7 +8,7 @@ import { setVoice, voice, voiceOf } from './voice.ts';
 export type Catalogue = SameShape<Omit<typeof english, 'cautionTexts'>> &
   Pick<typeof english, 'cautionTexts'>;
 
-const CATALOGUES: Readonly<Record<Language, Catalogue>> = { en: english, es: english };
+const CATALOGUES: Readonly<Record<Language, Catalogue>> = { en: english, es: spanish };
 
 /**
  * Every word that a page, a picture or a document shows, in the language of the shop. Read it where it is used, not

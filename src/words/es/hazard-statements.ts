@@ -71,7 +71,7 @@ export const hazardWords: SameShape<typeof englishWords> = {
   statement: 'Texto oficial',
   applies: 'se aplica',
   source:
-    'Texto: Reglamento (CE) n.º 1272/2008 (CLP), en español, texto consolidado en mhchem/hpstatements, versión de contenido 2025-09-01, © Unión Europea, CC BY 4.0; leído el 2026-12-01. En P310 se ha corregido una letra con tilde.',
+    'Texto: Reglamento (CE) n.º 1272/2008 (CLP), en español, texto consolidado en mhchem/hpstatements, versión de contenido 2025-09-01, © Unión Europea, CC BY 4.0; leído el 2026-12-01. Se ha corregido una errata: una letra con tilde de la frase sobre el centro de toxicología.',
   basis:
     'Números, clase y límites para la piel del hidróxido de sodio: hoja de Euro Chlor sobre su clasificación y ficha 20 del INRS, leídas. La entrada completa del hidróxido de potasio, los límites para los ojos, los pictogramas y qué consejos de prudencia imprime un proveedor: de memoria. H290 lo añaden los proveedores. Vale la etiqueta de su envase.',
   newer:

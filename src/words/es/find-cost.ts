@@ -1,0 +1,9 @@
+import type { findCost as english } from '../en/find-cost.ts';
+import type { SameShape } from '../same-shape.ts';
+
+/** Cost as a property of the finder. Apart from its other words, which stand in every edition's scripts. */
+export const findCost: SameShape<typeof english> = {
+  group: 'Costo',
+  name: 'Costo de los materiales por kilogramo de masa de jabón',
+  unit: (currency) => `${currency}/kg`,
+};
