@@ -9,13 +9,14 @@ import { resultTable } from './find-table.ts';
 /** About a screen of rows: what is drawn before anything else is done. */
 const AT_ONCE = 16;
 /** Listed without being asked for. */
-const FIRST_ROWS = 60;
-/** So many more rows at a time, with a picture between, so that the page answers all the while. */
-const STEP = 500;
+export const FIRST_ROWS = 60;
+/** So many more at a time: a table of thousands of rows takes seconds to be laid out. */
+export const MORE_ROWS = 500;
 
 /** The table that stands, what it was made for, and how to add rows to it. */
 interface Standing {
   readonly key: string;
+  readonly rows: readonly number[];
   readonly table: HTMLTableElement;
   readonly body: HTMLTableSectionElement;
   readonly rowOf: (row: number) => HTMLTableRowElement;
@@ -29,56 +30,65 @@ let turn = 0;
 // paper takes what is listed, not what has been drawn so far
 addEventListener('beforeprint', () => finish());
 
-/** Lists the rows found: the first ones at once, the others when the page has been drawn. */
+/** Lists the first `most` of the rows found: a screen of them at once, the others when that has been drawn. */
 export function drawList(
   data: FinderData,
   state: FinderState,
   rows: readonly number[],
-  allRows: boolean,
+  most: number,
 ): void {
   const mine = ++turn;
-  const listed = allRows ? rows : rows.slice(0, FIRST_ROWS);
+  const listed = rows.slice(0, most);
   part('find-all').replaceChildren(...(listed.length < rows.length ? moreOf(listed, rows) : []));
+  finish = () => {};
   if (rows.length === 0) {
     standing = null;
-    finish = () => {};
     part('find-table').replaceChildren();
     return;
   }
-  const { table, body, rowOf } = tableFor(data, state);
+  const before = standing?.rows ?? [];
+  const { table, body, rowOf } = tableFor(data, state, rows);
   table.setAttribute('aria-rowcount', `${rows.length + 1}`);
-  let drawn = 0;
   const draw = (upTo: number) => {
-    const more = listed.slice(drawn, upTo).map(rowOf);
-    if (drawn === 0) body.replaceChildren(...more);
-    else body.append(...more);
-    drawn += more.length;
+    body.append(...listed.slice(body.rows.length, upTo).map(rowOf));
   };
-  const goOn = () => {
-    if (mine !== turn || drawn >= listed.length) return;
-    draw(drawn + STEP);
-    afterDrawing(goOn);
-  };
-  finish = () => draw(listed.length);
+  // rows that stand already stay, with the focus that one of them may have
+  const same = before.length === rows.length && before.every((row, i) => row === rows[i]);
+  if (!same || body.rows.length > listed.length) body.replaceChildren();
   draw(AT_ONCE);
-  afterDrawing(goOn);
+  finish = () => draw(listed.length);
+  afterDrawing(() => {
+    if (mine === turn) finish();
+  });
 }
 
-const moreOf = (listed: readonly number[], rows: readonly number[]) => [
+/** Gives the focus to the link of a row; draws it first where it was still to come. */
+export function focusRow(place: number): void {
+  finish();
+  standing?.body.rows[place]?.querySelector('a')?.focus({ preventScroll: true });
+}
+
+const moreOf = (listed: readonly number[], rows: readonly number[]): readonly (Node | string)[] => [
   element('p', { class: 'label' }, findWords.listed(listed.length, rows.length)),
+  ...(rows.length - listed.length > MORE_ROWS
+    ? [element('button', { type: 'button', 'data-more': '' }, findWords.showMore(MORE_ROWS)), ' ']
+    : []),
   element('button', { type: 'button' }, findWords.showAll(rows.length)),
 ];
 
 /** The standing table, if its head says what is asked, or a new one. A head that has the focus keeps it. */
-function tableFor(data: FinderData, state: FinderState): Standing {
+function tableFor(data: FinderData, state: FinderState, rows: readonly number[]): Standing {
   const columns = shownColumns(data, state);
   const key = JSON.stringify([columns.map(({ id }) => id), state.sort]);
-  if (standing?.key === key) return standing;
+  if (standing?.key === key) {
+    standing = { ...standing, rows };
+    return standing;
+  }
   const place = part('find-table');
   const focused = place.contains(document.activeElement)
     ? document.activeElement?.getAttribute('data-sort')
     : null;
-  const made = { key, ...resultTable(state, columns), rowOf: rowMaker(data, columns) };
+  const made = { key, rows, ...resultTable(state, columns), rowOf: rowMaker(data, columns) };
   place.replaceChildren(made.table);
   if (focused) place.querySelector<HTMLElement>(`[data-sort="${focused}"]`)?.focus();
   standing = made;

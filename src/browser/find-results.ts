@@ -19,8 +19,8 @@ export interface Results {
 }
 
 export interface Shown {
-  /** All rows, not only the first. */
-  readonly allRows: boolean;
+  /** How many at most. */
+  readonly rows: number;
   readonly pages: number;
 }
 
@@ -35,7 +35,7 @@ export function drawResults(
   const { rows, withoutLimit } = answer(data, limits);
   part('find-count').textContent = findWords.found(rows.length, data.codes.length);
   part('find-limits').replaceChildren(...limitList(limits, rows.length, withoutLimit));
-  drawList(data, state, inOrder(rows, data, state.sort, found?.rows ?? null), shown.allRows);
+  drawList(data, state, inOrder(rows, data, state.sort, found?.rows ?? null), shown.rows);
   const limited = limits.length > (found ? 1 : 0);
   drawPages(found, limited ? new Set(rows) : null, state.where, shown.pages).catch(sayBroken);
   return { rows, dropped: limits.map((limit) => limit.dropped) };

@@ -7,6 +7,7 @@ import { findWords } from '../words/en/find.ts';
 import { shownColumns, withColumn } from './find-columns.ts';
 import { part } from './find-dom.ts';
 import { fieldsOf, fillFields, readFields } from './find-fields.ts';
+import { FIRST_ROWS, focusRow, MORE_ROWS } from './find-list.ts';
 import { say, sayBroken } from './find-notes.ts';
 import { drawResults, type Results, type Shown } from './find-results.ts';
 import { strips } from './find-strips.ts';
@@ -21,7 +22,7 @@ declare global {
 const PAUSE = 120;
 /** Between the last change and the address, which is written when the page has been drawn. [ms] */
 const ADDRESS_PAUSE = 250;
-const FIRST: Shown = { allRows: false, pages: 5 };
+const FIRST: Shown = { rows: FIRST_ROWS, pages: 5 };
 const MORE_PAGES = 20;
 
 if (globalThis.handbookFinder) start(globalThis.handbookFinder);
@@ -141,9 +142,14 @@ function start(data: FinderData): void {
     become({ ...state, sort: back ? null : { by, descending: again } });
   });
   part('find-all').addEventListener('click', (event) => {
-    if (!buttonIn(event)) return;
-    shown = { ...shown, allRows: true };
+    const button = buttonIn(event);
+    if (!button) return;
+    const before = shown.rows;
+    const more = button.dataset.more !== undefined;
+    shown = { ...shown, rows: more ? before + MORE_ROWS : Number.POSITIVE_INFINITY };
     draw();
+    // the button is gone; the keyboard goes on from the first row that is new
+    focusRow(before);
   });
   part('find-pages-list').addEventListener('click', (event) => {
     if (!buttonIn(event)) return;

@@ -243,6 +243,9 @@ test('many rows: a screen at once, sixty soon, all when asked for; paper takes w
   });
   expect(atOnce.first).toBeLessThan(60);
   expect(atOnce.printed).toBe(60);
+  await page.getByRole('button', { name: 'Show 500 more' }).click();
+  expect(await rows.count()).toBe(560);
+  expect(await page.evaluate(() => document.activeElement?.closest('tr')?.rowIndex)).toBe(61);
   await page.getByRole('button', { name: `Show all ${all}` }).click();
   await rows.nth(all - 1).waitFor();
   const codes = await page.locator('#find-table tbody td.code').allInnerTexts();

@@ -102,6 +102,7 @@ export const findWords = {
     'Acids: dark, saturated; grey, monounsaturated; white, polyunsaturated; what is left, hydroxylated.',
   noValue: '–',
   listed: (n: number, all: number) => `The first ${n} of ${all} are listed.`,
+  showMore: (n: number) => `Show ${n} more`,
   showAll: (n: number) => `Show all ${n}`,
   pages: 'Pages with these words',
   morePages: (n: number) => `Show more, ${plain(n)} are left`,
