@@ -99,6 +99,7 @@ export const findWords: SameShape<typeof english> = {
     'Ácidos: oscuro, saturados; gris, monoinsaturados; blanco, poliinsaturados; lo que queda, hidroxilados.',
   noValue: '–',
   listed: (n, all) => `Se muestran las primeras ${n} de ${all}.`,
+  showMore: (n) => `Mostrar ${n} más`,
   showAll: (n) => `Mostrar las ${n}`,
   pages: 'Páginas con estas palabras',
   morePages: (n) => `Mostrar más; ${n === 1 ? 'queda' : 'quedan'} ${plain(n)}`,
