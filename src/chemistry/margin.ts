@@ -2,7 +2,7 @@ import { massByFat } from './blend.ts';
 import type { Charge } from './charge.ts';
 import type { Constants } from './constants.ts';
 import type { Fat } from './materials.ts';
-import { grams, type Range } from './quantity.ts';
+import { given, grams, type Outcome, type Range, refused } from './quantity.ts';
 import {
   equivalentsPerGram,
   isBeforeSaponification,
@@ -47,13 +47,14 @@ export interface Margin {
  * the middles of all ranges and clipped to the worst case. Worst case: every fat at the low end of its
  * range, assay at its top, every weighing wrong against us (and the other way round for the upper end).
  * In cold process the lower ends count only the acid value of a wax. Without `weighing` the scale is left
- * out. Not covered: the acidity of additives and liquids, moisture taken up by the alkali after its assay.
+ * out. Refuses `nothing-sure-to-saponify` where at the low ends nothing is left that alkali must react with, as in a
+ * cold soap of waxes alone. Not covered: the acidity of additives and liquids, moisture taken up by the alkali after its assay.
  */
 export function superfatMargin(
   charge: Charge,
   constants: Constants,
   weighing: WeighingError | null = null,
-): Margin {
+): Outcome<Margin> {
   const waxAsAcids = charge.formulation.process === 'cold';
   const lower = spreadAround(charge, waxAsAcids, constants, weighing);
   const upper =
@@ -68,14 +69,15 @@ export function superfatMargin(
       weighing,
     ),
   };
-  return {
+  if (!Number.isFinite(worst.low)) return refused('nothing-sure-to-saponify');
+  return given({
     expanded: {
       low: Math.max(lower.centre - lower.halfWidth, worst.low),
       high: Math.min(upper.centre + upper.halfWidth, worst.high),
     },
     worstCase: worst,
     budget: lower.budget,
-  };
+  });
 }
 
 const hasWax = (charge: Charge) => charge.fats.some(({ fat }) => fat.kind === 'wax');

@@ -70,7 +70,7 @@ export function weigh(
   const heldBack = nearest(charge.heldBack);
   const inLye = nearest(grams(charge.water - charge.heldBack));
 
-  const all = [...fats, ...afterCookFats, ...liquids, ...additives, ...alkali];
+  const all = [...fats, ...afterCookFats, ...liquids, ...additives, ...alkali, heldBack, inLye];
   const vanished = all.find(({ steps, exact }) => steps === 0 && exact > 0);
   if (vanished) {
     return refused('weight-below-scale-step', { mass: vanished.exact, step: vanished.step });

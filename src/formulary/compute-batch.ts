@@ -33,6 +33,7 @@ export function computeBatch(
   if (!weighed.ok) return refusedBatch(batch, weighed.breach);
   const { charge: rounded, steps, superfat, weighing } = weighed.value;
   const margin = superfatMargin(rounded, reference.constants, weighing);
+  if (!margin.ok) return refusedBatch(batch, margin.breach);
   const balance = massBalance(rounded, reference.constants);
   const kept = 1 - batch.losses;
   return {
@@ -65,8 +66,8 @@ export function computeBatch(
     total: massIn(rounded),
     superfat: {
       weighed: superfat * 100,
-      expanded: percentRange(margin.expanded),
-      worstCase: percentRange(margin.worstCase),
+      expanded: percentRange(margin.value.expanded),
+      worstCase: percentRange(margin.value.worstCase),
     },
     bars: batch.size.by === 'bars' ? batch.size.count : null,
     yield: {

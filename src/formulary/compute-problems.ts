@@ -53,6 +53,15 @@ export function refusalProblem(formula: Formula, { rule, numbers }: Breach): Pro
   });
 }
 
+/** Waxes alone in a cold process: nothing says that any of the alkali is used up. */
+export const waxProblem = (formula: Formula): Problem =>
+  problemAt(formula, 'fats', 'formula/nothing-saponifies', {
+    found:
+      'fats of which nothing may become soap: in a cold process a wax counts by its acid value alone',
+    expected: 'a fat that the alkali is sure to react with',
+    advice: 'add one, or cook the soap',
+  });
+
 /** What is wrong with a charge as a whole: a lye that cannot hold its alkali. */
 export function chargeProblems(
   formula: Formula,

@@ -3,7 +3,7 @@ import type { Charge } from '../chemistry/charge.ts';
 import { lyeOf } from '../chemistry/lye.ts';
 import { lyeHeat } from '../chemistry/lye-heat.ts';
 import { lyeBoilingPoint, saturationAt } from '../chemistry/lye-limits.ts';
-import { superfatMargin } from '../chemistry/margin.ts';
+import { type Margin, superfatMargin } from '../chemistry/margin.ts';
 import { acidProfile } from '../chemistry/profile.ts';
 import { type Celsius, celsius, fraction, grams } from '../chemistry/quantity.ts';
 import { reckon } from '../chemistry/reckon.ts';
@@ -17,7 +17,7 @@ import { yields } from '../chemistry/yields.ts';
 import type { Reference } from '../reference/reference.ts';
 import type { Problem } from '../words/problem.ts';
 import { computeBatch } from './compute-batch.ts';
-import { chargeProblems, missingProblem, refusalProblem } from './compute-problems.ts';
+import { chargeProblems, missingProblem, refusalProblem, waxProblem } from './compute-problems.ts';
 import type { FormulaDocument } from './document.ts';
 import { alkaliLines, fatLine, profileDocument } from './document-lines.ts';
 import type { Formula } from './formula.ts';
@@ -53,16 +53,22 @@ export function computeFormula(
   const charge = reckoned.value;
   const problems = chargeProblems(formula, charge, reference);
   if (problems.some(({ severity }) => severity === 'error')) return { computed: null, problems };
+  const margin = superfatMargin(charge, reference.constants);
+  if (!margin.ok) return { computed: null, problems: [...problems, waxProblem(formula)] };
   return {
-    computed: { formula, charge, document: documentOf(formula, charge, reference) },
+    computed: { formula, charge, document: documentOf(formula, charge, margin.value, reference) },
     problems,
   };
 }
 
-function documentOf(formula: Formula, charge: Charge, reference: Reference): FormulaDocument {
+function documentOf(
+  formula: Formula,
+  charge: Charge,
+  margin: Margin,
+  reference: Reference,
+): FormulaDocument {
   const { constants, shop } = reference;
   const equivalents = equivalentsOf(charge, AS_USED, constants);
-  const margin = superfatMargin(charge, constants);
   const lye = lyeOf(charge);
   const start = celsius(shop.startTemperature);
   const lyeTables = reference.tables.lyeHeat;

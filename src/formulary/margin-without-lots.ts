@@ -29,9 +29,10 @@ export function marginWithoutLots(
   const reckoned = reckon(prepared.formulation, MASS_OF_FATS, reference.constants);
   if (!reckoned.ok) return null;
   const margin = superfatMargin(reckoned.value, reference.constants);
+  if (!margin.ok) return null;
   const ends = {
-    expanded: percentRange(margin.expanded),
-    worstCase: percentRange(margin.worstCase),
+    expanded: percentRange(margin.value.expanded),
+    worstCase: percentRange(margin.value.worstCase),
   };
   // the same arithmetic on the same numbers, so where no lot decides the bits are the same
   const same = (['expanded', 'worstCase'] as const).every((name) =>

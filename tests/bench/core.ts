@@ -10,6 +10,7 @@ import { fraction, type Grams, grams } from '../../src/chemistry/quantity.ts';
 import { reckon } from '../../src/chemistry/reckon.ts';
 import { weigh } from '../../src/chemistry/weigh.ts';
 import { alkali, CONSTANTS, fat, formulation } from '../support/materials.ts';
+import { givenValue } from '../support/outcome.ts';
 
 const SHARES = [0.4, 0.25, 0.15, 0.1, 0.05, 0.05];
 const VALUES = [190, 256.5, 177.5, 199.5, 181.5, 191];
@@ -28,14 +29,14 @@ const scale = (mass: Grams) =>
 function oneFormula(): number {
   const charge = reckon(sixFats, grams(1000), CONSTANTS);
   if (!charge.ok) throw new Error(charge.breach.rule);
-  let check = superfatMargin(charge.value, CONSTANTS).expanded.low;
+  let check = givenValue(superfatMargin(charge.value, CONSTANTS)).expanded.low;
   for (const size of SIZES) {
     const scaled = reckon(sixFats, size, CONSTANTS);
     if (!scaled.ok) throw new Error(scaled.breach.rule);
     const weighed = weigh(scaled.value, scale, 0.003, CONSTANTS);
     if (!weighed.ok) throw new Error(weighed.breach.rule);
     const { charge: rounded, weighing } = weighed.value;
-    check += superfatMargin(rounded, CONSTANTS, weighing).expanded.low;
+    check += givenValue(superfatMargin(rounded, CONSTANTS, weighing)).expanded.low;
   }
   return check;
 }

@@ -3,10 +3,10 @@ import { join } from 'node:path';
 import { expect, inject, test } from 'vitest';
 import { indexPages } from '../../src/search/build/index-pages.ts';
 import { wordsOfText } from '../../src/search/reader/excerpt.ts';
-import { chance } from '../support/chance.ts';
 import { compareAnswers, hasDroppedSymbol } from '../search/compare-answers.ts';
 import { memorySearch } from '../search/memory-search.ts';
 import { openStockClient } from '../search/stock-client.ts';
+import { chance } from '../support/chance.ts';
 import { sitePages } from '../support/site-files.ts';
 
 const QUERIES = 1000;

@@ -46,7 +46,10 @@ describe('a blend counts as its parts', () => {
   });
 
   test('the same margin and budget: a fat that stands there twice errs as one', () => {
-    const [a, b] = [superfatMargin(blended, CONSTANTS), superfatMargin(written, CONSTANTS)];
+    const [a, b] = [
+      givenValue(superfatMargin(blended, CONSTANTS)),
+      givenValue(superfatMargin(written, CONSTANTS)),
+    ];
     expect(a.expanded.low).toBeCloseTo(b.expanded.low, 12);
     expect(a.expanded.high).toBeCloseTo(b.expanded.high, 12);
     expect(a.worstCase.low).toBeCloseTo(b.worstCase.low, 12);
@@ -116,8 +119,9 @@ describe('a blend is weighed as one', () => {
         weigh(charge(wish), scale(1, 1), 1, CONSTANTS),
       );
       const onlyFats = { ...weighing, alkali: [0] };
-      return superfatMargin(rounded, CONSTANTS, onlyFats).budget.find(({ id }) => id === 'scale')
-        ?.halfWidth;
+      return givenValue(superfatMargin(rounded, CONSTANTS, onlyFats)).budget.find(
+        ({ id }) => id === 'scale',
+      )?.halfWidth;
     };
     // two weighings of equal effect are sqrt 2 of one
     const [together = 0, apart = 0] = [half(blendOf('base')), half(blendOf())];

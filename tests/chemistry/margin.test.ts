@@ -22,7 +22,7 @@ const weighing = { fats: [1.5, 1.5, 1.5], alkali: [0.15], additives: [], liquids
 describe('superfat margin', () => {
   test('agrees with a Monte Carlo run of the core, with and without the scale', () => {
     for (const scale of [null, weighing]) {
-      const { expanded } = superfatMargin(charge, CONSTANTS, scale);
+      const { expanded } = givenValue(superfatMargin(charge, CONSTANTS, scale));
       const { mean, deviation } = monteCarlo(40_000, scale);
       expect((expanded.low + expanded.high) / 2).toBeCloseTo(mean, 3);
       // first order against sampling: within 2 % of the half-width
@@ -31,7 +31,7 @@ describe('superfat margin', () => {
   });
 
   test('the worst case is all ranges at one end', () => {
-    const { worstCase } = superfatMargin(charge, CONSTANTS);
+    const { worstCase } = givenValue(superfatMargin(charge, CONSTANTS));
     // by hand: E of the low ends (82.8 + 62 + 48) / 56.105 = 3.43642 mol; hydroxide as weighed
     const low = (0.45 * 184 + 0.25 * 248 + 0.3 * 160) / 0.056105;
     const hydroxide = ((charge.alkali[0]?.weighedMass ?? 0) * 0.995) / 39.997;
@@ -39,7 +39,7 @@ describe('superfat margin', () => {
   });
 
   test('names the largest contribution first', () => {
-    const { budget } = superfatMargin(charge, CONSTANTS, weighing);
+    const { budget } = givenValue(superfatMargin(charge, CONSTANTS, weighing));
     expect(budget.map(({ id }) => id)).toEqual([
       'fat:shea',
       'fat:olive',
@@ -69,10 +69,9 @@ describe('superfat margin', () => {
           : line,
       ),
     };
-    const before = superfatMargin(charge, CONSTANTS).expanded;
-    const after = superfatMargin(
-      givenValue(reckon(measured, grams(1000), CONSTANTS)),
-      CONSTANTS,
+    const before = givenValue(superfatMargin(charge, CONSTANTS)).expanded;
+    const after = givenValue(
+      superfatMargin(givenValue(reckon(measured, grams(1000), CONSTANTS)), CONSTANTS),
     ).expanded;
     expect(after.high - after.low).toBeLessThan(0.6 * (before.high - before.low));
   });
@@ -95,20 +94,39 @@ describe('superfat margin', () => {
           CONSTANTS,
         ),
       );
-    const cold = superfatMargin(waxy('cold'), CONSTANTS);
-    const hot = superfatMargin(waxy('hot'), CONSTANTS);
+    const cold = givenValue(superfatMargin(waxy('cold'), CONSTANTS));
+    const hot = givenValue(superfatMargin(waxy('hot'), CONSTANTS));
     // jojoba is 5.1 % of the equivalents: without it the superfat of 5 % is all but gone
     expect(cold.expanded.low).toBeLessThan(hot.expanded.low - 0.04);
     expect(cold.worstCase.low).toBeLessThan(hot.worstCase.low - 0.04);
     expect(cold.expanded.high).toBeCloseTo(hot.expanded.high, 9);
   });
 
+  test('is refused where nothing in the pot is sure to use up the alkali', () => {
+    const wax = (acidValue: number) =>
+      givenValue(
+        reckon(
+          formulation({
+            fats: [
+              { fat: fat('jojoba', { value: 92, kind: 'wax', acidValue }), share: fraction(1) },
+            ],
+          }),
+          grams(1000),
+          CONSTANTS,
+        ),
+      );
+    expect(superfatMargin(wax(0), CONSTANTS)).toMatchObject({
+      ok: false,
+      breach: { rule: 'nothing-sure-to-saponify' },
+    });
+    expect(superfatMargin(wax(1), CONSTANTS).ok).toBe(true);
+  });
+
   test('lies inside the worst case, whatever the formula', () => {
     fc.assert(
       fc.property(anyFormulation, (wish) => {
-        const { expanded, worstCase } = superfatMargin(
-          givenValue(reckon(wish, grams(1000), CONSTANTS)),
-          CONSTANTS,
+        const { expanded, worstCase } = givenValue(
+          superfatMargin(givenValue(reckon(wish, grams(1000), CONSTANTS)), CONSTANTS),
         );
         expect(expanded.low).toBeGreaterThanOrEqual(worstCase.low);
         expect(expanded.high).toBeLessThanOrEqual(worstCase.high);

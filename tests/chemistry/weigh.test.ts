@@ -87,6 +87,17 @@ describe('weighing', () => {
     });
   });
 
+  test('held-back water that rounds to nothing is refused like anything else', () => {
+    const charge = givenValue(
+      reckon(formulation({ holdBack: fraction(0.001) }), grams(1000), CONSTANTS),
+    );
+    expect(weigh(charge, scale(1), 0.01, CONSTANTS)).toMatchObject({
+      ok: false,
+      breach: { rule: 'weight-below-scale-step' },
+    });
+    expect(weigh(charge, scale(0.1), 0.01, CONSTANTS).ok).toBe(true);
+  });
+
   test('0.1 g steps come out as the decimal a sheet prints', () => {
     const charge = givenValue(reckon(formulation(), grams(100.3), CONSTANTS));
     const { charge: rounded } = givenValue(weigh(charge, scale(0.1), 1, CONSTANTS));

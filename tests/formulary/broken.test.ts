@@ -16,6 +16,7 @@ const COMPUTED = [
   'formula/stock-too-weak',
   'formula/liquids-out-of-range',
   'formula/lye-does-not-dissolve',
+  'formula/nothing-saponifies',
   'formula/below-release-limit',
   'formula/concession-not-needed',
 ];

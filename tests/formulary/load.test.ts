@@ -78,6 +78,13 @@ describe('rules that need the whole formulary', () => {
       STOCK,
     ],
     [
+      'formula/nothing-saponifies',
+      SAFE.replace(/fats:\n( .*\n)+/, 'fats: [{ fat: jojoba, share: 100 }]\n')
+        .replace(':weight[olive]', ':weight[jojoba]')
+        .replace(':weight[coconut] with ', ''),
+      '',
+    ],
+    [
       'formula/lye-does-not-dissolve',
       SAFE.replace('lye-concentration: 32', 'lye-concentration: 45, hold-back: 60'),
       '',

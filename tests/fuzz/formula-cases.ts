@@ -7,6 +7,7 @@ import { type FormulaRead, readFormula } from '../../src/formulary/read-formula.
 import type { Chance } from '../support/chance.ts';
 import { packagedReference } from '../support/packaged-reference.ts';
 import { computedFaults } from './computed-faults.ts';
+import { edgeFormula } from './edge-formula.ts';
 import { PAYLOADS } from './hostile-values.ts';
 import { mutateBytes } from './mutate-bytes.ts';
 import { mutateValue } from './mutate-value.ts';
@@ -28,6 +29,12 @@ const PARTS = FILES.map((bytes) => {
 /** A formula of the demo with other values in its frontmatter: refused with a place in the file, or sound. */
 export function otherValues(random: Chance): Case {
   const input = withOtherValues(random);
+  return { faults: faultsOf(readFormula(input, 'a.md', known), input), input };
+}
+
+/** A formula at the edges of what is allowed: refused with a place in the file, or sound. */
+export function edges(random: Chance): Case {
+  const input = edgeFormula(known, random);
   return { faults: faultsOf(readFormula(input, 'a.md', known), input), input };
 }
 

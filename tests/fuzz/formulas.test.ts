@@ -2,7 +2,7 @@ import { mkdtempSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterAll, test } from 'vitest';
-import { otherBytes, otherValues } from './formula-cases.ts';
+import { edges, otherBytes, otherValues } from './formula-cases.ts';
 import { IS_LONG, runCases } from './run.ts';
 
 const folder = mkdtempSync(join(tmpdir(), 'fuzz-'));
@@ -14,6 +14,10 @@ const CASES = IS_LONG ? 1400 : 120;
 test.each(SEEDS)(
   'a formula with other values is refused with a place, or sound (seed %i)',
   (seed) => runCases(seed, CASES, otherValues),
+);
+
+test.each(SEEDS)('a formula at the edges is refused with a place, or sound (seed %i)', (seed) =>
+  runCases(seed + 2000, CASES, edges),
 );
 
 test.each(SEEDS)('a damaged formula file is refused with a place, or sound (seed %i)', (seed) =>

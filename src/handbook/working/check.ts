@@ -96,8 +96,8 @@ export function superfatStep(
     numbers: product(HUNDRED, minus(exact(1), fractionOf(net, figure(saponifiable, 7)))),
     value: percent,
     digits: 4,
-    // seven digits of two amounts leave this much of a small difference
-    within: 0.0002,
+    // half of the seventh digit of each amount, however small their difference
+    within: (100 * 5e-7 * (2 * hydroxide + 2 * acid)) / saponifiable,
     unit: '%',
   });
 }

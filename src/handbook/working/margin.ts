@@ -28,7 +28,10 @@ export function margin(working: Working): Section {
   const worst: Reading = { fats: 'low', assay: 'high', waxAsAcids };
   const atCentre = equivalentsOf(charge, centre, constants);
   const atWorst = equivalentsOf(charge, worst, constants);
-  const result = superfatMargin(charge, constants);
+  const outcome = superfatMargin(charge, constants);
+  if (!outcome.ok)
+    throw new RangeError(`a formula without a margin has no working: ${outcome.breach.rule}`);
+  const result = outcome.value;
 
   const fats = fatRanges(working, waxAsAcids);
   const contributions = [
@@ -101,7 +104,7 @@ export function margin(working: Working): Section {
         symbol: symbol('U'),
         numbers: rootOf(sumOf(...contributions.map(({ result }) => squareOf(result)))),
         value: together,
-        digits: 4,
+        digits: digitsOf(together),
         within: 0.0005,
         unit: '%',
       }),
@@ -113,10 +116,13 @@ export function margin(working: Working): Section {
         symbol: symbol('s', 'low'),
         ...(clipped ? {} : { equation: minus(symbol('s', 'centre'), symbol('U')) }),
         numbers: clipped
-          ? figure(worstCase.low * 100, 4)
-          : minus(figure(centrePercent, 4), figure(together, 4)),
+          ? figure(worstCase.low * 100, digitsOf(worstCase.low * 100))
+          : minus(
+              figure(centrePercent, digitsOf(centrePercent)),
+              figure(together, digitsOf(together)),
+            ),
         value: expanded.low * 100,
-        digits: 4,
+        digits: digitsOf(expanded.low * 100),
         within: 0.002,
         unit: '%',
       }),
@@ -125,6 +131,9 @@ export function margin(working: Working): Section {
 }
 
 const HUNDRED = exact(100);
+
+/** Digits that print a percentage to the same thousandth whether it has one place before the point or two. */
+const digitsOf = (percent: number): number => (Math.abs(percent) >= 10 ? 5 : 4);
 
 function contribution(id: string, subject: string, numbers: Term, working: Working): Step {
   const value = working.document.superfat.budget.find((part) => part.id === id)?.halfWidth;
@@ -135,7 +144,7 @@ function contribution(id: string, subject: string, numbers: Term, working: Worki
     symbol: symbol('U', subject),
     numbers,
     value: value ?? Number.NaN,
-    digits: 4,
+    digits: digitsOf(value ?? 0),
     within: 0.0005,
     unit: '%',
   });

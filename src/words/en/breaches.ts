@@ -15,6 +15,8 @@ const reasons: Readonly<Record<string, (numbers: Numbers) => string>> = {
     'One of the weights is smaller than half a step of the scale and would round to nothing.',
   'weight-above-scale-capacity': (n) =>
     `One of the weights would be ${of(n, 'mass', 0)} g, more than the ${of(n, 'capacity', 0)} g that the scale takes.`,
+  'nothing-sure-to-saponify': () =>
+    'With every error against us nothing is left in the pot that is sure to use up the alkali.',
   'scale-not-known': () => 'The shop’s data name no scale for this size.',
   'stock-weaker-than-lye': () =>
     'The stock lye already holds more water than the formula asks for. It cannot be made stronger by adding water.',

@@ -73,6 +73,7 @@ export const FORMULA_PROBLEMS = {
   'formula/stock-too-weak': { title: 'A stock lye that is weaker than the lye asked for' },
   'formula/liquids-out-of-range': { title: 'Liquids that need more alkali than they carry' },
   'formula/lye-does-not-dissolve': { title: 'More alkali than the water can dissolve' },
+  'formula/nothing-saponifies': { title: 'Waxes alone in a cold process' },
   'formula/below-release-limit': { title: 'A lowest superfat below the release limit' },
   'formula/concession-not-needed': { title: 'A concession where the release limit is kept' },
 } as const satisfies Record<string, { readonly title: string }>;

@@ -16,6 +16,8 @@ const reasons: Readonly<Record<string, (numbers: Numbers) => string>> = {
     'Una de las pesadas es menor que medio escalón de la balanza y se redondearía a nada.',
   'weight-above-scale-capacity': (n) =>
     `Una de las pesadas sería de ${of(n, 'mass', 0)} g, más de los ${of(n, 'capacity', 0)} g que admite la balanza.`,
+  'nothing-sure-to-saponify': () =>
+    'Con todos los errores en contra no queda en la olla nada que consuma con seguridad el álcali.',
   'scale-not-known': () => 'Los datos del taller no indican ninguna balanza para este tamaño.',
   'stock-weaker-than-lye': () =>
     'La solución de reserva ya contiene más agua de la que pide la fórmula. No se puede hacer más concentrada añadiendo agua.',
