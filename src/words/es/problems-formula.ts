@@ -96,6 +96,7 @@ export const FORMULA_PROBLEMS: SameShape<typeof english> = {
   },
   'formula/liquids-out-of-range': { title: 'Líquidos que necesitan más álcali del que llevan' },
   'formula/lye-does-not-dissolve': { title: 'Más álcali del que el agua puede disolver' },
+  'formula/nothing-saponifies': { title: 'Solo ceras en un proceso en frío' },
   'formula/below-release-limit': {
     title: 'Un sobreengrasado mínimo por debajo del límite de liberación',
   },
