@@ -1,4 +1,5 @@
 import type { materialMethods as english } from '../en/methods-materials.ts';
+import { withDecimalSign } from '../numbers.ts';
 import type { SameShape } from '../same-shape.ts';
 
 /** Models about what goes in: which value is used, free acids, waxes, lots, blends. */
@@ -43,8 +44,10 @@ export const materialMethods: SameShape<typeof english> = [
     range: 'Un blanco mayor que la muestra, y lecturas mayores que cero.',
     ignores:
       'El carbonato del álcali en lo que el blanco no lo compensa, y una grasa que no hirvió lo suficiente.',
-    source:
-      'ISO 3657 (fórmula y factor 56.1 de memoria); un ejemplo impreso de 1908 está entre las comprobaciones.',
+    // read when shown: the shop's locale decides the decimal sign
+    get source() {
+      return `ISO 3657 (fórmula y factor ${withDecimalSign('56.1')} de memoria); un ejemplo impreso de 1908 está entre las comprobaciones.`;
+    },
   },
   {
     id: 'free-acids',

@@ -1,4 +1,5 @@
 import type { methodWords as english } from '../en/methods.ts';
+import { withDecimalSign } from '../numbers.ts';
 import type { SameShape } from '../same-shape.ts';
 import { batchMethods } from './methods-batch.ts';
 import { materialMethods } from './methods-materials.ts';
@@ -70,8 +71,10 @@ export const methodWords: SameShape<typeof english> = [
       ['y_Na, y_K', 'proporciones por masa pura', '1'],
     ],
     range: 'Cualquier combinación de los dos.',
-    ignores:
-      'El carbonato del álcali: con ácidos grasos libres (ácido esteárico) neutraliza una parte de ellos y desprende gas, lo que deja algo más de hidróxido para las grasas. Con 0.5 % de carbonato son unos 0.3 puntos porcentuales de sobreengrasado en un jabón rico en ácidos libres; no está en ninguno de los intervalos.',
+    // read when shown: the shop's locale decides the decimal sign
+    get ignores() {
+      return `El carbonato del álcali: con ácidos grasos libres (ácido esteárico) neutraliza una parte de ellos y desprende gas, lo que deja algo más de hidróxido para las grasas. Con ${withDecimalSign('0.5')} % de carbonato son unos ${withDecimalSign('0.3')} puntos porcentuales de sobreengrasado en un jabón rico en ácidos libres; no está en ninguno de los intervalos.`;
+    },
     source: 'Estequiometría.',
   },
   {
@@ -125,7 +128,10 @@ export const methodWords: SameShape<typeof english> = [
     ],
     range: 'Grasas cuya composición se conoce. Si falta una, no hay ningún perfil.',
     ignores: 'Los glicéridos parciales y los ácidos por debajo de los límites de las tablas.',
-    source: 'Estequiometría; 38.049 g/mol es el glicerol menos tres aguas.',
+    // read when shown: the shop's locale decides the decimal sign
+    get source() {
+      return `Estequiometría; ${withDecimalSign('38.049')} g/mol es el glicerol menos tres aguas.`;
+    },
   },
   {
     id: 'saponification-value',
@@ -145,8 +151,10 @@ export const methodWords: SameShape<typeof english> = [
       ['P_k', 'porcentaje del ácido k', '%'],
       ['F_k', 'gramos de yodo por gramo de su glicérido o ácido libre', 'g/g'],
     ],
-    range:
-      'No sirve para aceites de pescado. Da de menos por cálculo por encima de 0.5 % de materia insaponificable.',
+    // read when shown: the shop's locale decides the decimal sign
+    get range() {
+      return `No sirve para aceites de pescado. Da de menos por cálculo por encima de ${withDecimalSign('0.5')} % de materia insaponificable.`;
+    },
     ignores: 'La materia insaturada que no es un ácido graso. Las ceras toman su valor tabulado.',
     source: 'AOCS Cd 1c-85 (reaprobado en 2009), ISO 3961 anexo B.',
   },

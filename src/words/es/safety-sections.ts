@@ -7,7 +7,7 @@ export const safetySections: SameShape<typeof english> = [
     id: 'what',
     title: 'Qué es la solución alcalina',
     items: [
-      'El hidróxido de sodio (sosa cáustica) y el hidróxido de potasio (potasa cáustica) convierten la grasa en jabón. La piel y los ojos están hechos de cosas que ellos disuelven igual de bien.',
+      'El hidróxido de sodio (sosa cáustica) y el hidróxido de potasio (potasa cáustica) convierten la grasa en jabón. La piel y los ojos están hechos de cosas que estos disuelven igual de bien.',
       'Disueltos en agua son la solución alcalina: transparente, sin olor y caliente. Parece agua. Por eso se etiqueta y nunca se pierde de vista. En el oficio se llama también lejía cáustica; nunca es lejía doméstica (cloro, lavandina).',
       'La solución alcalina y las grasas mezcladas son la masa de jabón; también es cáustica. El jabón fresco puede contener todavía álcali libre, que es álcali que no ha encontrado grasa. Trátelo como cáustico hasta que se haya medido.',
     ],
@@ -27,7 +27,7 @@ export const safetySections: SameShape<typeof english> = [
     id: 'alone',
     title: 'Quién no debe hacerlo a solas',
     items: [
-      'Nadie trabaja con solución alcalina a solas en el edificio. Alguien que pueda oírle sabe lo que hace usted y dónde está el agua.',
+      'Nadie trabaja con solución alcalina a solas en el edificio. Una persona al alcance de la voz sabe qué hace usted y dónde está el agua.',
       'Quien empieza a elaborar trabaja junto a una persona experimentada hasta que ambas hayan firmado el registro.',
       'Menores de dieciocho años: solo donde la ley lo permita, y nunca sin una persona experimentada al lado.',
       'Con cansancio, enfermedad, prisa, mareo por un medicamento, o con un brazo o una mano que no funcionan como siempre: hoy no.',
@@ -40,7 +40,7 @@ export const safetySections: SameShape<typeof english> = [
     title: 'Qué ponerse',
     items: [
       'Gafas de protección que cierren todo alrededor, o una pantalla facial sobre ellas. Los anteojos comunes no bastan. Sin lentes de contacto.',
-      'Los guantes que la ficha de datos de seguridad indica para el álcali, lo bastante largos para cubrir la muñeca. Busque agujeros; cámbielos si les ha entrado una salpicadura.',
+      'Los guantes que la ficha de datos de seguridad indica para el álcali, lo bastante largos para cubrir la muñeca. Busque agujeros; cámbielos cuando les entre una salpicadura.',
       'Mangas largas por encima de los guantes, pantalón largo por encima de calzado cerrado, un delantal que no se empape.',
       'Lleve todo puesto hasta que los utensilios estén limpios. Después lave los guantes antes de quitárselos.',
     ],
@@ -76,7 +76,7 @@ export const safetySections: SameShape<typeof english> = [
       'Donde una fórmula reserva agua para añadirla más tarde, la solución alcalina del recipiente es más concentrada y más caliente de lo que dice el porcentaje de su fórmula.',
       'Deje enfriar la solución alcalina donde está. Llévela solo cubierta, con las dos manos y el camino libre.',
       'La leche, la miel, el azúcar y el alcohol calientan la masa de jabón por sí mismos. Déjele espacio y mírela cada pocos minutos.',
-      'Proceso en caliente, donde el jabón se cuece: recipiente lleno como máximo hasta la mitad, quédese al lado, con una cuchara y una superficie fría a mano. Puede subir como la leche.',
+      'Proceso en caliente, donde el jabón se cuece: recipiente lleno como máximo hasta la mitad, quédese al lado, con una cuchara y una superficie fría a mano. Puede subir como la leche al hervir.',
       'Alcohol, solo lejos de llamas, placas calientes y chispas.',
     ],
   },
@@ -96,8 +96,8 @@ export const safetySections: SameShape<typeof english> = [
     title: 'Si se derrama',
     items: [
       'Mantenga lejos a los demás. Primero, el equipo de protección. Si alguien está salpicado, los primeros auxilios van antes que el suelo.',
-      'Álcali sólido: bárralo en seco a un recipiente de plástico etiquetado. Sin trapos húmedos, sin manos desnudas, sin recogedor de aluminio ni de zinc.',
-      'Solución alcalina: conténgala con arena seca u otro absorbente que indique la ficha de datos de seguridad, nunca con serrín ni trapos; recójala y después enjuague el lugar con mucha agua donde la ficha de datos de seguridad y las reglas locales permitan usar el desagüe.',
+      'Álcali sólido: bárralo en seco y páselo a un recipiente de plástico etiquetado. Sin trapos húmedos, sin manos desnudas, sin recogedor de aluminio ni de zinc.',
+      'Solución alcalina: conténgala con arena seca u otro absorbente que indique la ficha de datos de seguridad, nunca con serrín (aserrín) ni trapos; recójala y después enjuague el lugar con mucha agua donde la ficha de datos de seguridad y las reglas locales permitan usar el desagüe.',
       'No le eche ácido ni vinagre. La reacción da más calor y salpicaduras.',
       'Más de lo que puede recoger con lo que tiene a mano: salga, cierre la puerta, llame.',
       'La masa de jabón que se ha desbordado al hervir es solución alcalina hasta que se haya demostrado que no lo es.',
@@ -109,7 +109,7 @@ export const safetySections: SameShape<typeof english> = [
     items: [
       'El álcali, en su envase original, bien cerrado, seco, bajo llave, por debajo de la altura de los ojos, en una bandeja de plástico.',
       'Lejos de los ácidos, de las sales de amonio (en algunos fertilizantes; desprenden amoníaco), del aluminio, el zinc y el estaño, de los alimentos y de todo lo que arde.',
-      'Nada de lo que se pueda beber contiene jamás solución alcalina. La solución alcalina que sobra no se guarda para otro día; sigue el camino de la eliminación, más abajo.',
+      'Nada de lo que se pueda beber contiene jamás solución alcalina. La solución alcalina que sobra no se guarda para otro día; se elimina como se indica más abajo.',
       'Álcali apelmazado o húmedo: no lo pese. Su fuerza se desconoce hasta que se haya medido otra vez (titulado).',
       'La solución de reserva, que llega ya disuelta, a la temperatura que indica su proveedor; puede cristalizar con el frío.',
     ],
@@ -119,7 +119,7 @@ export const safetySections: SameShape<typeof english> = [
     title: 'Eliminación',
     items: [
       'Según la ficha de datos de seguridad y las reglas del lugar; pregunte a la empresa de aguas antes de echar por un desagüe algo fuerte.',
-      'Álcali barrido, absorbente con solución alcalina y masa de jabón fallida: en un recipiente de plástico con tapa, con su nombre y la fecha, hasta que se lo lleve alguien cualificado.',
+      'Álcali barrido, absorbente con solución alcalina y masa de jabón fallida: en un recipiente de plástico con tapa, con su nombre y la fecha, hasta que se lo lleve alguien capacitado.',
       'Los sacos y envases de álcali vacíos no están vacíos. Enjuáguelos con guantes y gafas de protección puestos, donde las reglas locales lo permitan, e inutilice la etiqueta.',
       'Un lote dudoso se etiqueta, se aparta y se guarda bajo llave. Decide quien formula.',
     ],

@@ -6,7 +6,7 @@ import type { SameShape } from '../same-shape.ts';
 export const safetyPage: SameShape<typeof english> = {
   title: 'Seguridad',
   first:
-    'La ficha de datos de seguridad (FDS) del proveedor va primero. Después, la ley del lugar, las reglas de su empresa y la palabra de los profesionales habilitados. Después, esta página. En caso de lesión, haga lo que digan los servicios de emergencia y el médico.',
+    'La ficha de datos de seguridad (FDS) del proveedor va primero. Después, la ley del lugar, las reglas de su empresa y las indicaciones de los profesionales habilitados. Después, esta página. En caso de lesión, haga lo que digan los servicios de emergencia y el médico.',
   reading:
     'Unos diez minutos. Léala entera antes de su primera solución alcalina, y otra vez cada año.',
   poster: 'Cartel para la pared',
@@ -15,14 +15,14 @@ export const safetyPage: SameShape<typeof english> = {
     'Esta página se imprime en A5. Para obtener un cuadernillo que se dobla, elija “folleto” en la ventana de la impresora.',
   emergencyTitle: 'En una emergencia',
   noEmergency:
-    'ESTE TALLER NO TIENE PUESTO NINGÚN NÚMERO DE EMERGENCIA. Nadie trabaja con solución alcalina antes de que los números estén en data/shop.yaml y aquí.',
+    'ESTE TALLER NO TIENE REGISTRADO NINGÚN NÚMERO DE EMERGENCIA. Nadie trabaja con solución alcalina antes de que los números estén en data/shop.yaml y aquí.',
   practice:
     'Las frases sin código son práctica común, sin fuente. Códigos como P305 señalan frases oficiales, todas reunidas al final; donde dicen “varios minutos”, los veinte minutos de aquí son más y son los que valen. La ficha de datos de seguridad va antes que esta página.',
   neverNeutralise:
     'Nunca ponga vinagre, ácido ni ningún otro “antídoto” sobre la piel ni en los ojos. Agua.',
   firstAidTitle: 'Primeros auxilios',
   firstAidLead:
-    'La solución alcalina sigue quemando después de que deja de doler. Enjuague de inmediato, pida ayuda a gritos y que otra persona llame por teléfono.',
+    'La solución alcalina sigue quemando aunque haya dejado de doler. Enjuague de inmediato, pida ayuda a gritos y que otra persona llame por teléfono.',
   tell: 'Diga por teléfono: un álcali corrosivo, hidróxido de sodio o de potasio; su concentración (el porcentaje de la hoja de trabajo), si la sabe; qué parte del cuerpo; desde cuándo; dónde está usted. La etiqueta y la ficha de datos de seguridad acompañan a la persona lesionada.',
   firstAid: [
     {
@@ -44,7 +44,7 @@ export const safetyPage: SameShape<typeof english> = {
       code: 'P301+P330+P331',
       short: 'Enjuague la boca y escupa. No provoque el vómito. Llame por teléfono de inmediato.',
       practice:
-        'Llame de inmediato al número de emergencia. Nada para neutralizarlo, nada de comer; beba solo lo que diga el centro de toxicología o un médico.',
+        'Llame de inmediato al número de emergencia. Nada para neutralizarlo y nada de comer; beba solo lo que diga el centro de toxicología o un médico.',
     },
     {
       route: 'Por inhalación',

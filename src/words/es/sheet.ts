@@ -41,7 +41,7 @@ export const sheetWords: SameShape<typeof english> = {
       'Llevo puestos las gafas de protección, los guantes y el delantal, el grifo funciona y hay otra persona en el edificio.',
     cautions: 'Las advertencias de esta hoja están leídas.',
     otherwise:
-      'Otra partida, otra revisión, una balanza dudosa: deténgase y pregunte a quien formula. Nunca cambie las cantidades a mano.',
+      'Otra partida, otra revisión, una balanza dudosa: deténgase y pregunte a quien formula. Nunca adapte las cantidades a mano.',
   },
   cautions: 'Advertencias',
   moreCautions: 'Más advertencias',
@@ -132,6 +132,6 @@ export const sheetWords: SameShape<typeof english> = {
     signature: 'Nombre, firma, fecha',
   },
   emergency: 'Emergencia',
-  noEmergency: 'Este taller no tiene puesto ningún número de emergencia.',
+  noEmergency: 'Este taller no tiene registrado ningún número de emergencia.',
   first: 'La ficha de datos de seguridad (FDS) del proveedor y las reglas locales van primero.',
 };

@@ -1,5 +1,5 @@
 import type { titrationLines as english } from '../en/titration-lines.ts';
-import { fixed, plain } from '../numbers.ts';
+import { fixed, plain, withDecimalSign } from '../numbers.ts';
 import type { SameShape } from '../same-shape.ts';
 
 /** What the titration command prints. */
@@ -8,7 +8,7 @@ export const titrationLines: SameShape<typeof english> = {
   valueWithin: (value, uncertainty) =>
     `Índice de saponificación ${fixed(value, 1)} ± ${fixed(uncertainty, 1)} mg KOH/g, k = 2`,
   equation: (normality, blank, sample, mass) =>
-    `  56.1 x ${plain(normality, 4)} x (${plain(blank, 3)} - ${plain(sample, 3)}) / ${plain(mass, 4)}, con el factor como lo redondea la norma (ISO 3657)`,
+    `  ${withDecimalSign('56.1')} x ${plain(normality, 4)} x (${plain(blank, 3)} - ${plain(sample, 3)}) / ${plain(mass, 4)}, con el factor como lo redondea la norma (ISO 3657)`,
   part: {
     volume: (half) => `  ambos volúmenes ± ${fixed(half, 2)}`,
     mass: (half) => `  masa            ± ${fixed(half, 2)}`,

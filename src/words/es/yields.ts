@@ -9,7 +9,7 @@ export const yieldWords: SameShape<typeof englishYield> = {
   perKilogram: 'De 1000 g de grasas',
   columns: {
     measure: 'Medida',
-    fresh: 'Fresco',
+    fresh: 'En fresco',
     released: 'A la liberación',
     size: 'Tamaño',
     batter: 'Todo junto',
