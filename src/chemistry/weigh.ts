@@ -154,10 +154,10 @@ function round(exact: Grams, scale: ScaleReading, how: (steps: number) => number
 }
 
 /** 3 x 0.1 is 0.30000000000000004 in binary; the sheet says 0.3 and so does the mass. */
-const massOf = ({ steps, step }: Rounded): Grams => grams(Number((steps * step).toPrecision(12)));
+const massOf = ({ steps, step }: Rounded): Grams => grams(Number((steps * step).toPrecision(15)));
 
 const partOf = (entry: Rounded & { readonly part: number }): Grams =>
-  grams(Number((massOf(entry) * entry.part).toPrecision(12)));
+  entry.part === 1 ? massOf(entry) : grams(Number((massOf(entry) * entry.part).toPrecision(12)));
 
 // a mass that is a whole number of steps but for the last bit must not lose or gain one
 const floorOfSteps = (steps: number) => Math.floor(steps + 1e-9);

@@ -12,7 +12,7 @@ const target = (name: TargetName) =>
         found: `${name} "${text}"`,
         expected:
           of === 'temperature'
-            ? 'degrees Celsius as 38 C or 35-40 C'
+            ? 'a temperature as 38 C, 35-40 C or 100 F'
             : 'a time as 90 min, 24 h, 24-36 h or 42 d',
       };
     }

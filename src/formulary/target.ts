@@ -1,8 +1,14 @@
+import { celsiusOf } from '../words/units.ts';
 import type { Formula } from './formula.ts';
 
 export type Target = Formula['targets'][string];
 
-const TEMPERATURE = { of: 'temperature', low: -5, high: 120, range: '-5 to 120 C' } as const;
+const TEMPERATURE = {
+  of: 'temperature',
+  low: -5,
+  high: 120,
+  range: '-5 to 120 C (23 to 248 F)',
+} as const;
 
 /** What a target is of, and its sane range in degrees Celsius or hours. */
 export const TARGETS = {
@@ -16,17 +22,19 @@ export const TARGETS = {
 export type TargetName = keyof typeof TARGETS;
 
 const HOURS = { h: 1, d: 24, min: 1 / 60 } as const;
-const FORM = /^(-?\d+(?:\.\d+)?)(?: ?[-–] ?(-?\d+(?:\.\d+)?))? ?(°?C|h|d|min)$/;
+const FORM = /^(-?\d+(?:\.\d+)?)(?: ?[-–] ?(-?\d+(?:\.\d+)?))? ?(°?[CF]|h|d|min)$/;
 
-/** `38 C`, `35-40 C`, `24 h`, `42 d`, `90 min`; `null` for anything else. */
+/** `38 C`, `35-40 C`, `100 F` (kept in degrees Celsius), `24 h`, `42 d`, `90 min`; `null` for anything else. */
 export function parseTarget(text: string): Target | null {
   const match = FORM.exec(text.trim());
   if (!match) return null;
   const [, first, second, unit] = match;
+  const scale = unit?.replace('°', '');
+  const value = (digits = '') => (scale === 'F' ? celsiusOf(Number(digits)) : Number(digits));
   return {
-    min: Number(first),
-    max: Number(second ?? first),
-    unit: (unit === '°C' ? 'C' : unit) as Target['unit'],
+    min: value(first),
+    max: value(second ?? first),
+    unit: (scale === 'F' ? 'C' : scale) as Target['unit'],
   };
 }
 

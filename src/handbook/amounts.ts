@@ -1,7 +1,7 @@
 import type { BatchDocument, WeighedLine } from '../formulary/document.ts';
 import type { Formula } from '../formulary/formula.ts';
 import { words } from '../words/catalogue.ts';
-import { decimalsOf, weight } from '../words/numbers.ts';
+import { stepDecimals, weighed } from '../words/measures.ts';
 import { targetText } from './targets.ts';
 
 /**
@@ -31,14 +31,14 @@ export function amountText(
     case 'alkali':
       return alkaliText(weights, `${label}-hydroxide`);
     case 'water':
-      return massText(
+      return weighed(
         (weights.weighedWater ?? 0) - (weights.weighedHeldBack ?? 0),
         weights.waterStep,
       );
     case 'held-back':
-      return massText(weights.weighedHeldBack ?? 0, weights.heldBackStep);
+      return weighed(weights.weighedHeldBack ?? 0, weights.heldBackStep);
     case 'lye':
-      return massText(...lyeMass(weights));
+      return weighed(...lyeMass(weights));
     default:
       return null;
   }
@@ -48,13 +48,13 @@ export function amountText(
 function alkaliText({ alkali }: BatchDocument, id: string): string | null {
   const line = alkali.find((each) => each.id === id);
   if (!line) return null;
-  const mass = massText(line.weighedMass, line.step);
+  const mass = weighed(line.weighedMass, line.step);
   return line.solution === undefined ? mass : words.formulaPage.stockAmount(mass, line.solution);
 }
 
 function lineText(lists: readonly (readonly WeighedLine[])[], id: string): string | null {
   const line = lists.flat().find((each) => each.id === id);
-  return line ? massText(line.weighedMass, line.step) : null;
+  return line ? weighed(line.weighedMass, line.step) : null;
 }
 
 /** Everything in the lye pot, to the finest step used there. */
@@ -66,9 +66,7 @@ export function lyeMass(batch: BatchDocument): [number, number] {
   const water = (batch.weighedWater ?? 0) - (batch.weighedHeldBack ?? 0);
   const mass = lines.reduce((sum, { weighedMass }) => sum + weighedMass, water);
   const finest = [batch.waterStep, ...lines.map(({ step }) => step)].sort(
-    (a, b) => decimalsOf(b) - decimalsOf(a) || a - b,
+    (a, b) => stepDecimals(b) - stepDecimals(a) || a - b,
   )[0];
   return [mass, finest ?? batch.waterStep];
 }
-
-const massText = (mass: number, step: number) => `${weight(mass, step)}\u00a0${words.frame.grams}`;

@@ -4,6 +4,7 @@ import type { BatchDocument } from '../formulary/document.ts';
 import type { ComputedFormula } from '../formulary/formulary.ts';
 import type { Reference } from '../reference/reference.ts';
 import { words } from '../words/catalogue.ts';
+import { massUnit } from '../words/measures.ts';
 import { splitAtPoint } from '../words/numbers.ts';
 import { proofText } from './standing.ts';
 import { weightsTable } from './weights.ts';
@@ -70,7 +71,7 @@ export function cardContent(
       }),
     })),
     decimals,
-    unit: words.frame.grams,
+    unit: massUnit(),
     notes,
     cautions: shown.map(({ severity, text, action }) => ({
       word: words.frame.severities[severity],

@@ -79,7 +79,12 @@ function lineBox({ name, whole, rest }: CardLine, content: CardContent, { text }
       box({ marginLeft: 10, ...weight }, whole),
       box({ width: tail, ...weight }, rest),
       box(
-        { width: 14 * text, fontSize: 17 * text, lineHeight: 1.2, justifyContent: 'flex-end' },
+        {
+          width: (8 + 6 * content.unit.length) * text,
+          fontSize: 17 * text,
+          lineHeight: 1.2,
+          justifyContent: 'flex-end',
+        },
         content.unit,
       ),
     ]),

@@ -37,7 +37,7 @@ export function changeLines(change: FormulaChange, reference: Reference): readon
     ...change.weights.map(({ part, id, at, before, after }) => {
       const name = text.parts[part] ?? materialName(reference, id);
       const stage = at ? `, ${words.frame.stages[at] ?? at}` : '';
-      return line(name + stage, before, after, words.frame.grams);
+      return line(name + stage, before, after, 'g');
     }),
     ...change.shares.map(({ id, before, after }) =>
       line(text.share(materialName(reference, id)), before, after, words.frame.percent),

@@ -2,6 +2,7 @@ import { dilutionWater } from '../chemistry/dilution.ts';
 import { fraction, grams } from '../chemistry/quantity.ts';
 import type { FormulaDocument } from '../formulary/document.ts';
 import { words } from '../words/catalogue.ts';
+import { tableBasis } from '../words/measures.ts';
 
 /** Soap contents that the table is made for. [%] */
 const TARGETS = [40, 35, 30, 25, 20, 15] as const;
@@ -11,17 +12,17 @@ const WEIGHED = [1, 0.95, 0.9, 0.85] as const;
 export interface DilutionTable {
   /** Per column: how heavy the paste was found, and the soap content that this gives. */
   readonly columns: readonly { readonly name: string; readonly content: string }[];
-  /** Per soap content wanted: the water for 1000 g of paste, `null` where the paste is not stronger. */
+  /** Per soap content wanted: the water for the basis of the table, `null` where the paste is not stronger. */
   readonly rows: readonly {
     readonly target: string;
     readonly water: readonly (string | null)[];
   }[];
-  /** What the formula adds at dilution, g per 1000 g of paste by theory; 0 for nothing. */
+  /** What the formula adds at dilution, for the basis of the table in paste by theory; 0 for nothing. */
   readonly joins: number;
 }
 
 /**
- * Water for 1000 g of paste by the paste as weighed; `null` for bars. Theory is the balance: dry soap over
+ * Water for 1000 g of paste, or a pound, by the paste as weighed; `null` for bars. Theory is the balance: dry soap over
  * everything that went in before dilution. What joins at dilution counts as part of the water's mass.
  */
 export function dilutionTable(document: FormulaDocument): DilutionTable | null {
@@ -37,11 +38,11 @@ export function dilutionTable(document: FormulaDocument): DilutionTable | null {
     rows: TARGETS.map((target) => ({
       target: text.percent(target),
       water: contents.map((content) => {
-        const water = dilutionWater(grams(1000), fraction(content), fraction(target / 100));
+        const water = dilutionWater(grams(tableBasis()), fraction(content), fraction(target / 100));
         return water.ok ? text.grams(water.value) : null;
       }),
     })).filter(({ water }) => water.some((each) => each !== null)),
-    joins: (1000 * joiningAtDilution(document)) / paste,
+    joins: (tableBasis() * joiningAtDilution(document)) / paste,
   };
 }
 

@@ -16,7 +16,7 @@ export function lyeHeatRows(
   reference: Reference,
 ): readonly LyeHeatRow[] {
   const { lye } = document;
-  const { rows, celsius, percent, noNumber, tableEnds } = words.lyeHeatWords;
+  const { rows, celsius, kelvin, percent, noNumber, tableEnds } = words.lyeHeatWords;
   const [coolest] = lye.peakTemperatureSpread ?? [null];
   const peak = lye.peakTemperature;
   const allWater = lye.peakWithAllWater;
@@ -28,7 +28,7 @@ export function lyeHeatRows(
     { name: rows.peak, value: peak === null ? noNumber : celsius(peak) },
     ...optional(rows.coolest, coolest, celsius),
     ...optional(rows.allWater, allWater, celsius),
-    ...optional(rows.extra, peak === null || allWater === null ? null : peak - allWater, celsius),
+    ...optional(rows.extra, peak === null || allWater === null ? null : peak - allWater, kelvin),
     ...optional(rows.boiling, lye.boilingPoint, celsius),
     ...optional(rows.saturationAtStart, lye.saturation.atStart, percent),
     ...optional(rows.saturationAtPeak, lye.saturation.atPeak, percent),

@@ -1,7 +1,7 @@
 import type { BatchDocument, FormulaDocument } from '../formulary/document.ts';
 import type { Formulary } from '../formulary/formulary.ts';
 import { words } from '../words/catalogue.ts';
-import { decimalsOf, weight } from '../words/numbers.ts';
+import { stepDecimals, weight } from '../words/measures.ts';
 import { nameOf } from './names.ts';
 import { alkaliName } from './weights.ts';
 
@@ -80,7 +80,7 @@ export function lyeTable({ reference, formulas }: Formulary, batchId: string): L
       .map(({ id }) => words.formulaPage.stockNote(nameOf(reference, id))),
     hasHeldBack: rows.some(({ heldBack }) => heldBack !== null),
     hasAlso: rows.some(({ also }) => also.length > 0),
-    decimals: Math.max(0, ...steps.map(decimalsOf)),
+    decimals: Math.max(0, ...steps.map(stepDecimals)),
     rows,
   };
 }

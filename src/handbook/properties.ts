@@ -1,5 +1,6 @@
 import type { FormulaDocument } from '../formulary/document.ts';
 import { words } from '../words/catalogue.ts';
+import { degrees, degreeUnit } from '../words/measures.ts';
 import { fixed } from '../words/numbers.ts';
 
 export interface PropertyRow {
@@ -36,7 +37,14 @@ export function propertyRows(document: FormulaDocument): readonly PropertyRow[] 
   const rows = [
     row(names.superfat, superfat.written, 1, units.percent, 'alkali'),
     row(names.lyeConcentration, lye.concentration, 1, units.percent, 'water'),
-    row(names.lyePeak, lye.peakTemperature, 0, units.celsius, 'lye-heat', 'lye.peakTemperature'),
+    row(
+      names.lyePeak,
+      lye.peakTemperature === null ? null : degrees(lye.peakTemperature),
+      0,
+      degreeUnit(),
+      'lye-heat',
+      'lye.peakTemperature',
+    ),
     row(
       names.saponificationValue,
       profile?.saponificationValue ?? null,

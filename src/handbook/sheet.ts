@@ -4,7 +4,7 @@ import type { Formula } from '../formulary/formula.ts';
 import type { ComputedFormula } from '../formulary/formulary.ts';
 import type { Reference } from '../reference/reference.ts';
 import { words } from '../words/catalogue.ts';
-import { decimalsOf, plain, weight } from '../words/numbers.ts';
+import { stepDigits, weight } from '../words/measures.ts';
 import { lyeMass } from './amounts.ts';
 import { gravestFirst } from './cautions.ts';
 import { nameOf } from './names.ts';
@@ -93,7 +93,7 @@ function scaleTexts({ steps }: WeightsTable, { id }: BatchDocument, { shop }: Re
   return shop.scales
     .filter((each) => [size?.scale, size?.fineScale].includes(each.id))
     .filter(({ step }) => steps.includes(step))
-    .map(({ name, step }) => scale(name, plain(step)))
+    .map(({ name, step }) => scale(name, stepDigits(step)))
     .join('; ');
 }
 
@@ -112,7 +112,7 @@ function sumsText(batch: BatchDocument): string {
   return words.sheetWords.weigh.sums(
     weight(lye, step),
     weight(batch.massOfFats ?? 0, fatStep),
-    weight(batch.total ?? 0, decimalsOf(allStep) > 0 ? allStep : 1),
+    weight(batch.total ?? 0, allStep),
   );
 }
 

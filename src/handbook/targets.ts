@@ -1,6 +1,7 @@
 import type { Formula } from '../formulary/formula.ts';
 import { words } from '../words/catalogue.ts';
-import { plain, range } from '../words/numbers.ts';
+import { degrees, degreeUnit } from '../words/measures.ts';
+import { fromTo, plain, range } from '../words/numbers.ts';
 
 export interface TargetRow {
   readonly id: string;
@@ -10,8 +11,10 @@ export interface TargetRow {
 
 /** `35 to 40 °C`, with spaces that do not break. */
 export function targetText({ min, max, unit }: Formula['targets'][string]): string {
-  const ends = min === max ? plain(min, 1) : `${plain(min, 1)} to ${plain(max, 1)}`;
-  return `${ends}\u00a0${words.formulaPage.targets.units[unit]}`;
+  const isTemperature = unit === 'C';
+  const shown = (value: number) => plain(isTemperature ? degrees(value) : value, 1);
+  const of = isTemperature ? degreeUnit() : words.formulaPage.targets.units[unit];
+  return `${fromTo(shown(min), shown(max))}\u00a0${of}`;
 }
 
 /** What to aim at while making, in the order of the file. */

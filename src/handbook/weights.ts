@@ -1,14 +1,14 @@
 import type { BatchDocument, FormulaDocument } from '../formulary/document.ts';
 import type { Reference } from '../reference/reference.ts';
 import { words } from '../words/catalogue.ts';
-import { decimalsOf, weight } from '../words/numbers.ts';
+import { stepDecimals, weight } from '../words/measures.ts';
 import { nameOf } from './names.ts';
 
 /** One thing to weigh, as it is printed. */
 export interface WeightLine {
   readonly id: string;
   readonly name: string;
-  /** To the scale's step, without unit. */
+  /** To the scale's step, without the unit that it ends in. */
   readonly text: string;
   /** Lot that the weight was reckoned for, where a lot decides; of a blend the lots of its parts. */
   readonly lot: string | null;
@@ -89,7 +89,7 @@ export function weightsTable(
       if (group.length === 0) return [];
       return [{ name, title: words.formulaPage.batch.groups[name] ?? name, lines: group }];
     }),
-    decimals: Math.max(0, ...[...steps].map(decimalsOf)),
+    decimals: Math.max(0, ...[...steps].map(stepDecimals)),
     steps: [...steps].sort((a, b) => a - b),
     notes: [
       ...batch.alkali.flatMap(({ id }) =>

@@ -2,6 +2,7 @@ import type { FormulaDocument } from '../formulary/document.ts';
 import { dayAfter } from '../formulary/schedule.ts';
 import type { Reference } from '../reference/reference.ts';
 import { words } from '../words/catalogue.ts';
+import { tableBasis } from '../words/measures.ts';
 import { wetMassesOf } from './batch-yields.ts';
 import { sourceName } from './names.ts';
 
@@ -12,9 +13,13 @@ export interface YieldRow {
   readonly released: string | null;
 }
 
-/** What 1000 g of fats give, fresh and at the release moisture. */
+/** What the basis of the table gives (1000 g of fats, or a pound), fresh and at the release moisture. */
 export function yieldRows(document: FormulaDocument): readonly YieldRow[] {
-  const { measures, grams, gramsAndShare, percent } = words.yieldWords;
+  const { measures, percent } = words.yieldWords;
+  const ofBasis = tableBasis() / 1000;
+  const grams = (mass: number) => words.yieldWords.grams(mass * ofBasis);
+  const gramsAndShare = (mass: number, share: number) =>
+    words.yieldWords.gramsAndShare(mass * ofBasis, share);
   const given = document.yield;
   const dries = document.kind === 'bar';
   const part = (name: string, mass: number): YieldRow => ({

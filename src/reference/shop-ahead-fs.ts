@@ -7,6 +7,8 @@ export interface ShopAhead {
   readonly asOf: string | null;
   /** BCP 47 tag. */
   readonly locale: string | null;
+  /** `metric` or `us`. */
+  readonly weights: string | null;
 }
 
 /** From `shop.yaml` of a data folder; a setting that is absent, or in a broken file, is `null`. */
@@ -17,5 +19,5 @@ export function shopAhead(dataFolder: string): ShopAhead {
     const value = (shop as Readonly<Record<string, unknown>> | null)?.[key];
     return typeof value === 'string' ? value : null;
   };
-  return { asOf: setting('as-of'), locale: setting('locale') };
+  return { asOf: setting('as-of'), locale: setting('locale'), weights: setting('weights') };
 }

@@ -1,4 +1,5 @@
 import type { Grams } from '../chemistry/quantity.ts';
+import type { UnitSystem } from '../words/units.ts';
 
 export interface Scale {
   readonly id: string;
@@ -34,6 +35,8 @@ export interface BatchSize {
 export interface Shop {
   readonly name: string;
   readonly invented: boolean;
+  /** What its scales show and its sheets print. */
+  readonly units: UnitSystem;
   /** Where the handbook is served, with a slash at its end; `null` where it has no address. */
   readonly siteAddress: string | null;
   readonly batches: readonly BatchSize[];

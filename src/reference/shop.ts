@@ -1,6 +1,8 @@
 import { grams } from '../chemistry/quantity.ts';
+import type { UnitSystem } from '../words/units.ts';
 import { didYouMean } from './nearest.ts';
 import type { DataReport } from './report.ts';
+import type { Written } from './schema/measure.ts';
 import type { RawShop } from './schema/shop.ts';
 import type { BatchSize, Shop } from './shop-records.ts';
 
@@ -11,12 +13,14 @@ const ALL_FATS = 'fats';
 export function shopFrom(raw: RawShop, report: DataReport): Shop {
   reportRepeated(raw.batches, 'batches', report);
   reportRepeated(raw.scales, 'scales', report);
+  const units = raw.weights ?? 'metric';
+  reportOtherUnits(raw.scales, units, report);
   const scales = raw.scales.map(({ id, name, step, error, capacity }) => ({
     id,
     name,
-    step: grams(step),
-    error: grams(error),
-    capacity: grams(capacity),
+    step: wholeGrams(step),
+    error: wholeGrams(error),
+    capacity: wholeGrams(capacity),
   }));
   const known = scales.map(({ id }) => id);
   const batches = raw.batches.map((batch, index): BatchSize => {
@@ -51,6 +55,7 @@ export function shopFrom(raw: RawShop, report: DataReport): Shop {
   return {
     name: raw.name,
     invented: raw.invented ?? false,
+    units,
     siteAddress: raw['site-address']?.replace(/\/*$/, '/') ?? null,
     batches,
     scales,
@@ -62,6 +67,26 @@ export function shopFrom(raw: RawShop, report: DataReport): Shop {
     rules: raw.rules ?? [],
     releaseLimits: raw['release-limits'],
   };
+}
+
+/** A tenth of an ounce times its factor is 2.8349523125 and not the next number that binary has above it. */
+const wholeGrams = ({ value }: Written) => grams(Number(value.toPrecision(14)));
+
+const UNITS_OF = { metric: 'g or kg', us: 'oz or lb' } as const;
+
+/** What a scale shows is what a sheet prints, and a sheet has one unit. */
+function reportOtherUnits(scales: RawShop['scales'], units: UnitSystem, report: DataReport): void {
+  scales.forEach((scale, index) => {
+    for (const key of ['step', 'error', 'capacity'] as const) {
+      const { system } = scale[key];
+      if (system === units) continue;
+      report.in(['scales', index, key], 'data/scale-units', {
+        found: `the ${key} of scale "${scale.id}" in ${UNITS_OF[system]}, in a shop that weighs in ${UNITS_OF[units]}`,
+        expected: UNITS_OF[units],
+        advice: `state what the scale shows in the shop's units, or set "weights: ${system}"`,
+      });
+    }
+  });
 }
 
 /** The schema has seen to it that exactly one way is stated. */

@@ -9,9 +9,6 @@ export function decimalsOf(step: number): number {
   return text.split('.')[1]?.length ?? 0;
 }
 
-/** A weight to its scale's step, without unit: `139.6`. [g] */
-export const weight = (mass: number, step: number): string => fixed(mass, decimalsOf(step));
-
 /** A number to a fixed count of decimals; a value that rounds to nothing has no sign. */
 export function fixed(value: number, decimals: number): string {
   const digits = Math.abs(value).toFixed(decimals);
@@ -21,9 +18,6 @@ export function fixed(value: number, decimals: number): string {
 
 /** A number written with a point, as the shop's locale writes it. */
 export const withDecimalSign = (text: string): string => text.replace('.', voice().decimalSign);
-
-/** Kilograms to the gram, for totals only: `2.431`. Takes grams. */
-export const kilograms = (grams: number): string => fixed(grams / 1000, 3);
 
 /** A number with no more decimals than it has, at most `decimals`: 5 -> `5`, 5.25 -> `5.25`. */
 export function plain(value: number, decimals = 3): string {
@@ -35,9 +29,14 @@ export function plain(value: number, decimals = 3): string {
 
 /** `184 to 196`; one number where both ends are shown alike. */
 export function range(low: number, high: number, decimals: number): string {
-  const [a, b] = [fixed(low, decimals), fixed(high, decimals)];
-  return a === b ? a : `${a} to ${b}`;
+  return fromTo(fixed(low, decimals), fixed(high, decimals));
 }
+
+/** Two shown numbers as a range in the words' language; one where they are alike. */
+export const fromTo = (from: string, to: string): string =>
+  from === to ? from : `${from} ${TO[voice().language]} ${to}`;
+
+const TO = { en: 'to', es: 'a' } as const;
 
 /** The part before the decimal sign and the rest with it, so that a column can align on the sign. */
 export function splitAtPoint(text: string): readonly [string, string] {

@@ -14,7 +14,9 @@ test.each([
   ['42 d', { min: 42, max: 42, unit: 'd' }],
   ['90 min', { min: 90, max: 90, unit: 'min' }],
   ['38', null],
-  ['100 F', null],
+  ['86 F', { min: 30, max: 30, unit: 'C' }],
+  ['95-104°F', { min: 35, max: 40, unit: 'C' }],
+  ['100 K', null],
   ['about 38 C', null],
   ['1e2 C', null],
 ])('target %s', (text, target) => {

@@ -107,6 +107,10 @@ export const BROKEN: readonly {
     files: withChange('lots.yaml', 'alkali: sodium-hydroxide', 'alkali: sodium-hydroxid'),
   },
   {
+    rule: 'data/scale-units',
+    files: withChange('shop.yaml', 'name: Test shop', 'name: Test shop\nweights: us'),
+  },
+  {
     rule: 'data/unknown-scale',
     files: withChange('shop.yaml', 'fine-scale: fine', 'fine-scale: fin'),
   },

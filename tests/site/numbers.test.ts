@@ -1,13 +1,6 @@
 import { expect, test } from 'vitest';
-import {
-  decimalsOf,
-  fixed,
-  kilograms,
-  plain,
-  range,
-  splitAtPoint,
-  weight,
-} from '../../src/words/numbers.ts';
+import { totalMass, weight } from '../../src/words/measures.ts';
+import { decimalsOf, fixed, plain, range, splitAtPoint } from '../../src/words/numbers.ts';
 
 test.each([
   [5, 0],
@@ -24,7 +17,7 @@ test('weights show the step of the scale and never group digits', () => {
   expect(weight(139.7, 0.1)).toBe('139.7');
   expect(weight(450, 0.1)).toBe('450.0');
   expect(weight(12345, 5)).toBe('12345');
-  expect(kilograms(12345.6)).toBe('12.346');
+  expect(totalMass(12345.6)).toBe('12.346 kg');
 });
 
 test('negative numbers have a true minus sign, and nothing has no sign', () => {

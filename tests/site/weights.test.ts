@@ -72,7 +72,7 @@ test('a refused size has its reason and no weight anywhere', () => {
   expect(row).toMatchObject({ alkali: [null], water: null, heldBack: null, also: [] });
   expect(row?.refused).toContain('round to nothing');
   expect(lyeCsv(formulary(REFUSED), 'pilot').trimEnd().split('\r\n')[1]).toBe(
-    'TT-001,Test Bar,2,pilot,,,,weight-below-scale-step',
+    'TT-001,Test Bar,2,pilot,,,,,weight-below-scale-step',
   );
 });
 

@@ -1,7 +1,8 @@
 import { afterEach, describe, expect, test } from 'vitest';
 import { speak } from '../../src/words/catalogue.ts';
 import { dateText, monthText } from '../../src/words/dates.ts';
-import { fixed, plain, range, splitAtPoint, weight } from '../../src/words/numbers.ts';
+import { weight } from '../../src/words/measures.ts';
+import { fixed, plain, range, splitAtPoint } from '../../src/words/numbers.ts';
 import { voice } from '../../src/words/voice.ts';
 
 // decimal signs and forms of dates are those of the Unicode CLDR, which Node brings

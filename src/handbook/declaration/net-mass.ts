@@ -1,8 +1,6 @@
 import type { FormulaDocument } from '../../formulary/document.ts';
 import type { Shop } from '../../reference/shop-records.ts';
-
-/** One avoirdupois ounce. [g] Exact by the international yard and pound agreement of 1959. */
-const OUNCE = 28.349523125;
+import { OUNCE } from '../../words/units.ts';
 
 export interface NetMass {
   readonly label: string;

@@ -2,6 +2,7 @@ import { type FatWeighing, fatWeighings } from '../../chemistry/blend.ts';
 import { isBeforeSaponification } from '../../chemistry/saponification.ts';
 import { AS_USED, equivalentsOf, superfatFrom } from '../../chemistry/superfat.ts';
 import { weighBatch } from '../../formulary/compute-batch.ts';
+import { expectedMass, weighed as onPaper } from '../../words/measures.ts';
 import { superfatStep } from './check.ts';
 import { named, type Working } from './context.ts';
 import { molarMassTerm } from './molar-masses.ts';
@@ -39,6 +40,7 @@ export function batches(working: Working): readonly Section[] {
         value: mass,
         digits: 9,
         unit: 'g',
+        printed: onPaper(mass, size),
       });
     const onScales = fatWeighings(rounded.fats);
     /** What each part of a blend is of the weight of the blend; nothing for a fat by itself. */
@@ -96,6 +98,7 @@ export function batches(working: Working): readonly Section[] {
         numbers: figure(fats),
         value: fats,
         unit: 'g',
+        printed: expectedMass(fats),
       }),
       ...fatWeighings(charge.fats).flatMap((weighing, i) => [
         scaled('exact-weight', weighing.id, named(working, weighing.id), weighing.mass),

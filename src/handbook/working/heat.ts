@@ -1,6 +1,7 @@
 import { interpolate } from '../../chemistry/interpolate.ts';
 import { lyeOf } from '../../chemistry/lye.ts';
 import { HEAT_OF_NEUTRALISATION } from '../../chemistry/lye-heat.ts';
+import { temperature } from '../../words/measures.ts';
 import type { Working } from './context.ts';
 import { molarMassTerm } from './molar-masses.ts';
 import { type Section, step } from './step.ts';
@@ -97,6 +98,7 @@ export function heat(working: Working): Section | null {
         value: peak,
         digits: 5,
         unit: '°C',
+        printed: temperature(peak),
       }),
     ],
   };

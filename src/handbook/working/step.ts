@@ -1,4 +1,5 @@
 import type { workingWords } from '../../words/en/working.ts';
+import { voice } from '../../words/voice.ts';
 import { evaluate, figure, type Term } from './term.ts';
 
 /** One line of the working: what it is, the equation in symbols, with its numbers, and the result. */
@@ -14,6 +15,8 @@ export interface Step {
   readonly numbers: Term;
   readonly result: Term;
   readonly unit: string;
+  /** The result as the shop's sheets print it, where they print it in another unit. */
+  readonly printed: string | null;
   /** Materials or pieces that the line is about, as names for people. */
   readonly subject: string | null;
   /** Where the numbers that were looked up come from, in words. */
@@ -49,6 +52,7 @@ export function step(parts: {
   readonly value: number;
   readonly digits?: number;
   readonly unit: string;
+  readonly printed?: string;
   readonly subject?: string;
   readonly sources?: readonly string[];
   /** Absolute allowance for results near zero, in the unit of the result. */
@@ -70,6 +74,7 @@ export function step(parts: {
     numbers: parts.numbers,
     result,
     unit: parts.unit,
+    printed: parts.printed && voice().units === 'us' ? parts.printed : null,
     subject: parts.subject ?? null,
     sources: parts.sources ?? [],
   };

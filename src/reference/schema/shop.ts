@@ -1,9 +1,10 @@
 import { z } from 'zod';
 import { LANGUAGES } from '../../words/languages.ts';
+import { UNIT_SYSTEMS } from '../../words/units.ts';
 import { voiceOf } from '../../words/voice.ts';
 import { whatIsWrongWith } from '../ids.ts';
 import { date } from './date.ts';
-import { measure } from './measure.ts';
+import { measure, writtenMeasure } from './measure.ts';
 import { broken, line } from './value.ts';
 
 const id = z.string().superRefine((text, context) => {
@@ -110,6 +111,7 @@ export const shopSchema = z
     invented: z.boolean().optional(),
     'as-of': date.optional(),
     locale: locale.optional(),
+    weights: z.enum(UNIT_SYSTEMS).optional(),
     'site-address': siteAddress.optional(),
     batches: z.array(batch).min(1),
     scales: z
@@ -117,9 +119,9 @@ export const shopSchema = z
         z.strictObject({
           id,
           name: line,
-          step: measure('mass', 0.001, 1000),
-          error: measure('mass', 0, 1000),
-          capacity: measure('mass', 1, 5_000_000),
+          step: writtenMeasure('mass', 0.001, 1000),
+          error: writtenMeasure('mass', 0, 1000),
+          capacity: writtenMeasure('mass', 1, 5_000_000),
         }),
       )
       .min(1),

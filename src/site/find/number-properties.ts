@@ -1,6 +1,7 @@
 import type { ComputedFormula } from '../../formulary/formulary.ts';
 import { dayOf } from '../../search/finder/finder-data.ts';
 import type { FindProperty, findWords } from '../../words/en/find.ts';
+import { degrees } from '../../words/measures.ts';
 
 type Group = keyof typeof findWords.groups;
 
@@ -58,7 +59,9 @@ export const NUMBER_PROPERTIES: readonly NumberProperty[] = [
   fats('polyunsaturated', 1, ({ profile }) => profile?.polyunsaturated ?? null),
   lye('lye-concentration', 1, (document) => document.lye.concentration),
   lye('lye-as-made', 1, (document) => document.lye.asMade),
-  lye('lye-temperature', 0, (document) => document.lye.peakTemperature),
+  lye('lye-temperature', 0, ({ lye: { peakTemperature: peak } }) =>
+    peak === null ? null : degrees(peak),
+  ),
   soap('tfm-fresh', 1, (document) => document.yield.totalFattyMatter.fresh),
   soap('tfm-released', 1, (document) =>
     document.kind === 'bar' ? document.yield.totalFattyMatter.released : null,

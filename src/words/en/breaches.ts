@@ -1,3 +1,4 @@
+import { expectedMass } from '../measures.ts';
 import { fixed, plain } from '../numbers.ts';
 
 type Numbers = Readonly<Record<string, number>>;
@@ -14,7 +15,7 @@ const reasons: Readonly<Record<string, (numbers: Numbers) => string>> = {
   'weight-below-scale-step': () =>
     'One of the weights is smaller than half a step of the scale and would round to nothing.',
   'weight-above-scale-capacity': (n) =>
-    `One of the weights would be ${of(n, 'mass', 0)} g, more than the ${of(n, 'capacity', 0)} g that the scale takes.`,
+    `One of the weights would be ${expectedMass(n.mass ?? Number.NaN)}, more than the ${expectedMass(n.capacity ?? Number.NaN)} that the scale takes.`,
   'nothing-sure-to-saponify': () =>
     'With every error against us nothing is left in the pot that is sure to use up the alkali.',
   'scale-not-known': () => 'The shop’s data name no scale for this size.',

@@ -1,4 +1,5 @@
 import { dateText } from '../dates.ts';
+import { statedTemperature, temperature } from '../measures.ts';
 import { fixed, plain } from '../numbers.ts';
 
 const STRONG_LYE =
@@ -7,11 +8,11 @@ const STRONG_LYE =
 /** Cautions about the lye and its alkali. */
 export const lyeCautions = {
   'lye-heat-near-boiling': (n: { peak: number; boiling: number; margin: number }) => ({
-    text: `Made in one go, this lye can heat itself to ${fixed(n.peak, 0)} °C. It boils at ${fixed(n.boiling, 0)} °C.`,
+    text: `Made in one go, this lye can heat itself to ${temperature(n.peak)}. It boils at ${temperature(n.boiling)}.`,
     action: STRONG_LYE,
   }),
   'lye-hot': (n: { peak: number; limit: number }) => ({
-    text: `Made in one go, this lye can heat itself to ${fixed(n.peak, 0)} °C, hotter than many plastics bear.`,
+    text: `Made in one go, this lye can heat itself to ${temperature(n.peak)}, hotter than many plastics bear.`,
     action: `Use a steel jug. ${STRONG_LYE}`,
   }),
   'lye-heat-unknown': (n: { asMade: number; potassium: number }) => ({
@@ -29,14 +30,14 @@ export const lyeCautions = {
     temperature: number;
     margin: number;
   }) => ({
-    text: `The lye holds ${fixed(n.percent, 1)} % of hydroxide; at ${plain(n.temperature, 1)} °C no more than ${fixed(n.saturation, 1)} % dissolves.`,
+    text: `The lye holds ${fixed(n.percent, 1)} % of hydroxide; at ${statedTemperature(n.temperature)} no more than ${fixed(n.saturation, 1)} % dissolves.`,
     action:
       'Stir until it is clear, do not let it go cold, and look for grains before pouring: each one is a caustic spot in the soap.',
   }),
   'potassium-lye': (n: { potassium: number }) => ({
     text: `${fixed(n.potassium, 0)} % of the hydroxide is potassium hydroxide. It draws water from the air within minutes and spits when it meets water.`,
     action:
-      'Read the label twice: the two alkalis never stand in for each other gram for gram. Weigh fast, close the bag, face away from the jug.',
+      'Read the label twice: the two alkalis never stand in for each other weight for weight. Weigh fast, close the bag, face away from the jug.',
   }),
   'stock-lye': (n: { name: string; lot: string; assay: number }) => ({
     text: `${n.name}, lot ${n.lot}, is a stock lye of ${fixed(n.assay, 1)} %: caustic as it stands, and cold makes crystals in it that leave the rest weaker.`,
@@ -50,7 +51,7 @@ export const lyeCautions = {
     crystals: number;
     how: string;
   }) => ({
-    text: `${n.name}, lot ${n.lot}, at ${fixed(n.assay, 1)} % begins to crystallise at about ${fixed(n.crystals, 0)} °C (${n.how}).`,
+    text: `${n.name}, lot ${n.lot}, at ${fixed(n.assay, 1)} % begins to crystallise at about ${temperature(n.crystals)} (${n.how}).`,
     action:
       'Keep it warmer than that, on the way here too. If it has been colder, look for crystals, and weigh none of it until it is whole again.',
   }),

@@ -1,3 +1,4 @@
+import { largeMass, statedVolume, temperature, volume } from '../measures.ts';
 import { fixed, plain } from '../numbers.ts';
 
 /** Cautions about the bench: sizes, vessels, and how the batter behaves. */
@@ -14,11 +15,11 @@ export const workCautions = {
     fill: number;
     limit: number;
   }) => ({
-    text: `The size ${n.batch} is about ${fixed(n.litres, 1)} L of batter: ${fixed(n.fill, 0)} % of its ${plain(n.vessel, 1)} L vessel, where ${plain(n.limit)} % is the most.`,
+    text: `The size ${n.batch} is about ${volume(n.litres * 1000)} of batter: ${fixed(n.fill, 0)} % of its ${statedVolume(n.vessel * 1000)} vessel, where ${plain(n.limit)} % is the most.`,
     action: 'Take a larger vessel or a smaller size. Hot caustic soap that runs over burns.',
   }),
   'batch-above-heat-limit': (n: { batch: string; fats: number; limit: number }) => ({
-    text: `The size ${n.batch} pours ${plain(n.fats, 2)} kg of fats at once; the shop’s limit for its heat is ${plain(n.limit, 2)} kg.`,
+    text: `The size ${n.batch} pours ${largeMass(n.fats * 1000)} of fats at once; the shop’s limit for its heat is ${largeMass(n.limit * 1000)}.`,
     action:
       'Take a smaller size or several moulds apart from each other. A block that cannot lose its heat cracks, boils up and runs over.',
   }),
@@ -76,7 +77,7 @@ export const workCautions = {
     flashPoint: number;
     margin: number;
   }) => ({
-    text: `${n.materials} has its flash point at ${fixed(n.flashPoint, 0)} °C, and this soap is worked at up to ${fixed(n.hottest, 0)} °C.`,
+    text: `${n.materials} has its flash point at ${temperature(n.flashPoint)}, and this soap is worked at up to ${temperature(n.hottest)}.`,
     action:
       'No flame and no glowing plate in the room. Let the soap cool before the fragrance goes in.',
   }),

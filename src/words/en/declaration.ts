@@ -1,3 +1,4 @@
+import { statedMass } from '../measures.ts';
 import { fixed, plain } from '../numbers.ts';
 
 export const declaration = {
@@ -39,7 +40,7 @@ export const declaration = {
     `No supplier’s figures in the data for: ${names.join('; ')}. Take the names from the supplier’s allergen declaration; without it the list is not complete.`,
   netMassTitle: 'Net mass',
   netMass: (label: string, wet: number, released: number, moisture: number, ounces: number) =>
-    `${label}: a bar poured at ${plain(wet)} g is reckoned at ${fixed(released, 1)} g (${fixed(ounces, 2)} oz) when dried to ${plain(moisture, 1)} % water. It goes on drying: declare no more than the lightest bar weighs on the day of sale.`,
+    `${label}: a bar poured at ${statedMass(wet)} is reckoned at ${fixed(released, 1)} g (${fixed(ounces, 2)} oz) when dried to ${plain(moisture, 1)} % water. It goes on drying: declare no more than the lightest bar weighs on the day of sale.`,
   netMassUnknown: 'Of what is filled by hand: declare what the scale shows.',
   namesBasis:
     'INCI names and names for the United States: from memory, not checked against the dictionary. Order of the list: Regulation (EC) 1223/2009, article 19, and 21 CFR 701.3, both from memory. In the United States a product that is soap and nothing else by 21 CFR 701.20 needs no list.',

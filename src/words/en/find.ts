@@ -1,4 +1,5 @@
 import { dateText } from '../dates.ts';
+import { degreeUnit } from '../measures.ts';
 import { plain } from '../numbers.ts';
 
 /** What is looked for by number: name and unit of each property, under its head. */
@@ -16,7 +17,9 @@ const properties = {
   polyunsaturated: ['Polyunsaturated acids', '%'],
   'lye-concentration': ['Lye concentration', '%'],
   'lye-as-made': ['Lye concentration in the pot', '%'],
-  'lye-temperature': ['Lye temperature, no heat lost', '°C'],
+  get 'lye-temperature'(): readonly [string, string] {
+    return ['Lye temperature, no heat lost', degreeUnit()];
+  },
   'tfm-fresh': ['Total fatty matter, fresh', '%'],
   'tfm-released': ['Total fatty matter, at release', '%'],
   'glycerol-fresh': ['Glycerol, fresh', '%'],

@@ -1,5 +1,6 @@
 import { dateText } from '../dates.ts';
-import { fixed, kilograms, plain } from '../numbers.ts';
+import { stepText, totalMass } from '../measures.ts';
+import { fixed, plain } from '../numbers.ts';
 
 export const formulaPage = {
   revision: (n: number) => `Revision ${n}`,
@@ -36,7 +37,7 @@ export const formulaPage = {
     water: 'Water',
     waterBesideStock: 'Water, besides the solution',
     waterHeldBack: 'Water held back',
-    total: (grams: number) => `${kilograms(grams)} kg`,
+    total: (grams: number) => totalMass(grams),
     totalLabel: 'All together',
     bars: (n: number) => (n === 1 ? '1 bar' : `${n} bars`),
     superfatLabel: 'Superfat by these weights',
@@ -45,8 +46,8 @@ export const formulaPage = {
     lowest: (expanded: number) => `${fixed(expanded, 1)} %`,
     steps: (steps: readonly number[]) =>
       steps.length === 1
-        ? `Rounded to steps of ${plain(steps[0] ?? 0)} g.`
-        : `Rounded to steps of ${steps.map((step) => `${plain(step)} g`).join(' and ')}, as printed.`,
+        ? `Rounded to steps of ${stepText(steps[0] ?? 0)}.`
+        : `Rounded to steps of ${steps.map(stepText).join(' and ')}, as printed.`,
     digest: (digest: string) => `Weights ${digest}`,
     end: (label: string) => `End of ${label}`,
     refusedTitle: 'No weights at this size',
@@ -74,7 +75,7 @@ export const formulaPage = {
       cure: 'Cure',
       dilution: 'Dilution',
     } as Readonly<Record<string, string>>,
-    units: { C: '°C', h: 'h', d: 'd', min: 'min' },
+    units: { h: 'h', d: 'd', min: 'min' },
     freeAlkali: 'Free alkali, at most',
     freeAlkaliUnit: '% as NaOH',
     ph: 'pH',

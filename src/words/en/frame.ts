@@ -1,5 +1,5 @@
 import { dateText } from '../dates.ts';
-import { fixed, plain } from '../numbers.ts';
+import { statedMass, volume } from '../measures.ts';
 
 /** What stands around every page, and the small words that many pages share. */
 export const frame = {
@@ -16,7 +16,6 @@ export const frame = {
   proof: 'Proof edition, not for use: it holds formulas that are not approved.',
   invented: 'Demonstration: an invented workshop, not a formulary to work from.',
   foot: 'Not a substitute for the supplier’s safety data sheet, for local rules, or for a licensed practitioner’s advice. Those come first.',
-  grams: 'g',
   percent: '%',
   kinds: { bar: 'Bar', paste: 'Paste', liquid: 'Liquid' },
   processes: { cold: 'cold process', hot: 'hot process' },
@@ -29,10 +28,10 @@ export const frame = {
   } as Readonly<Record<string, string>>,
   severities: { danger: 'Danger', warning: 'Warning', care: 'Care', note: 'Note' },
   batchSize: {
-    fats: (grams: number) => `${plain(grams)} g of fats`,
-    batter: (grams: number) => `${plain(grams)} g of batter`,
-    bars: (count: number, grams: number) => `${count} bars of ${plain(grams)} g, poured weight`,
-    mould: (millilitres: number) => `mould of ${fixed(millilitres / 1000, 1)} L`,
+    fats: (grams: number) => `${statedMass(grams)} of fats`,
+    batter: (grams: number) => `${statedMass(grams)} of batter`,
+    bars: (count: number, grams: number) => `${count} bars of ${statedMass(grams)}, poured weight`,
+    mould: (millilitres: number) => `mould of ${volume(millilitres)}`,
   },
   how: {
     measured: 'measured',

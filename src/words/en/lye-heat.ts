@@ -1,3 +1,4 @@
+import { temperature, warming } from '../measures.ts';
 import { fixed } from '../numbers.ts';
 
 /** The heat of the lye on a formula's page. */
@@ -15,10 +16,12 @@ export const lyeHeatWords = {
     saturationAtStart: 'A saturated lye at the start temperature holds',
     saturationAtPeak: 'A saturated lye at the hottest holds',
   },
-  celsius: (value: number) => `${fixed(value, 0)} °C`,
+  celsius: (value: number) => temperature(value),
+  /** A difference. [K] */
+  kelvin: (value: number) => warming(value),
   percent: (value: number) => `${fixed(value, 1)} %`,
   noNumber: 'No number',
-  tableEnds: (celsius: number) => `not known: the table ends at ${fixed(celsius, 0)} °C`,
+  tableEnds: (celsius: number) => `not known: the table ends at ${temperature(celsius)}`,
   noLoss:
     'With no heat lost to jug and air. A real pot stays somewhat cooler; nothing here says by how much, so plan for the figure.',
   boils:

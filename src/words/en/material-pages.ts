@@ -1,4 +1,5 @@
-import { fixed, kilograms, plain } from '../numbers.ts';
+import { totalMass } from '../measures.ts';
+import { fixed, plain } from '../numbers.ts';
 
 type Named = Readonly<Record<string, string>>;
 
@@ -101,7 +102,7 @@ export const materialPages = {
   storageBasis: 'Common practice, no source. Retest dates stand with the lots.',
   notUsed: 'No formula uses it.',
   useColumns: { formula: 'Formula', share: 'Of the fats' },
-  kilograms: (grams: number) => `${kilograms(grams)} kg`,
+  kilograms: (grams: number) => totalMass(grams),
   share: (percent: number) => `${fixed(percent, 2)} %`,
   goneNone: 'Every formula can still be made.',
   cannot: (count: number, approved: number, all: number) =>

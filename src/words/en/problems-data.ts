@@ -27,6 +27,7 @@ export const DATA_PROBLEMS = {
   'data/unknown-acid': { title: 'A fatty acid that is not in the list' },
   'data/unknown-fat': { title: 'A fat that has no file' },
   'data/unknown-alkali': { title: 'An alkali that has no file' },
+  'data/scale-units': { title: 'A scale in units that the shop does not weigh in' },
   'data/unknown-scale': { title: 'A scale that the shop does not have' },
   'data/molecular-formula': { title: 'A molecular formula that cannot be computed' },
   'data/acid-form': { title: 'An acid whose name and formula disagree' },

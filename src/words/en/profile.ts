@@ -38,6 +38,5 @@ export const propertyUnits = {
   mgKohPerGram: 'mg KOH/g',
   iodine: 'g I₂/100 g',
   carbons: 'carbons',
-  celsius: '°C',
   none: 'no unit',
 } as const;

@@ -1,3 +1,4 @@
+import { temperature } from '../measures.ts';
 import { fixed } from '../numbers.ts';
 
 /** The safety page around its sections. Sentences without a code or a source are common practice. */
@@ -62,7 +63,7 @@ export const safetyPage = {
   careUnknown: 'Lye heat without a number: reckon with boiling',
   careLowest:
     'Lowest superfat, errors of the scales counted (a batch size is named where it lies lowest)',
-  celsius: (value: number) => `${fixed(value, 0)} °C`,
+  celsius: (value: number) => temperature(value),
   percent: (value: number) => `${fixed(value, 1)} %`,
   officialTitle: 'Official statements',
   workplaceTitle: 'Workplace limits',

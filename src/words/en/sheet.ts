@@ -1,7 +1,13 @@
 import { dateText } from '../dates.ts';
+import {
+  expectedMass,
+  massAtMost,
+  massUnit,
+  massUnits,
+  statedMass,
+  temperature,
+} from '../measures.ts';
 import { fixed, plain } from '../numbers.ts';
-
-const grams = (mass: number) => `${fixed(mass, 0)} g`;
 
 /** The bench sheet: what is read, ticked and written while one batch is made. */
 export const sheetWords = {
@@ -34,7 +40,7 @@ export const sheetWords = {
     lot: (lot: string, until: string) => `${lot}, retest by ${dateText(until)}`,
     noLot: '(any lot inside the published range)',
     scales: (scales: string) => `The scale is level and checked today: ${scales}.`,
-    scale: (name: string, step: string) => `${name}, steps of ${step} g`,
+    scale: (name: string, step: string) => `${name}, steps of ${step} ${massUnit()}`,
     checkWeight: 'Check weight / reading',
     ready: 'Goggles, gloves and apron are on, the tap runs, somebody else is in the building.',
     cautions: 'The cautions of this sheet are read.',
@@ -60,9 +66,11 @@ export const sheetWords = {
     afterCookLimit: (limit: string) => `Found / at most ${limit}`,
     afterCookNoLimit: 'Found / limit',
     paste: 'Weigh the paste first. What the scale shows counts, not the sum of what went in.',
-    pasteBlank: 'Paste, g',
+    get pasteBlank() {
+      return `Paste, ${massUnits()}`;
+    },
     sums: (lye: string, fats: string, all: string) =>
-      `In the lye pot ${lye} g. Fats ${fats} g. All together ${all} g.`,
+      `In the lye pot ${lye} ${massUnit()}. Fats ${fats} ${massUnit()}. All together ${all} ${massUnit()}.`,
     superfat: (weighed: number, lowest: number) =>
       `Superfat by these weights ${fixed(weighed, 2)} %, at the lowest ${fixed(lowest, 1)} %.`,
     doubt: 'In doubt whether a line was weighed: start that vessel again.',
@@ -70,9 +78,9 @@ export const sheetWords = {
   heat: {
     title: 'Heat of the lye',
     peak: (peak: number, start: number) =>
-      `Up to ${fixed(peak, 0)} °C from a start at ${fixed(start, 0)} °C, with no heat lost.`,
+      `Up to ${temperature(peak)} from a start at ${temperature(start)}, with no heat lost.`,
     boils: (boiling: number) =>
-      `It boils at about ${fixed(boiling, 0)} °C: add the alkali in small portions with cooling between them.`,
+      `It boils at about ${temperature(boiling)}: add the alkali in small portions with cooling between them.`,
     unknown: 'No number, and so the strongest caution: take it as boiling hot.',
   },
   readings: {
@@ -87,19 +95,19 @@ export const sheetWords = {
     rework: 'Rework added: batch, mass, agreed by',
     /** Cut off, never rounded up: it is the most. */
     reworkAtMost: (percent: number, mass: number) =>
-      `Rework added (at most ${plain(percent)} %, ${grams(Math.floor(mass))}): batch, mass, agreed by`,
+      `Rework added (at most ${plain(percent)} %, ${massAtMost(mass)}): batch, mass, agreed by`,
     portions: 'Batter split: portion, mass, what joined it',
   },
   yield: {
     title: 'Yield and days',
     expected: (poured: number, total: number) =>
-      `Expected in the moulds ${grams(poured)}; never more than the ${grams(total)} weighed in.`,
+      `Expected in the moulds ${expectedMass(poured)}; never more than the ${expectedMass(total)} weighed in.`,
     expectedVat: (poured: number, total: number) =>
-      `Expected in the vat ${grams(poured)}, less what boils off; never more than the ${grams(total)} weighed in.`,
+      `Expected in the vat ${expectedMass(poured)}, less what boils off; never more than the ${expectedMass(total)} weighed in.`,
     losses: (percent: number) =>
       `Losses of ${plain(percent, 1)} % are taken off. Less than expected: write why.`,
-    bars: (count: number, wetMass: number) => `${count} bars of ${plain(wetMass, 1)} g`,
-    released: (mass: number) => `${grams(mass)} at the release moisture.`,
+    bars: (count: number, wetMass: number) => `${count} bars of ${statedMass(wetMass, 1)}`,
+    released: (mass: number) => `${expectedMass(mass)} at the release moisture.`,
     actual: 'Actual mass',
     count: 'Bars good / lost',
     cut: (days: number) => `Cut not before making + ${plain(days)} d`,

@@ -1,4 +1,5 @@
-import { fixed, kilograms } from '../numbers.ts';
+import { totalMass } from '../measures.ts';
+import { fixed } from '../numbers.ts';
 
 export const shopping = {
   title: 'Shopping list',
@@ -23,7 +24,7 @@ export const shopping = {
   material: 'Material',
   weight: 'Weight',
   water: 'Water',
-  kilograms: (grams: number) => `${kilograms(grams)} kg`,
+  kilograms: (grams: number) => totalMass(grams),
   perBatch: 'What each batch takes',
   refused: 'No weights at any size.',
   formula: 'Formula',

@@ -5,6 +5,7 @@ export const workingWords = {
   back: 'Back to the formula',
   contents: 'On this page',
   sources: 'Source',
+  printed: (text: string) => `As printed: ${text}`,
   lookedUp: 'looked up',
   sections: {
     'molar-masses': 'Molar masses',
