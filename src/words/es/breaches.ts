@@ -1,4 +1,5 @@
 import type { breachText as english } from '../en/breaches.ts';
+import { expectedMass } from '../measures.ts';
 import { fixed, plain } from '../numbers.ts';
 
 type Numbers = Parameters<typeof english>[1];
@@ -15,7 +16,7 @@ const reasons: Readonly<Record<string, (numbers: Numbers) => string>> = {
   'weight-below-scale-step': () =>
     'Una de las pesadas es menor que medio escalón de la balanza y se redondearía a nada.',
   'weight-above-scale-capacity': (n) =>
-    `Una de las pesadas sería de ${of(n, 'mass', 0)} g, más de los ${of(n, 'capacity', 0)} g que admite la balanza.`,
+    `Una de las pesadas sería de ${expectedMass(n.mass ?? Number.NaN)}, más de los ${expectedMass(n.capacity ?? Number.NaN)} que admite la balanza.`,
   'nothing-sure-to-saponify': () =>
     'Con todos los errores en contra no queda en la olla nada que consuma con seguridad el álcali.',
   'scale-not-known': () => 'Los datos del taller no indican ninguna balanza para este tamaño.',

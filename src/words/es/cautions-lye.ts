@@ -1,5 +1,6 @@
 import { dateText } from '../dates.ts';
 import type { lyeCautions as english } from '../en/cautions-lye.ts';
+import { statedTemperature, temperature } from '../measures.ts';
 import { fixed, plain } from '../numbers.ts';
 import type { SameShape } from '../same-shape.ts';
 
@@ -9,11 +10,11 @@ const STRONG_LYE =
 /** Cautions about the lye and its alkali. */
 export const lyeCautions: SameShape<typeof english> = {
   'lye-heat-near-boiling': (n) => ({
-    text: `Hecha de una sola vez, esta solución alcalina puede calentarse por sí sola hasta ${fixed(n.peak, 0)} °C. Hierve a ${fixed(n.boiling, 0)} °C.`,
+    text: `Hecha de una sola vez, esta solución alcalina puede calentarse por sí sola hasta ${temperature(n.peak)}. Hierve a ${temperature(n.boiling)}.`,
     action: STRONG_LYE,
   }),
   'lye-hot': (n) => ({
-    text: `Hecha de una sola vez, esta solución alcalina puede calentarse por sí sola hasta ${fixed(n.peak, 0)} °C, más de lo que resisten muchos plásticos.`,
+    text: `Hecha de una sola vez, esta solución alcalina puede calentarse por sí sola hasta ${temperature(n.peak)}, más de lo que resisten muchos plásticos.`,
     action: `Use una jarra de acero. ${STRONG_LYE}`,
   }),
   'lye-heat-unknown': (n) => ({
@@ -26,14 +27,14 @@ export const lyeCautions: SameShape<typeof english> = {
       'Pese el agua de la jarra según su propia línea. Enfríe la jarra y mantenga el resto del agua lejos de ella.',
   }),
   'lye-near-saturation': (n) => ({
-    text: `La solución alcalina contiene ${fixed(n.percent, 1)} % de hidróxido; a ${plain(n.temperature, 1)} °C no se disuelve más de ${fixed(n.saturation, 1)} %.`,
+    text: `La solución alcalina contiene ${fixed(n.percent, 1)} % de hidróxido; a ${statedTemperature(n.temperature)} no se disuelve más de ${fixed(n.saturation, 1)} %.`,
     action:
       'Remueva hasta que esté transparente, no deje que se enfríe y busque granos antes de verter: cada grano es un punto cáustico en el jabón.',
   }),
   'potassium-lye': (n) => ({
     text: `El ${fixed(n.potassium, 0)} % del hidróxido es hidróxido de potasio. Absorbe agua del aire en pocos minutos y salpica al tocar el agua.`,
     action:
-      'Lea la etiqueta dos veces: ninguno de los dos álcalis sustituye al otro gramo por gramo. Pese rápido, cierre el saco y mantenga la cara apartada de la jarra.',
+      'Lea la etiqueta dos veces: ninguno de los dos álcalis sustituye al otro a igual peso. Pese rápido, cierre el saco y mantenga la cara apartada de la jarra.',
   }),
   'stock-lye': (n) => ({
     text: `${n.name}, partida ${n.lot}, es una solución de reserva al ${fixed(n.assay, 1)} %: es cáustica tal como está, y con el frío forma cristales que dejan el resto más débil.`,
@@ -41,7 +42,7 @@ export const lyeCautions: SameShape<typeof english> = {
       'Póngase las gafas protectoras y los guantes antes de quitar el tapón. No pese de ella mientras haya cristales; caliéntela solo como lo permita su ficha de datos de seguridad.',
   }),
   'stock-crystallises': (n) => ({
-    text: `${n.name}, partida ${n.lot}, al ${fixed(n.assay, 1)} %, empieza a cristalizar a unos ${fixed(n.crystals, 0)} °C (${n.how}).`,
+    text: `${n.name}, partida ${n.lot}, al ${fixed(n.assay, 1)} %, empieza a cristalizar a unos ${temperature(n.crystals)} (${n.how}).`,
     action:
       'Manténgala por encima de esa temperatura, también durante el transporte. Si ha estado más fría, busque cristales y no pese nada de ella hasta que vuelva a estar uniforme.',
   }),

@@ -1,4 +1,5 @@
 import type { workCautions as english } from '../en/cautions-work.ts';
+import { largeMass, statedVolume, temperature, volume } from '../measures.ts';
 import { fixed, plain } from '../numbers.ts';
 import type { SameShape } from '../same-shape.ts';
 
@@ -10,12 +11,12 @@ export const workCautions: SameShape<typeof english> = {
       'Haga un tamaño mayor o use una balanza más fina. Nunca divida a mano las pesadas de otro tamaño.',
   }),
   'batch-above-vessel': (n) => ({
-    text: `El tamaño ${n.batch} son unos ${fixed(n.litres, 1)} L de masa de jabón: ${fixed(n.fill, 0)} % de su recipiente de ${plain(n.vessel, 1)} L, y el máximo es ${plain(n.limit)} %.`,
+    text: `El tamaño ${n.batch} son unos ${volume(n.litres * 1000)} de masa de jabón: ${fixed(n.fill, 0)} % de su recipiente de ${statedVolume(n.vessel * 1000)}, y el máximo es ${plain(n.limit)} %.`,
     action:
       'Use un recipiente mayor o un tamaño menor. El jabón caliente y cáustico que se desborda quema.',
   }),
   'batch-above-heat-limit': (n) => ({
-    text: `El tamaño ${n.batch} vierte ${plain(n.fats, 2)} kg de grasas de una vez; el límite del taller por su calor es ${plain(n.limit, 2)} kg.`,
+    text: `El tamaño ${n.batch} vierte ${largeMass(n.fats * 1000)} de grasas de una vez; el límite del taller por su calor es ${largeMass(n.limit * 1000)}.`,
     action:
       'Use un tamaño menor o varios moldes separados entre sí. Un bloque que no puede perder su calor se agrieta, hierve y se desborda.',
   }),
@@ -72,7 +73,7 @@ export const workCautions: SameShape<typeof english> = {
     action: 'No lo elabore. Quien formula debe reducir la dosis.',
   }),
   'fragrance-near-flash-point': (n) => ({
-    text: `${n.materials} tiene su punto de inflamación a ${fixed(n.flashPoint, 0)} °C, y este jabón se trabaja a hasta ${fixed(n.hottest, 0)} °C.`,
+    text: `${n.materials} tiene su punto de inflamación a ${temperature(n.flashPoint)}, y este jabón se trabaja a hasta ${temperature(n.hottest)}.`,
     action:
       'Ninguna llama ni placa al rojo en la sala. Deje que el jabón se enfríe antes de añadir la fragancia.',
   }),

@@ -1,4 +1,5 @@
 import type { declaration as english } from '../en/declaration.ts';
+import { statedMass } from '../measures.ts';
 import { fixed, plain } from '../numbers.ts';
 import type { SameShape } from '../same-shape.ts';
 
@@ -45,7 +46,7 @@ export const declaration: SameShape<typeof english> = {
     `Los datos no contienen cifras del proveedor para: ${names.join('; ')}. Tome los nombres de la declaración de alérgenos del proveedor; sin ella la lista no está completa.`,
   netMassTitle: 'Peso neto',
   netMass: (label, wet, released, moisture, ounces) =>
-    `${label}: para una pastilla vertida con ${plain(wet)} g se calculan ${fixed(released, 1)} g (${fixed(ounces, 2)} oz) una vez seca hasta ${plain(moisture, 1)} % de agua. Sigue secándose: no declare más de lo que pese la pastilla más ligera el día de la venta.`,
+    `${label}: para una pastilla vertida con ${statedMass(wet)} se calculan ${fixed(released, 1)} g (${fixed(ounces, 2)} oz) una vez seca hasta ${plain(moisture, 1)} % de agua. Sigue secándose: no declare más de lo que pese la pastilla más ligera el día de la venta.`,
   netMassUnknown: 'De lo que se envasa a mano: declare lo que indique la balanza.',
   namesBasis:
     'Nombres INCI y nombres para los Estados Unidos: de memoria, no comprobados con el diccionario. Orden de la lista: Reglamento (CE) 1223/2009, artículo 19, y 21 CFR 701.3, los dos de memoria. En los Estados Unidos, un producto que es jabón y nada más según 21 CFR 701.20 no necesita lista.',

@@ -1,5 +1,6 @@
 import { dateText } from '../dates.ts';
 import type { findWords as english } from '../en/find.ts';
+import { degreeUnit } from '../measures.ts';
 import { plain } from '../numbers.ts';
 import type { SameShape } from '../same-shape.ts';
 
@@ -18,7 +19,9 @@ export const findWords: SameShape<typeof english> = {
     polyunsaturated: ['Ácidos poliinsaturados', '%'],
     'lye-concentration': ['Concentración de la solución alcalina', '%'],
     'lye-as-made': ['Concentración de la solución alcalina en el recipiente', '%'],
-    'lye-temperature': ['Temperatura de la solución alcalina, sin pérdida de calor', '°C'],
+    get 'lye-temperature'(): readonly [string, string] {
+      return ['Temperatura de la solución alcalina, sin pérdida de calor', degreeUnit()];
+    },
     'tfm-fresh': ['Materia grasa total (MGT), fresco', '%'],
     'tfm-released': ['Materia grasa total (MGT), a la liberación', '%'],
     'glycerol-fresh': ['Glicerol, fresco', '%'],

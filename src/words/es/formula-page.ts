@@ -1,6 +1,7 @@
 import { dateText } from '../dates.ts';
 import type { formulaPage as english } from '../en/formula-page.ts';
-import { fixed, kilograms, plain } from '../numbers.ts';
+import { stepText, totalMass } from '../measures.ts';
+import { fixed, plain } from '../numbers.ts';
 import type { SameShape } from '../same-shape.ts';
 
 export const formulaPage: SameShape<typeof english> = {
@@ -38,7 +39,7 @@ export const formulaPage: SameShape<typeof english> = {
     water: 'Agua',
     waterBesideStock: 'Agua, además de la solución de reserva',
     waterHeldBack: 'Agua reservada',
-    total: (grams) => `${kilograms(grams)} kg`,
+    total: (grams) => totalMass(grams),
     totalLabel: 'Todo junto',
     bars: (n) => (n === 1 ? '1 pastilla' : `${n} pastillas`),
     superfatLabel: 'Sobreengrasado con estos pesos',
@@ -47,8 +48,8 @@ export const formulaPage: SameShape<typeof english> = {
     lowest: (expanded) => `${fixed(expanded, 1)} %`,
     steps: (steps) =>
       steps.length === 1
-        ? `Redondeado a escalones de ${plain(steps[0] ?? 0)} g.`
-        : `Redondeado a escalones de ${steps.map((step) => `${plain(step)} g`).join(' y ')}, como está impreso.`,
+        ? `Redondeado a escalones de ${stepText(steps[0] ?? 0)}.`
+        : `Redondeado a escalones de ${steps.map(stepText).join(' y ')}, como está impreso.`,
     digest: (digest) => `Pesadas ${digest}`,
     end: (label) => `Fin de ${label}`,
     refusedTitle: 'No hay pesadas para este tamaño',
@@ -76,7 +77,7 @@ export const formulaPage: SameShape<typeof english> = {
       cure: 'Curado',
       dilution: 'Dilución',
     },
-    units: { C: '°C', h: 'h', d: 'd', min: 'min' },
+    units: { h: 'h', d: 'd', min: 'min' },
     freeAlkali: 'Álcali libre, como máximo',
     freeAlkaliUnit: '% como NaOH',
     ph: 'pH',

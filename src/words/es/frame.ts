@@ -1,6 +1,6 @@
 import { dateText } from '../dates.ts';
 import type { frame as english } from '../en/frame.ts';
-import { fixed, plain } from '../numbers.ts';
+import { statedMass, volume } from '../measures.ts';
 import type { SameShape } from '../same-shape.ts';
 
 /** What stands around every page, and the small words that many pages share. */
@@ -18,7 +18,6 @@ export const frame: SameShape<typeof english> = {
   proof: 'Edición de prueba, no para el uso: contiene fórmulas sin aprobar.',
   invented: 'Demostración: un taller inventado, no un formulario con el que trabajar.',
   foot: 'No sustituye la ficha de datos de seguridad (FDS) del proveedor, las normas locales ni el consejo de un profesional habilitado. Eso va primero.',
-  grams: 'g',
   percent: '%',
   kinds: { bar: 'Pastilla', paste: 'Pasta', liquid: 'Líquido' },
   processes: { cold: 'proceso en frío', hot: 'proceso en caliente' },
@@ -31,10 +30,10 @@ export const frame: SameShape<typeof english> = {
   },
   severities: { danger: 'Peligro', warning: 'Atención', care: 'Cuidado', note: 'Nota' },
   batchSize: {
-    fats: (grams) => `${plain(grams)} g de grasas`,
-    batter: (grams) => `${plain(grams)} g de masa de jabón`,
-    bars: (count, grams) => `${count} pastillas de ${plain(grams)} g, peso al verter`,
-    mould: (millilitres) => `molde de ${fixed(millilitres / 1000, 1)} L`,
+    fats: (grams) => `${statedMass(grams)} de grasas`,
+    batter: (grams) => `${statedMass(grams)} de masa de jabón`,
+    bars: (count, grams) => `${count} pastillas de ${statedMass(grams)}, peso al verter`,
+    mould: (millilitres) => `molde de ${volume(millilitres)}`,
   },
   how: {
     measured: 'medido',

@@ -1,4 +1,5 @@
 import type { lyeHeatWords as english } from '../en/lye-heat.ts';
+import { temperature, warming } from '../measures.ts';
 import { fixed } from '../numbers.ts';
 import type { SameShape } from '../same-shape.ts';
 
@@ -17,10 +18,11 @@ export const lyeHeatWords: SameShape<typeof english> = {
     saturationAtStart: 'Una solución saturada a la temperatura inicial contiene',
     saturationAtPeak: 'Una solución saturada a la temperatura máxima contiene',
   },
-  celsius: (value) => `${fixed(value, 0)} °C`,
+  celsius: (value) => temperature(value),
+  kelvin: (value) => warming(value),
   percent: (value) => `${fixed(value, 1)} %`,
   noNumber: 'Sin número',
-  tableEnds: (celsius) => `no se sabe: la tabla termina a ${fixed(celsius, 0)} °C`,
+  tableEnds: (celsius) => `no se sabe: la tabla termina a ${temperature(celsius)}`,
   noLoss:
     'Sin pérdida de calor hacia la jarra y el aire. Un recipiente real queda algo menos caliente; aquí nada dice cuánto menos, así que cuente con esta cifra.',
   boils:

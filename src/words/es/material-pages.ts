@@ -1,5 +1,6 @@
 import type { materialPages as english } from '../en/material-pages.ts';
-import { fixed, kilograms, plain } from '../numbers.ts';
+import { totalMass } from '../measures.ts';
+import { fixed, plain } from '../numbers.ts';
 import type { SameShape } from '../same-shape.ts';
 
 export const materialPages: SameShape<typeof english> = {
@@ -103,7 +104,7 @@ export const materialPages: SameShape<typeof english> = {
   storageBasis: 'Práctica común, sin fuente. Las fechas de reanálisis están junto a las partidas.',
   notUsed: 'Ninguna fórmula lo usa.',
   useColumns: { formula: 'Fórmula', share: 'De las grasas' },
-  kilograms: (grams) => `${kilograms(grams)} kg`,
+  kilograms: (grams) => totalMass(grams),
   share: (percent) => `${fixed(percent, 2)} %`,
   goneNone: 'Todas las fórmulas se pueden elaborar igualmente.',
   cannot: (count, approved, all) =>

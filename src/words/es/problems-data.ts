@@ -34,6 +34,7 @@ export const DATA_PROBLEMS: SameShape<typeof english> = {
   'data/unknown-acid': { title: 'Un ácido graso que no está en la lista' },
   'data/unknown-fat': { title: 'Una grasa que no tiene archivo' },
   'data/unknown-alkali': { title: 'Un álcali que no tiene archivo' },
+  'data/scale-units': { title: 'Una balanza en unidades con las que no se pesa en el taller' },
   'data/unknown-scale': { title: 'Una balanza que el taller no tiene' },
   'data/molecular-formula': { title: 'Una fórmula molecular que no se puede calcular' },
   'data/acid-form': { title: 'Un ácido cuyo nombre y fórmula no coinciden' },

@@ -45,6 +45,5 @@ export const propertyUnits: SameShape<typeof englishUnits> = {
   mgKohPerGram: 'mg KOH/g',
   iodine: 'g I₂/100 g',
   carbons: 'carbonos',
-  celsius: '°C',
   none: 'sin unidad',
 };

@@ -1,4 +1,5 @@
 import type { safetyPage as english } from '../en/safety.ts';
+import { temperature } from '../measures.ts';
 import { fixed } from '../numbers.ts';
 import type { SameShape } from '../same-shape.ts';
 
@@ -66,7 +67,7 @@ export const safetyPage: SameShape<typeof english> = {
   careUnknown: 'Calor de la solución alcalina sin número: cuente con que hierve',
   careLowest:
     'Sobreengrasado mínimo, con los errores de las balanzas (se nombra un tamaño de lote donde es el más bajo)',
-  celsius: (value) => `${fixed(value, 0)} °C`,
+  celsius: (value) => temperature(value),
   percent: (value) => `${fixed(value, 1)} %`,
   officialTitle: 'Frases oficiales',
   workplaceTitle: 'Límites en el lugar de trabajo',

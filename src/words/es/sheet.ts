@@ -1,9 +1,15 @@
 import { dateText } from '../dates.ts';
 import type { sheetWords as english } from '../en/sheet.ts';
+import {
+  expectedMass,
+  massAtMost,
+  massUnit,
+  massUnits,
+  statedMass,
+  temperature,
+} from '../measures.ts';
 import { fixed, plain } from '../numbers.ts';
 import type { SameShape } from '../same-shape.ts';
-
-const grams = (mass: number) => `${fixed(mass, 0)} g`;
 
 /** The bench sheet: what is read, ticked and written while one batch is made. */
 export const sheetWords: SameShape<typeof english> = {
@@ -35,7 +41,7 @@ export const sheetWords: SameShape<typeof english> = {
     lot: (lot, until) => `${lot}, reanalizar a más tardar el ${dateText(until)}`,
     noLot: '(cualquier partida dentro del intervalo publicado)',
     scales: (scales) => `La balanza está nivelada y comprobada hoy: ${scales}.`,
-    scale: (name, step) => `${name}, escalones de ${step} g`,
+    scale: (name, step) => `${name}, escalones de ${step} ${massUnit()}`,
     checkWeight: 'Pesa de control / lectura',
     ready:
       'Llevo puestos las gafas de protección, los guantes y el delantal, el grifo funciona y hay otra persona en el edificio.',
@@ -62,9 +68,11 @@ export const sheetWords: SameShape<typeof english> = {
     afterCookLimit: (limit) => `Hallado / máximo ${limit}`,
     afterCookNoLimit: 'Hallado / límite',
     paste: 'Pese primero la pasta. Cuenta lo que indica la balanza, no la suma de lo que entró.',
-    pasteBlank: 'Pasta, g',
+    get pasteBlank() {
+      return `Pasta, ${massUnits()}`;
+    },
     sums: (lye, fats, all) =>
-      `En el recipiente de la solución alcalina ${lye} g. Grasas ${fats} g. Todo junto ${all} g.`,
+      `En el recipiente de la solución alcalina ${lye} ${massUnit()}. Grasas ${fats} ${massUnit()}. Todo junto ${all} ${massUnit()}.`,
     superfat: (weighed, lowest) =>
       `Sobreengrasado con estos pesos ${fixed(weighed, 2)} %; sobreengrasado mínimo ${fixed(lowest, 1)} %.`,
     doubt: 'Si duda de si una línea se pesó: empiece de nuevo ese recipiente.',
@@ -72,9 +80,9 @@ export const sheetWords: SameShape<typeof english> = {
   heat: {
     title: 'Calor de la solución alcalina',
     peak: (peak, start) =>
-      `Hasta ${fixed(peak, 0)} °C desde un inicio a ${fixed(start, 0)} °C, sin pérdida de calor.`,
+      `Hasta ${temperature(peak)} desde un inicio a ${temperature(start)}, sin pérdida de calor.`,
     boils: (boiling) =>
-      `Hierve a unos ${fixed(boiling, 0)} °C: añada el álcali en porciones pequeñas y deje enfriar entre ellas.`,
+      `Hierve a unos ${temperature(boiling)}: añada el álcali en porciones pequeñas y deje enfriar entre ellas.`,
     unknown: 'No hay número, y por eso rige la advertencia más fuerte: trátela como si hirviera.',
   },
   readings: {
@@ -89,19 +97,19 @@ export const sheetWords: SameShape<typeof english> = {
     rework: 'Jabón reprocesado: lote, masa, acordado por',
     /** Cut off, never rounded up: it is the most. */
     reworkAtMost: (percent, mass) =>
-      `Jabón reprocesado (máximo ${plain(percent)} %, ${grams(Math.floor(mass))}): lote, masa, acordado por`,
+      `Jabón reprocesado (máximo ${plain(percent)} %, ${massAtMost(mass)}): lote, masa, acordado por`,
     portions: 'Masa de jabón dividida: porción, peso, qué se le unió',
   },
   yield: {
     title: 'Rendimiento y días',
     expected: (poured, total) =>
-      `Se esperan en los moldes ${grams(poured)}; nunca más de los ${grams(total)} pesados.`,
+      `Se esperan en los moldes ${expectedMass(poured)}; nunca más de los ${expectedMass(total)} pesados.`,
     expectedVat: (poured, total) =>
-      `Se esperan en la tina ${grams(poured)}, menos lo que se evapore al hervir; nunca más de los ${grams(total)} pesados.`,
+      `Se esperan en la tina ${expectedMass(poured)}, menos lo que se evapore al hervir; nunca más de los ${expectedMass(total)} pesados.`,
     losses: (percent) =>
       `Están descontadas pérdidas de ${plain(percent, 1)} %. Si hay menos de lo esperado: escriba por qué.`,
-    bars: (count, wetMass) => `${count} pastillas de ${plain(wetMass, 1)} g`,
-    released: (mass) => `${grams(mass)} con la humedad de liberación.`,
+    bars: (count, wetMass) => `${count} pastillas de ${statedMass(wetMass, 1)}`,
+    released: (mass) => `${expectedMass(mass)} con la humedad de liberación.`,
     actual: 'Masa real',
     count: 'Pastillas buenas / perdidas',
     cut: (days) => `No cortar antes de elaboración + ${plain(days)} d`,

@@ -1,5 +1,6 @@
 import type { shopping as english } from '../en/shopping.ts';
-import { fixed, kilograms } from '../numbers.ts';
+import { totalMass } from '../measures.ts';
+import { fixed } from '../numbers.ts';
 import type { SameShape } from '../same-shape.ts';
 
 export const shopping: SameShape<typeof english> = {
@@ -24,7 +25,7 @@ export const shopping: SameShape<typeof english> = {
   material: 'Material',
   weight: 'Peso',
   water: 'Agua',
-  kilograms: (grams) => `${kilograms(grams)} kg`,
+  kilograms: (grams) => totalMass(grams),
   perBatch: 'Lo que consume cada lote',
   refused: 'No hay pesadas de ningún tamaño.',
   formula: 'Fórmula',

@@ -8,6 +8,7 @@ export const workingWords: SameShape<typeof english> = {
   back: 'Volver a la fórmula',
   contents: 'En esta página',
   sources: 'Fuente',
+  printed: (text) => `Como está impreso: ${text}`,
   lookedUp: 'consultado',
   sections: {
     'molar-masses': 'Masas molares',

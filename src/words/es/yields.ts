@@ -1,4 +1,5 @@
 import type { dilutionWords as englishDilution, yieldWords as englishYield } from '../en/yields.ts';
+import { expectedMass, fineMass, statedMass, tableBasis } from '../measures.ts';
 import { fixed, plain } from '../numbers.ts';
 import type { SameShape } from '../same-shape.ts';
 
@@ -6,7 +7,9 @@ import type { SameShape } from '../same-shape.ts';
 export const yieldWords: SameShape<typeof englishYield> = {
   method: 'Cómo se calcula el rendimiento',
   title: 'Rendimiento y días',
-  perKilogram: 'De 1000 g de grasas',
+  get perBasis() {
+    return `De ${statedMass(tableBasis())} de grasas`;
+  },
   columns: {
     measure: 'Medida',
     fresh: 'En fresco',
@@ -27,14 +30,14 @@ export const yieldWords: SameShape<typeof englishYield> = {
     unsaponified: 'Grasa sin saponificar',
     totalFattyMatter: 'Materia grasa total (MGT)',
   },
-  grams: (mass) => `${fixed(mass, 0)} g`,
-  gramsAndShare: (mass, percent) => `${fixed(mass, 0)} g, ${fixed(percent, 1)} %`,
+  grams: expectedMass,
+  gramsAndShare: (mass, percent) => `${expectedMass(mass)}, ${fixed(percent, 1)} %`,
   percent: (value) => `${fixed(value, 1)} %`,
   lead: 'Calculado a partir de los pesos, sin evaporación de agua al hervir y con todo el álcali consumido. Si la balanza dice otra cosa, tiene razón la balanza.',
   bySize: 'Por tamaño, con las pérdidas del taller descontadas',
-  bars: (count, wetMass) => `${count} de ${plain(wetMass, 1)} g`,
+  bars: (count, wetMass) => `${count} de ${statedMass(wetMass, 1)}`,
   barAtRelease: (wetMass, released) =>
-    `Una pastilla vertida con ${plain(wetMass, 1)} g pesa ${fixed(released, 1)} g con la humedad de liberación.`,
+    `Una pastilla vertida con ${statedMass(wetMass, 1)} pesa ${fineMass(released)} con la humedad de liberación.`,
   wholeBars: 'Cuentan solo las pastillas enteras. Los recortes no están descontados.',
   gradesTitle: 'Materia grasa total junto a los grados de una norma',
   gradesLead: (source, how) =>
@@ -62,19 +65,21 @@ export const dilutionWords: SameShape<typeof englishDilution> = {
   lead: 'Según la pasta tal como se pesa: la cocción evapora un agua que ningún cálculo conoce, mientras que el jabón se queda. La primera columna de cifras es la teoría, como si no se hubiera evaporado nada; las otras son la misma pasta, más ligera en la balanza.',
   soapIn: (percent) => `jabón ${fixed(percent, 1)} %`,
   asWeighed: (part) => (part === 1 ? 'Teoría' : `${fixed(part * 100, 0)} % de la teoría`),
-  caption: 'Agua para 1000 g de pasta, según lo que pesa la pasta frente a la teoría',
+  get caption() {
+    return `Agua para ${statedMass(tableBasis())} de pasta, según lo que pesa la pasta frente a la teoría`;
+  },
   target: 'Contenido de jabón deseado',
   percent: (value) => `${fixed(value, 0)} %`,
   none: 'no más diluido',
-  joins: (percent) =>
-    `Lo que la fórmula añade en la dilución forma parte de la masa de esa agua: ${fixed(percent, 1)} g para 1000 g de pasta según la teoría. Réstelo antes de pesar el agua.`,
+  joins: (mass) =>
+    `Lo que la fórmula añade en la dilución forma parte de la masa de esa agua: ${fineMass(mass)} para ${statedMass(tableBasis())} de pasta según la teoría. Réstelo antes de pesar el agua.`,
   bySize: 'Masa terminada por tamaño',
   bySizeCaption: 'Masa terminada por contenido de jabón',
   bySizeLead:
     'Pese lo que pese la pasta, el jabón que contiene es el mismo. Lleve el conjunto a la masa de abajo: el agua por añadir es esa masa menos la pasta tal como se pesa, menos lo demás que entra en la dilución. Las pérdidas del taller ya están descontadas; si se quedó más pegado a la caldera, hay menos jabón.',
   columns: { size: 'Tamaño', soap: 'Jabón que contiene', theory: 'Pasta según la teoría' },
   finished: (percent) => `${fixed(percent, 0)} %`,
-  grams: (mass) => `${fixed(mass, 0)} g`,
+  grams: expectedMass,
   clear:
-    'Cuánto se puede diluir un líquido sin que deje de ser transparente se averigua con una prueba de 100 g, no con esta tabla.',
+    'Cuánto se puede diluir un líquido sin que deje de ser transparente se averigua con una prueba en un vaso pequeño, no con esta tabla.',
 };
