@@ -54,8 +54,8 @@ export const lyeCautions: SameShape<typeof english> = {
   'alkali-lot-retest': (n) => ({
     text:
       n.days < 0
-        ? `La partida ${n.lot} de ${n.name} debía comprobarse de nuevo el ${dateText(n.retestBy)}.`
-        : `La partida ${n.lot} de ${n.name} debe comprobarse de nuevo el ${dateText(n.retestBy)}, dentro de ${plain(n.days)} ${n.days === 1 ? 'día' : 'días'}.`,
+        ? `La partida ${n.lot} de ${n.name} debía reanalizarse a más tardar el ${dateText(n.retestBy)}.`
+        : `La partida ${n.lot} de ${n.name} debe reanalizarse a más tardar el ${dateText(n.retestBy)}, dentro de ${plain(n.days)} ${n.days === 1 ? 'día' : 'días'}.`,
     action:
       n.days < 0
         ? 'No pese de ella. Haga su titulación o libere otra partida.'

@@ -19,7 +19,7 @@ export const cautionNames: SameShape<typeof english> = {
   'stock-lye': 'Con una solución de reserva',
   'stock-crystallises': 'Solución de reserva que cristaliza',
   'alkali-without-lot': 'Álcali sin partida liberada',
-  'alkali-lot-retest': 'Partida de álcali por comprobar',
+  'alkali-lot-retest': 'Partida de álcali por reanalizar',
   'lye-and-metals': 'La solución corroe metales',
   'batch-too-small': 'Tamaño demasiado pequeño para pesar',
   'batch-above-vessel': 'No cabe en su recipiente',

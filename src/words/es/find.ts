@@ -29,7 +29,7 @@ export const findWords: SameShape<typeof english> = {
     'water-fresh': ['Agua, fresco', '%'],
     revision: ['Revisión', ''],
     'approved-on': ['Aprobada el', ''],
-    'review-by': ['Revisar antes del', ''],
+    'review-by': ['Revisar a más tardar', ''],
   },
   groups: {
     superfat: 'Sobreengrasado',

@@ -9,7 +9,7 @@ export const formulaPage: SameShape<typeof english> = {
   notApproved: 'sin aprobar',
   fingerprint: 'Huella',
   approved: (by, on, until) =>
-    `Aprobada por ${by} el ${dateText(on)}, revisar antes del ${dateText(until)}`,
+    `Aprobada por ${by} el ${dateText(on)}, revisar a más tardar el ${dateText(until)}`,
   concession: (reason, by, on) =>
     `Publicada con una concesión: ${reason} Otorgada por ${by} el ${dateText(on)}.`,
   sections: {

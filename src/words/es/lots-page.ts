@@ -14,7 +14,7 @@ export const lotsPage: SameShape<typeof english> = {
     rejected: 'Rechazadas',
   },
   notes: {
-    released: 'Puede pesarse de ellas hasta la fecha de la nueva comprobación.',
+    released: 'Puede pesarse de ellas hasta la fecha de reanálisis.',
     quarantine: 'No pese de ellas. Las fórmulas se calculan como si no estuvieran.',
     rejected: 'Nunca pese de ellas.',
   },
@@ -24,7 +24,7 @@ export const lotsPage: SameShape<typeof english> = {
     lot: 'Partida',
     value: 'Medido, k = 2',
     opened: 'Abierta',
-    retest: 'Comprobar de nuevo antes del',
+    retest: 'Reanalizar a más tardar',
     formulas: 'Fórmulas',
   },
   value: (name, value, uncertainty) =>

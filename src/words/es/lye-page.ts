@@ -22,7 +22,7 @@ export const lyePage: SameShape<typeof english> = {
   lots: {
     title: 'Para qué se calculó esta tabla',
     lead: 'Compárela con los sacos y bidones. Con cualquier otra partida las pesadas no valen.',
-    lot: (lot, until) => `partida ${lot}, comprobar de nuevo antes del ${dateText(until)}`,
+    lot: (lot, until) => `partida ${lot}, reanalizar a más tardar el ${dateText(until)}`,
     without: (names) => `Sin partida, calculado con el intervalo publicado: ${names}.`,
     until: (date) =>
       date === null ? 'hasta que se libere una partida' : `no después del ${dateText(date)}`,
