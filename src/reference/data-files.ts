@@ -1,3 +1,4 @@
+import { LANGUAGES, type Language } from '../words/languages.ts';
 import { whatIsWrongWith } from './ids.ts';
 import { didYouMean } from './nearest.ts';
 import { TABLES, type TableName } from './tables.ts';
@@ -8,6 +9,16 @@ export interface DataFile {
   /** Path as the user would type it, for problems. */
   readonly file: string;
   readonly text: string;
+  /** Whether it comes with the code, in English, rather than from the shop, in the language of the shop. */
+  readonly packaged: boolean;
+}
+
+/** What the packaged data are written in. */
+export const DATA_LANGUAGE = 'en' satisfies Language;
+
+/** The file with the names and the prose of the packaged data in another language. */
+export function languageFile(language: Language): string {
+  return `languages/${language}.yaml`;
 }
 
 /** Read from every folder, a later one over an earlier one. */
@@ -22,6 +33,7 @@ export const PACKAGED_FILES = [
   'alkalis/sodium-hydroxide.yaml',
   'alkalis/potassium-hydroxide.yaml',
   ...(Object.keys(TABLES) as TableName[]).map((name) => `tables/${name}.yaml`),
+  ...LANGUAGES.filter((language) => language !== DATA_LANGUAGE).map(languageFile),
 ];
 
 /**
@@ -33,7 +45,7 @@ export const SHOP_FILES = ['shop.yaml', 'lots.yaml', 'blends.yaml', 'prices.yaml
 /** Read elsewhere: by the evidence of the models, and by the pages of kept searches. */
 const OTHER_FILES = ['evidence.yaml', 'searches.yaml'];
 
-export const DATA_FOLDERS = ['fats', 'alkalis', 'tables'] as const;
+export const DATA_FOLDERS = ['fats', 'alkalis', 'tables', 'languages'] as const;
 
 /** Whether a name is one of a data folder, and if not, what may have been meant. */
 export function dataFileAdvice(name: string): string | null {

@@ -19,11 +19,13 @@ const RULE_OF_FAULT: Readonly<Record<YamlFault['kind'], DataRule>> = {
 export interface OpenedFile<T> {
   readonly value: T;
   readonly report: DataReport;
+  /** As of the file it was read from. */
+  readonly packaged: boolean;
 }
 
 /** One file through YAML and its schema. `null` where it cannot be used; the problems say why. */
 export function openFile<T>(
-  { file, text }: DataFile,
+  { file, text, packaged }: DataFile,
   schema: z.ZodType<T>,
   problems: Problem[],
 ): OpenedFile<T> | null {
@@ -55,5 +57,5 @@ export function openFile<T>(
   }
   const report = reportOn(file, yaml, problems);
   const value = fit(schema, yaml.value, report);
-  return value === null ? null : { value, report };
+  return value === null ? null : { value, report, packaged };
 }

@@ -28,7 +28,11 @@ export function readPrices(
   // a file that is there and cannot be read has been reported with the rest of the data
   if (!read.ok) return { prices: null, problems: [] };
   const problems: Problem[] = [];
-  const opened = openFile({ name: NAME, file, text: read.text }, pricesSchema, problems);
+  const opened = openFile(
+    { name: NAME, file, text: read.text, packaged: false },
+    pricesSchema,
+    problems,
+  );
   if (!opened) return { prices: null, problems };
   const known = [...fats, ...alkalis, ...additives, ...liquids].map(([id]) => id);
   const perKilogram = new Map<string, number>();

@@ -1,6 +1,7 @@
 import type { z } from 'zod';
+import { languageOf } from '../words/languages.ts';
 import type { Problem } from '../words/problem.ts';
-import type { DataFile } from './data-files.ts';
+import { DATA_LANGUAGE, type DataFile, languageFile } from './data-files.ts';
 import type { AlkaliRecord } from './material-records.ts';
 import { type OpenedFile, openFile } from './open-file.ts';
 import { dataProblem } from './report.ts';
@@ -14,6 +15,7 @@ import {
   liquidsSchema,
 } from './schema/chemicals.ts';
 import { fatSchema, type RawFat } from './schema/fat.ts';
+import { languageSchema } from './schema/language.ts';
 import { lotsSchema } from './schema/lots.ts';
 import { shopSchema } from './schema/shop.ts';
 import { soapGradesSchema } from './schema/soap-grades.ts';
@@ -39,6 +41,8 @@ export interface RawData {
   readonly cautions: Raw<typeof cautionsSchema>;
   readonly soapGrades: Raw<typeof soapGradesSchema>;
   readonly shop: Raw<typeof shopSchema>;
+  /** `undefined` where the shop speaks the language that the packaged data are written in. */
+  readonly language: Raw<typeof languageSchema> | undefined;
   /** `undefined` where the shop keeps no lots. */
   readonly lots: Raw<typeof lotsSchema> | undefined;
   /** `undefined` where the shop keeps no blends. */
@@ -77,6 +81,8 @@ export function openAll(files: readonly DataFile[], folder: string, problems: Pr
     if (result) opened.push(result);
     return result;
   };
+  const shop = open('shop.yaml', shopSchema);
+  const language = languageOf(shop?.value.locale ?? DATA_LANGUAGE);
   return {
     sources: open('sources.yaml', sourcesSchema),
     elements: open('elements.yaml', elementsSchema),
@@ -85,7 +91,8 @@ export function openAll(files: readonly DataFile[], folder: string, problems: Pr
     liquids: open('liquids.yaml', liquidsSchema),
     cautions: open('cautions.yaml', cautionsSchema),
     soapGrades: open('soap-grades.yaml', soapGradesSchema),
-    shop: open('shop.yaml', shopSchema),
+    shop,
+    language: language === DATA_LANGUAGE ? undefined : open(languageFile(language), languageSchema),
     lots: byName.has('lots.yaml') ? open('lots.yaml', lotsSchema) : undefined,
     blends: byName.has('blends.yaml') ? open('blends.yaml', blendsSchema) : undefined,
     alkalis: ALKALIS.map((id) => ({ id, opened: open(`alkalis/${id}.yaml`, alkaliSchema) })),

@@ -32,7 +32,7 @@ export function readReference(folders: readonly string[]): ReadReference {
         continue;
       }
       const text = textOf(file, problems);
-      if (text !== null) files.set(name, { name, file, text });
+      if (text !== null) files.set(name, { name, file, text, packaged: folder === folders[0] });
     }
   }
   if (problems.length > 0) {

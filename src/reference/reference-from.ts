@@ -18,6 +18,7 @@ import { valueRecord } from './schema/value.ts';
 import { shopFrom } from './shop.ts';
 import { reportUnknownSources, sourcesFrom } from './sources.ts';
 import { checkTable, modelTables, TABLES, type TableName } from './tables.ts';
+import { phrasesIn, translated } from './translation.ts';
 
 export interface ReadReference {
   /** `null` where there is any error. */
@@ -31,13 +32,18 @@ export interface ReadReference {
  */
 export function referenceFrom(files: readonly DataFile[], folder: string): ReadReference {
   const problems: Problem[] = [];
-  const reference = assemble(openAll(files, folder, problems));
+  const raw = openAll(files, folder, problems);
+  const { language, shop } = raw;
+  const locale = shop?.value.locale;
+  const phrases = language && locale ? phrasesIn(language.value.phrases, locale) : {};
+  const spoken = language ? translated(raw, language, phrases) : raw;
+  const reference = assemble(spoken, phrases);
   const broken = problems.some(({ severity }) => severity === 'error');
   return { reference: broken ? null : reference, problems };
 }
 
 /** Looks up across files. `null` where a file is missing that the rest cannot do without. */
-function assemble(raw: RawData): Reference | null {
+function assemble(raw: RawData, phrases: Reference['phrases']): Reference | null {
   for (const name of Object.keys(TABLES) as TableName[]) {
     const table = raw.tables[name];
     if (table) checkTable(name, table.value, table.report);
@@ -115,6 +121,7 @@ function assemble(raw: RawData): Reference | null {
     additives,
     liquids,
     sources,
+    phrases,
     shop,
     lots,
     blends,

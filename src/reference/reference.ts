@@ -67,6 +67,8 @@ export interface Reference {
   readonly additives: ReadonlyMap<string, AdditiveRecord>;
   readonly liquids: ReadonlyMap<string, LiquidRecord>;
   readonly sources: ReadonlyMap<string, Source>;
+  /** Prose of the packaged data in the language of the shop, by its English text; empty in English. */
+  readonly phrases: Readonly<Record<string, string>>;
   readonly shop: Shop;
   /** Empty where the shop keeps none. */
   readonly blends: ReadonlyMap<string, Blend>;

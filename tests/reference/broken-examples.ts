@@ -67,6 +67,13 @@ export const BROKEN: readonly {
     rule: 'data/locale',
     files: withChange('shop.yaml', 'name: Test shop', 'name: Test shop\nlocale: tlh'),
   },
+  {
+    rule: 'data/untranslated-name',
+    files: [
+      ...withChange('shop.yaml', 'name: Test shop', 'name: Test shop\nlocale: es-MX'),
+      file('fats/trial.yaml', SMALL_FAT),
+    ],
+  },
   { rule: 'data/text-form', files: withChange('shop.yaml', 'id: pilot', 'id: ../pilot') },
   { rule: 'data/measure-form', files: withChange('shop.yaml', 'fats: 1 kg', 'fats: 1') },
   { rule: 'data/date', files: withChange('lots.yaml', 'opened: 2026-10-12', 'opened: 2026-02-30') },

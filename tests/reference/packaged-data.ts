@@ -50,7 +50,7 @@ export const PACKAGED: readonly DataFile[] = [
 ];
 
 export function file(name: string, text: string): DataFile {
-  return { name, file: `data/${name}`, text };
+  return { name, file: `data/${name}`, text, packaged: true };
 }
 
 /** The packaged data with one text of one file replaced; the text must stand there exactly once. */

@@ -5,6 +5,7 @@ import type { Reference } from '../reference.ts';
 import { dataProblem } from '../report.ts';
 import { evidenceSchema } from '../schema/evidence.ts';
 import { reportUnknownSources } from '../sources.ts';
+import { withPhrases } from '../translation.ts';
 import type { EvidenceRow } from './evidence.ts';
 import { evidenceRows } from './rows.ts';
 
@@ -30,11 +31,14 @@ export function readEvidence(
     return { rows: [], problems };
   }
   const opened = openFile(
-    { name: 'evidence.yaml', file, text: read.text },
+    { name: 'evidence.yaml', file, text: read.text, packaged: true },
     evidenceSchema,
     problems,
   );
   if (!opened) return { rows: [], problems };
   reportUnknownSources(opened.value, reference.sources, opened.report);
-  return { rows: evidenceRows(opened.value, reference, opened.report), problems };
+  return {
+    rows: evidenceRows(withPhrases(opened.value, reference.phrases), reference, opened.report),
+    problems,
+  };
 }

@@ -20,6 +20,7 @@ export const DATA_PROBLEMS = {
   'data/text-form': { title: 'A text that is not in its form' },
   'data/measure-form': { title: 'A measure that is not a number with its unit' },
   'data/locale': { title: 'A locale that is not known' },
+  'data/untranslated-name': { title: 'A packaged material without a name in the shop’s language' },
   'data/date': { title: 'A date that is not in the calendar' },
   'data/value-or-range': { title: 'A record with neither a value nor a range, or with both' },
   'data/range-order': { title: 'A range whose lower end is above its upper end' },

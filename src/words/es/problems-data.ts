@@ -25,6 +25,9 @@ export const DATA_PROBLEMS: SameShape<typeof english> = {
   'data/text-form': { title: 'Un texto que no tiene su forma' },
   'data/measure-form': { title: 'Una medida que no es un número con su unidad' },
   'data/locale': { title: 'Una configuración regional desconocida' },
+  'data/untranslated-name': {
+    title: 'Un material del paquete sin nombre en el idioma del taller',
+  },
   'data/date': { title: 'Una fecha que no está en el calendario' },
   'data/value-or-range': { title: 'Un registro sin valor ni intervalo, o con ambos' },
   'data/range-order': {
