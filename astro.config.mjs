@@ -3,6 +3,7 @@ import { benchCards } from './src/site/integrations/bench-cards.ts';
 import { formulaPictures } from './src/site/integrations/formula-pictures.ts';
 import { ownWords } from './src/site/integrations/own-words.ts';
 import { pageClock } from './src/site/integrations/page-clock.ts';
+import { printDocument } from './src/site/integrations/print-document.ts';
 import { relativeLinks } from './src/site/integrations/relative-links.ts';
 import { searchIndex } from './src/site/integrations/search-index.ts';
 
@@ -17,7 +18,14 @@ export default defineConfig({
   build: { format: 'preserve', assets: 'assets', inlineStylesheets: 'never' },
   devToolbar: { enabled: false },
   // pictures first: the links are checked against what is there
-  integrations: [pageClock(), formulaPictures(), benchCards(), relativeLinks(), searchIndex()],
+  integrations: [
+    pageClock(),
+    formulaPictures(),
+    benchCards(),
+    printDocument(),
+    relativeLinks(),
+    searchIndex(),
+  ],
   vite: {
     build: { assetsInlineLimit: 0 },
     plugins: [ownWords()],

@@ -9,6 +9,7 @@ const NAMES = [
   'approve',
   'verify',
   'publish',
+  'print',
   'titrate',
 ];
 const NEEDED = [22, 18];

@@ -21,7 +21,11 @@ export type Replaced = 'replaced' | 'changed';
  *
  * @throws what the file system says; the old file then stands as it was.
  */
-export function replaceFile(path: string, next: string, read: Buffer | null): Replaced {
+export function replaceFile(
+  path: string,
+  next: string | Uint8Array,
+  read: Buffer | null,
+): Replaced {
   const target = existsSync(path) ? realpathSync(path) : path;
   const beside = join(dirname(target), `.${basename(target)}.${process.pid}.next`);
   const mode = existsSync(target) ? statSync(target).mode : 0o644;

@@ -23,6 +23,7 @@ import { marginWords } from './en/margin.ts';
 import { materialPages } from './en/material-pages.ts';
 import { methodWords } from './en/methods.ts';
 import { methodsPage } from './en/methods-page.ts';
+import { printPage } from './en/print-page.ts';
 import { profileWords, propertyNames, propertyUnits } from './en/profile.ts';
 import { safetyPage } from './en/safety.ts';
 import { safetySections } from './en/safety-sections.ts';
@@ -64,6 +65,7 @@ export const english = {
   materialPages,
   methodWords,
   methodsPage,
+  printPage,
   profileWords,
   propertyNames,
   propertyUnits,

@@ -25,7 +25,7 @@ export function rewriteLinks(
     const target = path === '' ? file : path.slice(1);
     if (!files.has(target)) missing.push(link);
     // with a `=` it asks the finder something
-    else if (anchor && !anchor.includes('=') && !hasAnchor(texts.get(target) ?? '', anchor)) {
+    else if (anchor && !anchor.includes('=') && !hasAnchor(texts, target, anchor)) {
       missing.push(link);
     }
     const hash = anchor === undefined ? '' : `#${anchor}`;
@@ -47,4 +47,16 @@ export function rewriteLinks(
   return { rewritten, missing };
 }
 
-const hasAnchor = (page: string, anchor: string) => page.includes(` id="${anchor}"`);
+const known = new WeakMap<ReadonlyMap<string, string>, Map<string, ReadonlySet<string>>>();
+
+/** Whether a page has an id. The ids of a page are looked for once, as hundreds of links lead into some. */
+function hasAnchor(texts: ReadonlyMap<string, string>, page: string, anchor: string): boolean {
+  const pages = known.get(texts) ?? new Map<string, ReadonlySet<string>>();
+  known.set(texts, pages);
+  const ids = pages.get(page) ?? idsOf(texts.get(page) ?? '');
+  pages.set(page, ids);
+  return ids.has(anchor);
+}
+
+const idsOf = (html: string) =>
+  new Set([...html.matchAll(/ id="([^"]*)"/g)].map(([, id]) => id ?? ''));
