@@ -5,6 +5,7 @@ export type Stage =
   | 'edition'
   | 'pages'
   | 'cards'
+  | 'document'
   | 'links'
   | 'search'
   | 'checksums';

@@ -2,6 +2,7 @@ import { readFileSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import type { AstroIntegration } from 'astro';
+import { measureStage } from '../../formulary/stages.ts';
 import { chapterHtml } from '../../handbook/book/chapter-html.ts';
 import { bookParts } from '../../handbook/book/chapters.ts';
 import { siteInput } from '../input.ts';
@@ -15,6 +16,7 @@ export function printDocument(): AstroIntegration {
     name: 'print-document',
     hooks: {
       'astro:build:done': ({ dir }) => {
+        const start = performance.now();
         const folder = fileURLToPath(dir);
         const file = join(folder, 'print.html');
         const chapters = new Map(
@@ -32,6 +34,7 @@ export function printDocument(): AstroIntegration {
           },
         );
         writeFileSync(file, document);
+        measureStage('document', start);
       },
     },
   };
