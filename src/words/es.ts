@@ -24,6 +24,7 @@ import { marginWords } from './es/margin.ts';
 import { materialPages } from './es/material-pages.ts';
 import { methodWords } from './es/methods.ts';
 import { methodsPage } from './es/methods-page.ts';
+import { printPage } from './es/print-page.ts';
 import { profileWords, propertyNames, propertyUnits } from './es/profile.ts';
 import { safetyPage } from './es/safety.ts';
 import { safetySections } from './es/safety-sections.ts';
@@ -65,6 +66,7 @@ export const spanish: Catalogue = {
   materialPages,
   methodWords,
   methodsPage,
+  printPage,
   profileWords,
   propertyNames,
   propertyUnits,
