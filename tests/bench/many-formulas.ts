@@ -11,6 +11,8 @@ import { sitePages } from '../support/site-files.ts';
 export interface FindSite {
   readonly folder: string;
   readonly formulas: number;
+  /** The code of one of them. */
+  readonly code: string;
   /** All that can be found, formulas or not. */
   readonly pages: number;
   /** What the finder loads before it is asked anything. */
@@ -57,6 +59,7 @@ export async function manyFormulas(site: string, count: number | null): Promise<
   return {
     folder,
     formulas: rows.codes.length,
+    code: rows.codes[17] ?? '',
     pages: pages.length + others.length,
     data,
     properties: rows.properties.length,
