@@ -39,7 +39,7 @@ export const safetySections: SameShape<typeof english> = [
     id: 'equipment',
     title: 'Qué ponerse',
     items: [
-      'Gafas de protección que cierren todo alrededor, o una pantalla facial sobre ellas. Los anteojos comunes no bastan. Sin lentes de contacto.',
+      'Gafas protectoras que cierren todo alrededor, o una pantalla facial sobre ellas. Los anteojos comunes no bastan. Sin lentes de contacto.',
       'Los guantes que la ficha de datos de seguridad indica para el álcali, lo bastante largos para cubrir la muñeca. Busque agujeros; cámbielos cuando les entre una salpicadura.',
       'Mangas largas por encima de los guantes, pantalón largo por encima de calzado cerrado, un delantal que no se empape.',
       'Lleve todo puesto hasta que los utensilios estén limpios. Después lave los guantes antes de quitárselos.',
@@ -87,7 +87,7 @@ export const safetySections: SameShape<typeof english> = [
       'Pese las líneas de un solo tamaño de lote de arriba abajo, cada una en un vaso propio, y marque cada una. Cierre el álcali en cuanto lo haya pesado; toma agua y dióxido de carbono del aire y pierde fuerza.',
       'Si no sabe con certeza si una línea se pesó, empiece de nuevo ese recipiente, y aparte con etiqueta lo que contiene.',
       'Batidora: encendida solo bajo la superficie, apagada antes de sacarla.',
-      'Guantes y gafas de protección también con el jabón fresco: al desmoldar, al cortar y al lavar.',
+      'Guantes y gafas protectoras también con el jabón fresco: al desmoldar, al cortar y al lavar.',
       'Ninguna pastilla sale del taller antes de que se haya medido su álcali libre y comparado con el límite que fija su fórmula.',
     ],
   },
@@ -120,7 +120,7 @@ export const safetySections: SameShape<typeof english> = [
     items: [
       'Según la ficha de datos de seguridad y las reglas del lugar; pregunte a la empresa de aguas antes de echar por un desagüe algo fuerte.',
       'Álcali barrido, absorbente con solución alcalina y masa de jabón fallida: en un recipiente de plástico con tapa, con su nombre y la fecha, hasta que se lo lleve alguien capacitado.',
-      'Los sacos y envases de álcali vacíos no están vacíos. Enjuáguelos con guantes y gafas de protección puestos, donde las reglas locales lo permitan, e inutilice la etiqueta.',
+      'Los sacos y envases de álcali vacíos no están vacíos. Enjuáguelos con guantes y gafas protectoras puestos, donde las reglas locales lo permitan, e inutilice la etiqueta.',
       'Un lote dudoso se etiqueta, se aparta y se guarda bajo llave. Decide quien formula.',
     ],
   },

@@ -7,8 +7,8 @@ import type { SameShape } from '../same-shape.ts';
 /** What hangs on the wall. */
 export const safetyPoster: SameShape<typeof englishPoster> = {
   title: 'Solución alcalina: cartel para la pared',
-  rule: 'El álcali al agua. Nunca el agua sobre el álcali.',
-  wear: 'Gafas de protección cerradas, guantes, mangas largas, delantal, calzado cerrado: desde la primera pesada hasta el último recipiente enjuagado.',
+  rule: 'El álcali al agua. Nunca agua sobre el álcali.',
+  wear: 'Gafas protectoras cerradas, guantes, mangas largas, delantal, calzado cerrado: desde la primera pesada hasta el último recipiente enjuagado.',
   metals: 'Ni aluminio, ni zinc, ni estaño.',
   alone: 'Nunca a solas en el edificio.',
   spill: 'Derrame: mantenga lejos a los demás, barra en seco, sin ácido, después mucha agua.',
@@ -26,7 +26,7 @@ export const safetyRecord: SameShape<typeof englishRecord> = {
     'Ha leído la página de seguridad y las fichas de datos de seguridad de ambos álcalis',
     'Ha encontrado el grifo, el lavaojos, el botiquín, el teléfono y la salida, y ha probado el agua',
     'Conoce los números del recuadro de emergencia y ha dicho qué hay que comunicar',
-    'Se ha puesto gafas de protección y guantes de su talla, y sabe cuándo cambiarlos',
+    'Se ha puesto gafas protectoras y guantes de su talla, y sabe cuándo cambiarlos',
     'Ha explicado por qué el álcali se echa al agua, y lo ha mostrado con una persona experimentada al lado',
     'Sabe qué recipientes no deben tocar la solución alcalina',
     'Sabe qué hacer con la solución alcalina en un ojo, en la piel, ingerida o inhalada; y que ahí no se neutraliza nada',

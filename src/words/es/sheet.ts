@@ -44,7 +44,7 @@ export const sheetWords: SameShape<typeof english> = {
     scale: (name, step) => `${name}, escalones de ${step} ${massUnit()}`,
     checkWeight: 'Pesa de control / lectura',
     ready:
-      'Llevo puestos las gafas de protección, los guantes y el delantal, el grifo funciona y hay otra persona en el edificio.',
+      'Llevo puestos las gafas protectoras, los guantes y el delantal, el grifo funciona y hay otra persona en el edificio.',
     cautions: 'Las advertencias de esta hoja están leídas.',
     otherwise:
       'Otra partida, otra revisión, una balanza dudosa: deténgase y pregunte a quien formula. Nunca adapte las cantidades a mano.',
@@ -62,7 +62,7 @@ export const sheetWords: SameShape<typeof english> = {
       by: 'Por',
       checked: 'Visto',
     },
-    order: 'El álcali al agua, nunca el agua sobre el álcali.',
+    order: 'El álcali al agua, nunca agua sobre el álcali.',
     afterCook:
       'Alto. Mida el álcali libre del jabón cocido. Nada de lo que sigue entra antes de que haya pasado la prueba.',
     afterCookLimit: (limit) => `Hallado / máximo ${limit}`,

@@ -51,10 +51,10 @@ changes:
 
 ## Method
 
-1. Lea la ficha de datos de seguridad del proveedor. Gafas de protección y guantes puestos; ningún recipiente
+1. Lea la ficha de datos de seguridad del proveedor. Gafas protectoras y guantes puestos; ningún recipiente
    de aluminio.
 2. Pese :water de agua fría en una jarra de acero o de polipropileno.
-3. Incorpore :alkali[sodium] de hidróxido de sodio poco a poco y removiendo. El álcali al agua, nunca el agua
+3. Incorpore :alkali[sodium] de hidróxido de sodio poco a poco y removiendo. El álcali al agua, nunca agua
    sobre el álcali. Deje que la solución alcalina se enfríe a :temperature[lye].
 4. Funda :weight[coconut] de aceite de coco, añada :weight[olive] de aceite de oliva y :weight[castor] de
    aceite de ricino, y lleve las grasas a :temperature[fats].
