@@ -1,7 +1,7 @@
 import type { FatRecord } from '../reference/material-records.ts';
 import type { Reference } from '../reference/reference.ts';
 import { words } from '../words/catalogue.ts';
-import { plain } from '../words/numbers.ts';
+import { fromTo, plain } from '../words/numbers.ts';
 import { sourceName } from './names.ts';
 
 export interface CompositionTable {
@@ -49,5 +49,5 @@ export function compositionTable(fat: FatRecord, reference: Reference): Composit
 
 function shareText({ min, max }: FatRecord['compositions'][number]['acids'][number]): string {
   if (min === null) return words.fatPages.atMost(max);
-  return min === max ? plain(max) : `${plain(min)} to ${plain(max)}`;
+  return fromTo(plain(min), plain(max));
 }

@@ -2,7 +2,7 @@ import type { FatRecord } from '../reference/material-records.ts';
 import type { Reference } from '../reference/reference.ts';
 import type { CompositionRecord, ValueRecord } from '../reference/values.ts';
 import { words } from '../words/catalogue.ts';
-import { plain } from '../words/numbers.ts';
+import { fromTo, plain } from '../words/numbers.ts';
 import { recordText } from './fat-sheet.ts';
 import { sourceName } from './names.ts';
 import { whyCompositionUsed, whyValueUsed } from './why-used.ts';
@@ -91,7 +91,7 @@ function compositionContradictions(fat: FatRecord, reference: Reference): Contra
         unit: '%',
         records: rows.map((row) => ({
           ...originOf(row.composition, reference),
-          text: row.min === row.max ? plain(row.min) : `${plain(row.min)} to ${plain(row.max)}`,
+          text: fromTo(plain(row.min), plain(row.max)),
           used: row === usedRow,
           apart: usedRow ? gap(row, usedRow) : null,
           why: whyCompositionUsed(row.composition, used, reference.sources),

@@ -5,7 +5,7 @@ import type { FatRecord } from '../reference/material-records.ts';
 import type { Reference } from '../reference/reference.ts';
 import type { ValueRecord } from '../reference/values.ts';
 import { words } from '../words/catalogue.ts';
-import { plain, range } from '../words/numbers.ts';
+import { fromTo, plain, range } from '../words/numbers.ts';
 
 /** Where a fat goes in: a formula and how much of it. */
 export interface FatUse {
@@ -51,7 +51,7 @@ export function recordText(record: ValueRecord): string {
     return statistic === 'mean' ? `${text.mean(samples)}: ${plain(value)}` : plain(value);
   }
   if (min !== null && max !== null) {
-    return decimals === 0 ? range(min, max, 0) : `${plain(min)} to ${plain(max)}`;
+    return decimals === 0 ? range(min, max, 0) : fromTo(plain(min), plain(max));
   }
   return max !== null ? text.atMost(max) : text.atLeast(min ?? 0);
 }

@@ -13,7 +13,7 @@ export const cautionNames: SameShape<typeof english> = {
   'lye-heat-near-boiling': 'La solución casi llega a hervir',
   'lye-hot': 'Solución alcalina caliente',
   'lye-heat-unknown': 'Calor de la solución desconocido',
-  'lye-stronger-than-written': 'Solución más fuerte de lo escrito',
+  'lye-stronger-than-written': 'Solución más fuerte que en la fórmula',
   'lye-near-saturation': 'Solución cerca de la saturación',
   'potassium-lye': 'Solución con hidróxido de potasio',
   'stock-lye': 'Con una solución de reserva',

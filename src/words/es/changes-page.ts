@@ -34,7 +34,7 @@ export const changesPage: SameShape<typeof english> = {
   none: '–',
   share: (name) => `${name}, proporción`,
   parts: { water: 'Agua', heldBack: 'Agua reservada' },
-  superfat: 'Sobreengrasado, como está escrito',
+  superfat: 'Sobreengrasado, según la fórmula',
   lowestExpanded: 'Sobreengrasado mínimo, intervalo expandido',
   lowestWorstCase: 'Sobreengrasado mínimo, peor caso',
   profile: {

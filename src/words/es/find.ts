@@ -6,7 +6,7 @@ import type { SameShape } from '../same-shape.ts';
 
 export const findWords: SameShape<typeof english> = {
   properties: {
-    superfat: ['Sobreengrasado, como está escrito', '%'],
+    superfat: ['Sobreengrasado, según la fórmula', '%'],
     'lowest-superfat': ['Sobreengrasado mínimo', '%'],
     'final-superfat': ['Sobreengrasado, final', '%'],
     'saponification-value': ['Índice de saponificación', 'mg KOH/g'],

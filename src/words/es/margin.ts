@@ -3,13 +3,13 @@ import { fixed, plain } from '../numbers.ts';
 import type { SameShape } from '../same-shape.ts';
 
 export const marginWords: SameShape<typeof english> = {
-  written: 'como está escrito',
+  written: 'según la fórmula',
   expanded: 'intervalo expandido',
   worst: 'peor caso',
   withoutLots: 'intervalo expandido sin las partidas medidas, con intervalos comerciales',
   freeAlkali: 'desde aquí, álcali libre',
   summary: (written, expanded, worst) =>
-    `Sobreengrasado como está escrito: ${plain(written, 1)} %. Intervalo expandido: de ${fixed(expanded[0], 1)} a ${fixed(expanded[1], 1)} %. Peor caso: de ${fixed(worst[0], 1)} a ${fixed(worst[1], 1)} %.`,
+    `Sobreengrasado según la fórmula: ${plain(written, 1)} %. Intervalo expandido: de ${fixed(expanded[0], 1)} a ${fixed(expanded[1], 1)} %. Peor caso: de ${fixed(worst[0], 1)} a ${fixed(worst[1], 1)} %.`,
   crossesWorst:
     'El peor caso baja de cero: con cada grasa en el extremo bajo de su intervalo y el álcali en su punto más fuerte, quedaría álcali libre.',
   crossesExpanded:
