@@ -34,7 +34,7 @@ export const superfatCautions: SameShape<typeof english> = {
   'wax-in-cold-process': (n) => ({
     text: `Cera en proceso en frío: ${n.materials} (${plain(n.share, 1)} % de las grasas). El álcali se calcula también para ella, pero puede que apenas reaccione.`,
     action:
-      'Fúndala por completo y trabaje en caliente. Haga el ensayo de álcali libre antes de liberar.',
+      'Fúndala por completo y mantenga calientes las grasas mientras trabaja. Haga el ensayo de álcali libre antes de liberar.',
   }),
   'superfat-high': (n) => ({
     text: `El ${plain(n.superfat, 1)} % de la grasa queda sin saponificar, más de ${plain(n.limit)} %. El jabón puede quedar blando y enranciarse pronto.`,

@@ -11,16 +11,16 @@ export const changesPage: SameShape<typeof english> = {
   first:
     'No se indicó ninguna edición anterior al generar esta, así que no hay con qué comparar. Las revisiones de cada fórmula están más abajo.',
   nothing: 'Nada ha cambiado desde entonces.',
-  addedTitle: 'Nuevo',
+  addedTitle: 'Nuevas',
   back: 'de nuevo en uso',
-  changedTitle: 'Cambiado',
+  changedTitle: 'Cambiadas',
   changedLead: 'Gramos para 1000 g de grasas, con las partidas vigentes en cada momento.',
-  reweighedTitle: 'Se pesa de otro modo',
+  reweighedTitle: 'Se pesan de otro modo',
   reweighedLead:
     'La fórmula es la misma; las partidas, las balanzas o los tamaños de lote no. Las hojas impresas antes quedan sustituidas.',
-  withdrawnTitle: 'Retirado',
+  withdrawnTitle: 'Retiradas',
   withdrawn: (on, reason) => `el ${dateText(on)}: ${reason}`,
-  goneTitle: 'Ya no está',
+  goneTitle: 'Ya no están',
   historyTitle: 'Revisiones',
   columns: {
     what: 'Qué',

@@ -28,7 +28,7 @@ export const lyeHeatWords: SameShape<typeof english> = {
   boils:
     'Según este cálculo, la solución alcalina llega a su punto de ebullición. Puede salpicar y desbordarse al hervir: añada el álcali en porciones pequeñas y enfríe entre una y otra.',
   crystals:
-    'La solución alcalina contiene más de lo que se disuelve a la temperatura inicial. Lo que se disuelve en caliente sale como cristales al enfriarse: úsela tibia y mire el fondo de la jarra antes de verter.',
+    'La solución alcalina contiene más de lo que se disuelve a la temperatura inicial. Lo que se disuelve en caliente sale como cristales al enfriarse: úsela antes de que se enfríe y mire el fondo de la jarra antes de verter.',
   strongest:
     'Que no haya número significa la advertencia más fuerte, no una solución suave. Trátela como si hirviera: el álcali al agua en porciones pequeñas, agua fría, enfriamiento alrededor de la jarra, un recipiente que resista el calor y lleno como máximo hasta la mitad, pantalla facial, nadie inclinado sobre ella, y un termómetro antes de hacer cualquier otra cosa con ella.',
   ofStock:

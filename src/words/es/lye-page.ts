@@ -46,7 +46,7 @@ export const lyePage: SameShape<typeof english> = {
       lot: 'Partida',
     },
     unit: 'mg KOH por g',
-    alkali: (assay) => `tal como se pesa, con ${assay} %`,
+    alkali: (assay) => `tal como se pesa, riqueza ${assay} %`,
     solution: (assay) => `solución al ${assay} %, tal como se pesa`,
     noLot: '—',
   },
