@@ -66,7 +66,7 @@ function change(
       at[key] = random.pick(EDGES);
     },
     () => {
-      at[key] = random.pick(MISFITS);
+      at[key] = structuredClone(random.pick(MISFITS));
     },
     () => {
       if (Array.isArray(holder)) holder.splice(Number(key), 1);

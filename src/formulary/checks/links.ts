@@ -36,6 +36,12 @@ export function checkLinks(
       }
     } else if (node.type === 'image') {
       checkImage(node, images, report);
+    } else if (node.type === 'footnoteReference') {
+      report.at(startOf(node), 'formula/link-target', {
+        found: `the footnote "${node.identifier}"`,
+        expected: 'what it says in the text itself',
+        advice: 'a bench sheet has no foot where its reader looks',
+      });
     } else if (node.type === 'imageReference') {
       report.at(startOf(node), 'formula/image-address', {
         found: 'an image by reference',

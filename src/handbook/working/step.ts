@@ -37,6 +37,8 @@ export type SectionId = keyof typeof workingWords.sections;
 
 /** What rounding the printed numbers may do to a result, beside half a unit of the result's own last digit. */
 const RELATIVE = 5e-5;
+/** Numbers are printed with twelve decimals at most; products of them that are smaller than this are nothing. */
+const NOTHING = 1e-11;
 
 /**
  * A step whose printed numbers give its printed result. Throws a RangeError where they do not: a page that an
@@ -62,7 +64,7 @@ export function step(parts: {
   const id = of ? `${kind}-${of}` : kind;
   const result = figure(value, digits);
   const found = evaluate(parts.numbers);
-  const allowed = Math.max(Math.abs(value) * RELATIVE, within);
+  const allowed = Math.max(Math.abs(value) * RELATIVE, within, NOTHING);
   if (!(Math.abs(found - evaluate(result)) <= allowed + lastDigit(result) / 2)) {
     throw new RangeError(`Working ${id}: the printed numbers give ${found}, not ${value}`);
   }
