@@ -33,7 +33,12 @@ const FILES: readonly DataFile[] = [
     )
     .sort(),
   ...FATS.map((id) => `fats/${id}.yaml`),
-].map((name) => ({ name, file: `data/${name}`, text: readFileSync(`data/${name}`, 'utf8') }));
+].map((name) => ({
+  name,
+  file: `data/${name}`,
+  text: readFileSync(`data/${name}`, 'utf8'),
+  packaged: true,
+}));
 
 const LOTS = `fats:
   - { fat: olive, lot: O-1, saponification-value: 190.4, uncertainty: 0.8, method: ISO 3657, status: released, retest-by: 2029-06-01 }
@@ -46,8 +51,8 @@ const BLENDS = `base:
 `;
 const ALL: readonly DataFile[] = [
   ...FILES,
-  { name: 'lots.yaml', file: 'data/lots.yaml', text: LOTS },
-  { name: 'blends.yaml', file: 'data/blends.yaml', text: BLENDS },
+  { name: 'lots.yaml', file: 'data/lots.yaml', text: LOTS, packaged: false },
+  { name: 'blends.yaml', file: 'data/blends.yaml', text: BLENDS, packaged: false },
 ];
 /** The shop's own files are those that people write. */
 const WRITTEN = [
