@@ -11,6 +11,7 @@ import { finderData } from '../site/find/finder-data.ts';
 import { readSavedSearches } from '../site/find/saved-searches-fs.ts';
 import type { SiteInput } from '../site/input.ts';
 import type { Problem } from '../words/problem.ts';
+import { voice } from '../words/voice.ts';
 
 export type LoadedSite =
   | { readonly ok: true; readonly input: SiteInput; readonly problems: readonly Problem[] }
@@ -63,5 +64,5 @@ function packagedReference(
 ): ReadReference {
   return resolve(packaged) === resolve(data)
     ? { reference: used, problems: [] }
-    : readData(packaged, packaged);
+    : readData(packaged, packaged, voice().locale);
 }

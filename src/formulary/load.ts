@@ -73,9 +73,12 @@ export function loadParts(
   return { reference, formulas, problems, codes: read.codes };
 }
 
-/** The data of a shop, over the data that come with the code. */
-export const readData = (data: string, packaged: string = PACKAGED_DATA): ReadReference =>
-  readReference(dataFolders(packaged, data).map(asTyped));
+/** The data of a shop, over the data that come with the code; these in the language of `locale`, else the shop's. */
+export const readData = (
+  data: string,
+  packaged: string = PACKAGED_DATA,
+  locale: string | null = null,
+): ReadReference => readReference(dataFolders(packaged, data).map(asTyped), locale);
 
 /** A shop without a folder of its own and the shop whose folder is the packaged one read it once. */
 function dataFolders(packaged: string, shop: string): readonly string[] {

@@ -19,6 +19,7 @@ export interface EvidenceLine {
   readonly agrees: boolean;
   readonly unit: string;
   readonly source: string;
+  readonly how: string;
   readonly note: string | null;
 }
 
@@ -48,7 +49,6 @@ export function evidenceCounts(rows: readonly EvidenceRow[]) {
 
 function lineOf(row: EvidenceRow, reference: Reference): EvidenceLine {
   const decimals = decimalsFor(row.published);
-  const how = words.frame.how[row.how];
   return {
     id: row.id,
     subject: row.subject,
@@ -58,7 +58,8 @@ function lineOf(row: EvidenceRow, reference: Reference): EvidenceLine {
     deviation: row.deviation === 0 ? words.evidencePage.inside : fixed(row.deviation, decimals),
     agrees: row.agrees,
     unit: row.unit,
-    source: `${sourceName(reference, row.source)}, ${row.at} (${how})`,
+    source: `${sourceName(reference, row.source)}, ${row.at}`,
+    how: words.frame.how[row.how],
     note: [row.note, row.disagreement].filter((part) => part !== null).join('. ') || null,
   };
 }

@@ -61,8 +61,19 @@ export interface RawData {
   readonly opened: readonly OpenedFile<unknown>[];
 }
 
-/** Opens every file with its schema. `folder` names the place of files that are missing. */
-export function openAll(files: readonly DataFile[], folder: string, problems: Problem[]): RawData {
+/** Opens every file with its schema. `folder` names the place of files that are missing; `locale` as `referenceFrom`. */
+export function openAll(
+  files: readonly DataFile[],
+  {
+    folder,
+    locale,
+    problems,
+  }: {
+    readonly folder: string;
+    readonly locale: string | null;
+    readonly problems: Problem[];
+  },
+): RawData {
   const byName = new Map(files.map((file) => [file.name, file]));
   const opened: OpenedFile<unknown>[] = [];
   const open = <T>(name: string, schema: z.ZodType<T>): OpenedFile<T> | null => {
@@ -82,7 +93,7 @@ export function openAll(files: readonly DataFile[], folder: string, problems: Pr
     return result;
   };
   const shop = open('shop.yaml', shopSchema);
-  const language = languageOf(shop?.value.locale ?? DATA_LANGUAGE);
+  const language = languageOf(locale ?? shop?.value.locale ?? DATA_LANGUAGE);
   return {
     sources: open('sources.yaml', sourcesSchema),
     elements: open('elements.yaml', elementsSchema),

@@ -10,9 +10,12 @@ const START = { line: 1, column: 1 };
 /**
  * Reads the data folders, which lie over one another: a file of a later folder replaces the one of the same
  * name; `shop.yaml`, `lots.yaml`, `blends.yaml` and `prices.yaml` count in the last folder only. Never throws for what
- * stands in the files. `reference` is `null` where there is any error.
+ * stands in the files. `reference` is `null` where there is any error. `locale` as `referenceFrom`.
  */
-export function readReference(folders: readonly string[]): ReadReference {
+export function readReference(
+  folders: readonly string[],
+  locale: string | null = null,
+): ReadReference {
   const problems: Problem[] = [];
   const files = new Map<string, DataFile>();
   const last = folders.at(-1) ?? 'data';
@@ -37,12 +40,12 @@ export function readReference(folders: readonly string[]): ReadReference {
   }
   if (problems.length > 0) {
     // what is missing only because it could not be read is not reported a second time
-    const rest = referenceFrom([...files.values()], last).problems.filter(
+    const rest = referenceFrom([...files.values()], last, locale).problems.filter(
       ({ rule }) => rule !== 'data/missing-file',
     );
     return { reference: null, problems: [...problems, ...rest] };
   }
-  return referenceFrom([...files.values()], last);
+  return referenceFrom([...files.values()], last, locale);
 }
 
 /** YAML files of a data folder and its known sub-folders, by code point. */

@@ -28,14 +28,19 @@ export interface ReadReference {
 
 /**
  * From the texts of the data files to the checked reference. Pure; every problem at once, as far as one does
- * not hide the next. `folder` names the place of files that are missing.
+ * not hide the next. `folder` names the place of files that are missing; names and prose of the packaged data come
+ * in the language of `locale`, by default the shop's.
  */
-export function referenceFrom(files: readonly DataFile[], folder: string): ReadReference {
+export function referenceFrom(
+  files: readonly DataFile[],
+  folder: string,
+  locale: string | null = null,
+): ReadReference {
   const problems: Problem[] = [];
-  const raw = openAll(files, folder, problems);
+  const raw = openAll(files, { folder, locale, problems });
   const { language, shop } = raw;
-  const locale = shop?.value.locale;
-  const phrases = language && locale ? phrasesIn(language.value.phrases, locale) : {};
+  const spokenIn = locale ?? shop?.value.locale;
+  const phrases = language && spokenIn ? phrasesIn(language.value.phrases, spokenIn) : {};
   const spoken = language ? translated(raw, language, phrases) : raw;
   const reference = assemble(spoken, phrases);
   const broken = problems.some(({ severity }) => severity === 'error');
@@ -96,7 +101,7 @@ function assemble(raw: RawData, phrases: Reference['phrases']): Reference | null
   const blends = raw.blends
     ? blendsFrom(raw.blends.value, { fats, fatIds }, new Set(taken.keys()), raw.blends.report)
     : new Map<string, never>();
-  const tables = everyTable(raw.tables) ? modelTables(raw.tables, sources) : null;
+  const tables = everyTable(raw.tables) ? modelTables(raw.tables) : null;
   if (!additives || !liquids || !shop || !tables || !raw.cautions || !raw.soapGrades) return null;
   const cautionThresholds = cautionThresholdsFrom(
     raw.cautions.value,

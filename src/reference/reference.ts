@@ -15,6 +15,9 @@ import type { Blend, Shop } from './shop-records.ts';
 import type { TableName } from './tables.ts';
 import type { How, Source, ValueRecord } from './values.ts';
 
+/** A place in a source, and how what stands there is known. */
+export type Cited = Pick<TableSet, 'source' | 'at' | 'how'>;
+
 /** One set of points that one source gives for one curve. */
 export interface TableSet {
   readonly solute: 'sodium-hydroxide' | 'potassium-hydroxide' | 'potassium-carbonate';
@@ -53,9 +56,9 @@ export interface Reference {
     readonly lyeDensity: Readonly<Record<Cation, Curve>>;
     /** Temperature at which a stock lye begins to crystallise [degC] by mass percent; empty without data. */
     readonly crystallisation: Readonly<Record<Cation, Curve>>;
-    /** Where the heats of solution and the heat capacities come from, in words for the working. */
-    readonly lyeHeatSources: Readonly<Record<Cation, readonly string[]>>;
-    readonly heatCapacitySources: Readonly<Record<Cation, readonly string[]>>;
+    /** Where the heats of solution and the heat capacities come from, for the working. */
+    readonly lyeHeatSources: Readonly<Record<Cation, readonly Cited[]>>;
+    readonly heatCapacitySources: Readonly<Record<Cation, readonly Cited[]>>;
     /** Every set of every table as its source gives it, the ones that no model uses among them. */
     readonly sets: Readonly<Record<TableName, readonly TableSet[]>>;
   };

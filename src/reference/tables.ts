@@ -4,7 +4,6 @@ import type { Cation } from '../chemistry/materials.ts';
 import type { Reference, TableSet } from './reference.ts';
 import type { DataReport } from './report.ts';
 import type { RawTable } from './schema/table.ts';
-import type { Source } from './values.ts';
 
 /** The tables that the models use, by file name, with the units that their axes must have. */
 export const TABLES = {
@@ -51,7 +50,6 @@ export function checkTable(name: TableName, table: RawTable, report: DataReport)
 /** What the models take: the first set of each solute, all heat capacities at 25 degC inside their fit. */
 export function modelTables(
   opened: Readonly<Record<TableName, { readonly value: RawTable }>>,
-  sources: ReadonlyMap<string, Source>,
 ): Reference['tables'] {
   const sets = (name: TableName, cation: Cation) =>
     opened[name].value.sets.filter(({ solute }) => solute === SOLUTE[cation]);
@@ -72,10 +70,7 @@ export function modelTables(
     boilingPoint: first('boiling-point', cation),
   });
   const cited = (used: RawTable['sets']) =>
-    used.map(({ source, at, how }) => {
-      const title = sources.get(source)?.title ?? source;
-      return `${title}, ${at}${how === 'from memory' ? ' (from memory)' : ''}`;
-    });
+    used.map(({ source, at, how }) => ({ source, at, how }));
   const used = new Set(
     (['Na', 'K'] as const).flatMap((cation) => [
       ...FIRST_IS_USED.flatMap((name) => sets(name, cation).slice(0, 1)),

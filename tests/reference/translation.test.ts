@@ -3,6 +3,7 @@ import { describe, expect, test } from 'vitest';
 import { parse } from 'yaml';
 import type { z } from 'zod';
 import { DATA_LANGUAGE, languageFile } from '../../src/reference/data-files.ts';
+import { readEvidence } from '../../src/reference/evidence/read-evidence-fs.ts';
 import { referenceFrom } from '../../src/reference/reference-from.ts';
 import type { languageSchema } from '../../src/reference/schema/language.ts';
 import { proseOf, withPhrases } from '../../src/reference/translation.ts';
@@ -128,6 +129,23 @@ describe('a shop that speaks Spanish', () => {
     expect(fats.get('olive')?.notes).toEqual(english.fats.get('olive')?.notes);
     expect(fats.get('trial')?.name).toBe('Grasa de ensayo');
     expect(fats.get('coconut')?.name).toBe('Aceite de coco');
+  });
+
+  test('what is read for a page in another language than the shop’s own follows the page', () => {
+    const { reference } = referenceFrom(PACKAGED, 'data', 'es-MX');
+    expect(reference?.fats.get('olive')?.name).toBe('Aceite de oliva');
+  });
+
+  test('the evidence is told in Spanish and computes the same', () => {
+    const spanish = readEvidence('data', referenceIn('es-ES'));
+    const { rows } = readEvidence('data', english);
+    expect(textsOf(spanish)).toEqual([]);
+    expect(spanish.rows.map(({ id, computed }) => [id, computed])).toEqual(
+      rows.map(({ id, computed }) => [id, computed]),
+    );
+    expect(spanish.rows.map(({ subject }) => subject)).toContain(
+      'Valoración por retroceso del ejemplo impreso',
+    );
   });
 
   test('a problem of a packaged file keeps its place', () => {

@@ -2,7 +2,7 @@ import { interpolate } from '../../chemistry/interpolate.ts';
 import { lyeOf } from '../../chemistry/lye.ts';
 import { HEAT_OF_NEUTRALISATION } from '../../chemistry/lye-heat.ts';
 import { temperature } from '../../words/measures.ts';
-import type { Working } from './context.ts';
+import { cited, type Working } from './context.ts';
 import { molarMassTerm } from './molar-masses.ts';
 import { type Section, step } from './step.ts';
 import { exact, figure, fractionOf, product, sumOf, symbol } from './term.ts';
@@ -63,7 +63,7 @@ export function heat(working: Working): Section | null {
         numbers: sumOf(figure(perMole - data.newerSetAdds), exact(data.newerSetAdds)),
         value: perMole,
         unit: 'kJ/mol',
-        sources: tables.lyeHeatSources[supply.cation],
+        sources: tables.lyeHeatSources[supply.cation].map((each) => cited(reference, each)),
       }),
       step({
         kind: 'heat-capacity',
@@ -71,7 +71,7 @@ export function heat(working: Working): Section | null {
         numbers: figure(capacity),
         value: capacity,
         unit: 'J/(g K)',
-        sources: tables.heatCapacitySources[supply.cation],
+        sources: tables.heatCapacitySources[supply.cation].map((each) => cited(reference, each)),
       }),
       step({
         kind: 'peak-temperature',

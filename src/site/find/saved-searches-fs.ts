@@ -21,7 +21,11 @@ export function readSavedSearches(
   // a file that is there and cannot be read has been reported with the rest of the data
   if (!read.ok) return { searches: [], problems: [] };
   const problems: Problem[] = [];
-  const opened = openFile({ name: NAME, file, text: read.text, packaged: false }, savedSearchesSchema, problems);
+  const opened = openFile(
+    { name: NAME, file, text: read.text, packaged: false },
+    savedSearchesSchema,
+    problems,
+  );
   if (!opened) return { searches: [], problems };
   const ids = new Set<string>();
   for (const [i, { id, search }] of opened.value.searches.entries()) {
