@@ -78,13 +78,15 @@ describe('files that are not texts', () => {
       3,
     ],
     ['utf16.md', Buffer.from(`\uFEFF${SOUND}`, 'utf16le'), 'formula/not-utf8', 1],
-  ])('%s', (name, content, rule, line) => {
+  ])('%s', async (name, content, rule, line) => {
     const folder = mkdtempSync(join(tmpdir(), 'formulas-'));
     writeFileSync(join(folder, name), content);
     const { formulas, problems } = readFormulas(folder, KNOWN);
     rmSync(folder, { recursive: true });
     expect(formulas).toEqual([]);
     expect(problems).toMatchObject([{ rule, line, column: 1 }]);
+    const said = textOf(problems).replaceAll(`${folder}/`, '');
+    await expect(said).toMatchFileSnapshot(join(FOLDER, `${name}.problems.txt`));
   });
 
   test.skipIf(process.platform === 'win32')('a link to nowhere', () => {
@@ -92,13 +94,15 @@ describe('files that are not texts', () => {
     symlinkSync(join(folder, 'gone'), join(folder, 'a.md'));
     const { problems } = readFormulas(folder, KNOWN);
     rmSync(folder, { recursive: true });
-    expect(problems).toMatchObject([{ rule: 'formula/unreadable' }]);
+    expect(textOf(problems).replaceAll(`${folder}/`, '')).toBe(
+      'a.md:1:1  Found a file that cannot be opened, expected one that may be read; look at its permissions.  [formula/unreadable]\n',
+    );
   });
 
   test('a folder that is not there', () => {
-    expect(readFormulas('no-such-folder', KNOWN).problems).toMatchObject([
-      { rule: 'formulary/missing-folder', file: 'no-such-folder', line: 1, column: 1 },
-    ]);
+    expect(textOf(readFormulas('no-such-folder', KNOWN).problems)).toBe(
+      'no-such-folder:1:1  Found no such folder, expected a folder with one Markdown file for each formula; name the folder with --formulas, or begin with npm run new.  [formulary/missing-folder]\n',
+    );
   });
 });
 

@@ -46,6 +46,14 @@ function load(formulas: readonly string[], lots = '') {
   return loadFormulary({ formulas: join(folder, 'formulas'), data: join(folder, 'data') });
 }
 const SAFE = SOUND.replace('superfat: 5', 'superfat: 8');
+const textOf = ({ problems }: Pick<ReturnType<typeof load>, 'problems'>) =>
+  `${problems
+    .map(problemText)
+    .join('\n')
+    .replace(/\S+(?=formulas\/)/g, '')}\n`;
+/** Where the exact text of a rule is kept, beside those of the broken files. */
+const snapshotOf = (rule: string) =>
+  join(import.meta.dirname, '../broken', `${rule.replace('formula/', '')}.problems.txt`);
 const rulesOf = ({ problems }: ReturnType<typeof load>) => problems.map(({ rule }) => rule);
 
 test('a shop of its own: the packaged fats, no lots of another shop, sorted by code', () => {
@@ -89,14 +97,15 @@ describe('rules that need the whole formulary', () => {
       SAFE.replace('lye-concentration: 32', 'lye-concentration: 45, hold-back: 60'),
       '',
     ],
-  ])('%s', (rule, text, lots) => {
+  ])('%s', async (rule, text, lots) => {
     const loaded = load([text], lots);
     expect(loaded.ok).toBe(false);
     expect(rulesOf(loaded)).toEqual([rule]);
+    await expect(textOf(loaded)).toMatchFileSnapshot(snapshotOf(rule));
   });
 
   // no liquid of the packaged data goes that far
-  test('formula/liquids-out-of-range', () => {
+  test('formula/liquids-out-of-range', async () => {
     const { formula } = readFormula(
       SOUND.replace(
         'targets:',
@@ -110,6 +119,9 @@ describe('rules that need the whole formulary', () => {
       rule: 'liquids-need-more-alkali-than-they-leave-water-for',
       numbers: { remaining: -0.1 },
     };
+    await expect(textOf({ problems: [refusalProblem(formula, breach)] })).toMatchFileSnapshot(
+      snapshotOf('formula/liquids-out-of-range'),
+    );
     expect(refusalProblem(formula, breach)).toMatchObject({
       rule: 'formula/liquids-out-of-range',
       file: 'a.md',
