@@ -6,6 +6,7 @@ import remarkRehype, { type Options } from 'remark-rehype';
 import { visit } from 'unist-util-visit';
 import type { BatchDocument } from '../formulary/document.ts';
 import type { Formula } from '../formulary/formula.ts';
+import { isMethodHeading } from '../formulary/method-heading.ts';
 import { amountText } from './amounts.ts';
 
 interface TextDirective {
@@ -63,7 +64,7 @@ function dropMethodHeading(tree: HastRoot): void {
   const first = tree.children[at];
   if (first?.type !== 'element' || first.tagName !== 'h2') return;
   const [text] = first.children;
-  if (text?.type === 'text' && text.value === 'Method') tree.children.splice(at, 1);
+  if (text?.type === 'text' && isMethodHeading(text.value)) tree.children.splice(at, 1);
 }
 
 function adjust(element: Element): void {

@@ -40,7 +40,13 @@ export const PACKAGED_FILES = [
  * Read from the last folder only: one shop must never weigh by the lots or the scales of another, as it
  * would if these fell through from the packaged data.
  */
-export const SHOP_FILES = ['shop.yaml', 'lots.yaml', 'blends.yaml', 'prices.yaml'];
+export const SHOP_FILES = [
+  'shop.yaml',
+  'lots.yaml',
+  'blends.yaml',
+  'prices.yaml',
+  'own-sources.yaml',
+];
 
 /** Read elsewhere: by the evidence of the models, and by the pages of kept searches. */
 const OTHER_FILES = ['evidence.yaml', 'searches.yaml'];

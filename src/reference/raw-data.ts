@@ -34,6 +34,8 @@ type Raw<S extends z.ZodType> = OpenedFile<z.infer<S>> | null;
 /** Every data file by itself, before anything is looked up across files. */
 export interface RawData {
   readonly sources: Raw<typeof sourcesSchema>;
+  /** `undefined` where the shop has no sources beside the packaged ones. */
+  readonly ownSources: Raw<typeof sourcesSchema> | undefined;
   readonly elements: Raw<typeof elementsSchema>;
   readonly acids: Raw<typeof acidsSchema>;
   readonly additives: Raw<typeof additivesSchema>;
@@ -96,6 +98,9 @@ export function openAll(
   const language = languageOf(locale ?? shop?.value.locale ?? DATA_LANGUAGE);
   return {
     sources: open('sources.yaml', sourcesSchema),
+    ownSources: byName.has('own-sources.yaml')
+      ? open('own-sources.yaml', sourcesSchema)
+      : undefined,
     elements: open('elements.yaml', elementsSchema),
     acids: open('acids.yaml', acidsSchema),
     additives: open('additives.yaml', additivesSchema),

@@ -9,8 +9,8 @@ const START = { line: 1, column: 1 };
 
 /**
  * Reads the data folders, which lie over one another: a file of a later folder replaces the one of the same
- * name; `shop.yaml`, `lots.yaml`, `blends.yaml` and `prices.yaml` count in the last folder only. Never throws for what
- * stands in the files. `reference` is `null` where there is any error. `locale` as `referenceFrom`.
+ * name; `shop.yaml`, `lots.yaml`, `blends.yaml`, `prices.yaml` and `own-sources.yaml` count in the last folder only.
+ * Never throws for what stands in the files. `reference` is `null` where there is any error. `locale` as `referenceFrom`.
  */
 export function readReference(
   folders: readonly string[],

@@ -53,7 +53,7 @@ function assemble(raw: RawData, phrases: Reference['phrases']): Reference | null
     const table = raw.tables[name];
     if (table) checkTable(name, table.value, table.report);
   }
-  const sources = raw.sources && sourcesFrom(raw.sources.value);
+  const sources = raw.sources && sourcesFrom({ ...raw.sources.value, ...raw.ownSources?.value });
   if (sources) {
     for (const { value, report } of raw.opened) reportUnknownSources(value, sources, report);
   }

@@ -37,7 +37,11 @@ export function reportUnknownSources(
       report.in(at, 'data/unknown-source', {
         found: `source "${inner}"`,
         expected: 'an id from data/sources.yaml',
-        advice: didYouMean(inner, sources.keys(), 'add a record for it there'),
+        advice: didYouMean(
+          inner,
+          sources.keys(),
+          'add a record for it there, or in own-sources.yaml',
+        ),
       });
     }
     reportUnknownSources(inner, sources, report, at);

@@ -1,10 +1,11 @@
 import type { Heading, Node, Root } from 'mdast';
 import { visit } from 'unist-util-visit';
 import type { Place } from '../../reference/yaml.ts';
+import { isMethodHeading } from '../method-heading.ts';
 import type { Report } from '../report.ts';
 import { textOf } from '../text-of.ts';
 
-/** No HTML, headings from level 2 without gaps, and a section `Method` with numbered steps. */
+/** No HTML, headings from level 2 without gaps, and a section `Method`, or that in another language, with numbered steps. */
 export function checkStructure(method: Root, bodyStart: Place, report: Report): void {
   let level = 1;
   visit(method, (node) => {
@@ -48,9 +49,7 @@ export function checkStructure(method: Root, bodyStart: Place, report: Report): 
 }
 
 const isMethod = (node: Node): boolean =>
-  node.type === 'heading' &&
-  (node as Heading).depth === 2 &&
-  textOf(node).trim().toLowerCase() === 'method';
+  node.type === 'heading' && (node as Heading).depth === 2 && isMethodHeading(textOf(node));
 
 /** Where a node begins; every node of a parsed file has a place. */
 export const startOf = ({ position }: Node): Place => ({

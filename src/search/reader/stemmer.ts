@@ -1,4 +1,4 @@
-import porter2 from 'wink-porter2-stemmer';
+import { stemmers } from './stemmers/all.ts';
 
 /** The stem of one lower-case word without marks. */
 export type Stem = (word: string) => string;
@@ -9,20 +9,12 @@ export type Stem = (word: string) => string;
  */
 const LONGEST_WORD = 300;
 
-// the package writes a consonant y as 3, and would give the code QY-013 an end of `01y`
-const english: Stem = (word) =>
-  word.includes('3')
-    ? porter2(word.replaceAll('3', '\u{1}')).replaceAll('\u{1}', '3')
-    : porter2(word);
-
-const stemmers: Readonly<Record<string, Stem>> = { en: english };
-
 /**
  * The stemmer of a language (`en`, `en-gb`), or one that leaves words alone where there is none. `exceptions` are
  * the words of this handbook whose stem in the index is another than the package's; the build finds them.
  */
 export function stemmerFor(language: string, exceptions: Readonly<Record<string, string>>): Stem {
   const stem = stemmers[language.split('-')[0] ?? ''] ?? ((word: string) => word);
-  const known = new Map(Object.entries(exceptions));
-  return (word) => known.get(word) ?? (word.length > LONGEST_WORD ? word : stem(word));
+  const excepted = new Map(Object.entries(exceptions));
+  return (word) => excepted.get(word) ?? (word.length > LONGEST_WORD ? word : stem(word));
 }

@@ -5,7 +5,7 @@ export const checkPage = {
   about: 'whether a printed sheet is the current one; all current digests',
   lead: 'Type what stands at the top of a printed sheet or card. Capitals, dashes and spaces do not matter; one wrong symbol is found.',
   code: 'Code',
-  codeHint: 'as QY-014',
+  codeHint: (code: string) => `as ${code}`,
   digest: 'Weights digest',
   digestHint: 'thirteen symbols, as on the sheet after “Weights”',
   button: 'Check',

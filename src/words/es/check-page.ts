@@ -8,7 +8,7 @@ export const checkPage: SameShape<typeof english> = {
   about: 'si una hoja impresa es la vigente; todos los códigos vigentes',
   lead: 'Escriba lo que figura en la parte superior de una hoja o tarjeta impresa. No importan las mayúsculas, los guiones ni los espacios; un símbolo equivocado se detecta.',
   code: 'Código',
-  codeHint: 'como QY-014',
+  codeHint: (code) => `como ${code}`,
   digest: 'Código de pesadas',
   digestHint: 'trece símbolos, como en la hoja después de “Pesadas”',
   button: 'Verificar',
