@@ -1,4 +1,5 @@
 import type { ComputedFormula, Formulary } from '../../formulary/formulary.ts';
+import { allergenName } from '../../handbook/materials/allergen-name.ts';
 import { nameOf } from '../../handbook/names.ts';
 import type { Trait } from '../../search/finder/finder-data.ts';
 import { words } from '../../words/catalogue.ts';
@@ -67,7 +68,7 @@ export function traitsOf({ formulas, reference }: Formulary): readonly Trait[] {
       id: 'allergens',
       holds: 'many',
       of: (computed) => allergensOf(computed, reference),
-      name: (id) => id,
+      name: allergenName,
     },
     {
       id: 'cautions',

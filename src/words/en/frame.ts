@@ -26,6 +26,14 @@ export const frame = {
     'after-cook': 'after the cook',
     dilution: 'at dilution',
   } as Readonly<Record<string, string>>,
+  allergens: {
+    'tree nuts': 'tree nuts',
+    peanut: 'peanut',
+    soy: 'soy',
+    sesame: 'sesame',
+    milk: 'milk',
+    wheat: 'wheat',
+  } as Readonly<Record<string, string>>,
   severities: { danger: 'Danger', warning: 'Warning', care: 'Care', note: 'Note' },
   batchSize: {
     fats: (grams: number) => `${statedMass(grams)} of fats`,

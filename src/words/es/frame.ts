@@ -28,6 +28,14 @@ export const frame: SameShape<typeof english> = {
     'after-cook': 'después de la cocción',
     dilution: 'en la dilución',
   },
+  allergens: {
+    'tree nuts': 'frutos de cáscara',
+    peanut: 'cacahuete (maní)',
+    soy: 'soya (soja)',
+    sesame: 'sésamo',
+    milk: 'leche',
+    wheat: 'trigo',
+  },
   severities: { danger: 'Peligro', warning: 'Atención', care: 'Cuidado', note: 'Nota' },
   batchSize: {
     fats: (grams) => `${statedMass(grams)} de grasas`,

@@ -1,0 +1,4 @@
+import { words } from '../../words/catalogue.ts';
+
+/** What a source of allergens of the data is called. */
+export const allergenName = (source: string): string => words.frame.allergens[source] ?? source;
