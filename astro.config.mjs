@@ -6,6 +6,7 @@ import { pageClock } from './src/site/integrations/page-clock.ts';
 import { printDocument } from './src/site/integrations/print-document.ts';
 import { relativeLinks } from './src/site/integrations/relative-links.ts';
 import { searchIndex } from './src/site/integrations/search-index.ts';
+import { unusedScripts } from './src/site/integrations/unused-scripts.ts';
 
 // Run through `npm run build` and `npm run dev`: they load the formulary that the pages are made from.
 export default defineConfig({
@@ -20,6 +21,7 @@ export default defineConfig({
   // pictures first: the links are checked against what is there
   integrations: [
     pageClock(),
+    unusedScripts(),
     formulaPictures(),
     benchCards(),
     printDocument(),

@@ -1,21 +1,13 @@
 import { massBalance, massIn } from '../chemistry/balance.ts';
-import { massOfFatsFor } from '../chemistry/batch-size.ts';
 import { fatWeighings } from '../chemistry/blend.ts';
 import type { Charge } from '../chemistry/charge.ts';
 import { superfatMargin } from '../chemistry/margin.ts';
-import {
-  type Breach,
-  type Fraction,
-  type Grams,
-  grams,
-  type Outcome,
-  refused,
-} from '../chemistry/quantity.ts';
-import { reckon } from '../chemistry/reckon.ts';
-import { type WeighedCharge, weigh } from '../chemistry/weigh.ts';
+import { type Breach, type Fraction, given, type Outcome, refused } from '../chemistry/quantity.ts';
+import type { WeighedCharge } from '../chemistry/weigh.ts';
+import { weighSize } from '../chemistry/weigh-size.ts';
 import { yields } from '../chemistry/yields.ts';
 import type { Reference } from '../reference/reference.ts';
-import type { BatchSize, Scale } from '../reference/shop-records.ts';
+import type { BatchSize, Scale, Shop } from '../reference/shop-records.ts';
 import type { BatchDocument } from './document.ts';
 import { percentRange } from './percent-range.ts';
 
@@ -87,46 +79,26 @@ export function weighBatch(
   batch: BatchSize,
   reference: Reference,
 ): Outcome<WeighedCharge> {
-  const fats = massOfFatsFor(batch.size, charge, batch.losses, reference.tables.lyeDensity);
-  if (!fats.ok) return fats;
-  const scaled = reckon(charge.formulation, fats.value, reference.constants);
-  if (!scaled.ok) return scaled;
-  const scales = batchScales(batch, reference.shop.scales);
+  const { shop, tables, constants } = reference;
+  const scales = scalesOf(batch, shop);
   if (!scales.ok) return scales;
-  const { main, fine } = scales.value;
-  const heaviest = heaviestWeighing(scaled.value);
-  if (heaviest > main.capacity) {
-    return refused('weight-above-scale-capacity', { mass: heaviest, capacity: main.capacity });
-  }
-  return weigh(
-    scaled.value,
-    (mass) => (fine && mass <= fine.capacity ? fine : main),
-    reference.shop.largestSuperfatShift / 100,
-    reference.constants,
-  );
+  const weighing = {
+    scales: scales.value,
+    losses: batch.losses,
+    largestShift: shop.largestSuperfatShift / 100,
+    lyeDensity: tables.lyeDensity,
+  };
+  return weighSize(charge, batch.size, weighing, constants);
 }
 
-function batchScales(
-  batch: BatchSize,
-  scales: readonly Scale[],
+/** The scales of a batch size. Refuses `scale-not-known` where the shop has none of that name. */
+export function scalesOf(
+  batch: Pick<BatchSize, 'scale' | 'fineScale'>,
+  { scales }: Pick<Shop, 'scales'>,
 ): Outcome<{ readonly main: Scale; readonly fine: Scale | null }> {
   const main = scales.find(({ id }) => id === batch.scale);
   if (!main) return refused('scale-not-known');
-  return {
-    ok: true,
-    value: { main, fine: scales.find(({ id }) => id === batch.fineScale) ?? null },
-  };
-}
-
-function heaviestWeighing(charge: Charge): Grams {
-  return grams(
-    Math.max(
-      charge.water,
-      ...fatWeighings(charge.fats).map(({ mass }) => mass),
-      ...charge.alkali.map(({ weighedMass }) => weighedMass),
-      ...[...charge.liquids, ...charge.additives, ...charge.afterCookFats].map(({ mass }) => mass),
-    ),
-  );
+  return given({ main, fine: scales.find(({ id }) => id === batch.fineScale) ?? null });
 }
 
 function refusedBatch(batch: BatchSize, breach: Breach): BatchDocument {

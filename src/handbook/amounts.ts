@@ -7,21 +7,22 @@ import { targetText } from './targets.ts';
 /**
  * What a directive in a method prints: `:weight[olive]`, `:alkali[sodium]`, `:water`, `:lye`,
  * `:held-back`, `:temperature[lye]`, `:time[cure]`. Amounts are those of `batch`; without a batch, or
- * where it was refused, they print as words, never as a number. `null` for a directive that names nothing
- * of this formula.
+ * where it was refused, they print as the words `unstated`, never as a number. `null` for a directive that names
+ * nothing of this formula.
  */
 export function amountText(
   name: string,
   label: string,
   formula: Formula,
   batch: BatchDocument | null,
+  unstated: string = words.formulaPage.noAmount,
 ): string | null {
   if (name === 'temperature' || name === 'time') {
     const target = formula.targets[label];
     return target ? targetText(target) : null;
   }
   const weights = batch && !batch.refused ? batch : null;
-  if (!weights) return words.formulaPage.noAmount;
+  if (!weights) return unstated;
   switch (name) {
     case 'weight':
       return lineText(

@@ -32,13 +32,17 @@ const ALLOWED: Schema = {
 
 /**
  * The text of a formula as safe HTML, with its directives turned into the amounts of one batch and its
- * headings one level down. Raw HTML is never passed through. Throws where a directive names nothing of the
+ * headings one level down; without a batch they become the words `unstated`. Raw HTML is never passed through. Throws where a directive names nothing of the
  * formula: the reader has refused those, so one here is a fault of the program.
  */
-export function methodHtml(formula: Formula, batch: BatchDocument | null): string {
+export function methodHtml(
+  formula: Formula,
+  batch: BatchDocument | null,
+  unstated?: string,
+): string {
   const text = (node: TextDirective) => {
     const label = node.children.map(({ value }) => value ?? '').join('');
-    const amount = amountText(node.name, label, formula, batch);
+    const amount = amountText(node.name, label, formula, batch, unstated);
     if (amount === null) throw new Error(`${formula.file}: nothing to print for :${node.name}`);
     return amount;
   };

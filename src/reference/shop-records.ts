@@ -49,6 +49,8 @@ export interface Shop {
   readonly largestSuperfatShift: number;
   /** Soap made before that the shop works into a batch at most, where it states it. [percent of the batter] */
   readonly reworkCap?: number;
+  /** Formula pages reckon sizes between the listed ones, and help when something was weighed wrong. */
+  readonly anySize?: boolean;
   readonly emergency: readonly { readonly label: string; readonly value: string }[];
   readonly rules: readonly string[];
   readonly releaseLimits: readonly ReleaseLimit[];

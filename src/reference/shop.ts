@@ -63,6 +63,7 @@ export function shopFrom(raw: RawShop, report: DataReport): Shop {
     releaseMoisture: raw['release-moisture'],
     largestSuperfatShift: raw['largest-superfat-shift'],
     ...(raw['rework-cap'] === undefined ? {} : { reworkCap: raw['rework-cap'] }),
+    ...(raw['any-size'] && { anySize: true }),
     emergency: raw.emergency,
     rules: raw.rules ?? [],
     releaseLimits: raw['release-limits'],

@@ -1,3 +1,4 @@
+import { anySizePage, anySizeWords } from './en/any-size.ts';
 import { approvalLines } from './en/approval-lines.ts';
 import { breachText } from './en/breaches.ts';
 import { cardWords } from './en/card.ts';
@@ -39,6 +40,8 @@ import { dilutionWords, yieldWords } from './en/yields.ts';
 
 /** Every word that is shown, in English. The other catalogues have its shape. */
 export const english = {
+  anySizePage,
+  anySizeWords,
   approvalLines,
   cautionNames,
   cautionTexts,

@@ -1,4 +1,5 @@
 import type { Catalogue } from './catalogue.ts';
+import { anySizePage, anySizeWords } from './es/any-size.ts';
 import { approvalLines } from './es/approval-lines.ts';
 import { breachText } from './es/breaches.ts';
 import { cardWords } from './es/card.ts';
@@ -40,6 +41,8 @@ import { dilutionWords, yieldWords } from './es/yields.ts';
 
 /** Every word that is shown, in Spanish. */
 export const spanish: Catalogue = {
+  anySizePage,
+  anySizeWords,
   approvalLines,
   cautionNames,
   cautionTexts,

@@ -2,11 +2,13 @@ import { readdirSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { expect, test } from 'vitest';
+import { refusalText } from '../../src/browser/any-size-refusal.ts';
 import { csv } from '../../src/handbook/csv.ts';
 import { EQUATIONS } from '../../src/handbook/equations.ts';
 import { alkaliPerHundred } from '../../src/handbook/fat-sheet.ts';
 import { withSubscripts } from '../../src/handbook/subscripts.ts';
 import { words } from '../../src/words/catalogue.ts';
+import { sizeSheetWords } from '../../src/words/en/any-size.ts';
 import { CONSTANTS } from '../support/materials.ts';
 
 const SRC = fileURLToPath(new URL('../../src', import.meta.url));
@@ -19,7 +21,11 @@ test('every refusal of the core has words of its own', () => {
     for (const [, rule] of text.matchAll(/\brefused\(\s*'([a-z-]+)'/g)) rules.add(rule ?? '');
   }
   expect(rules.size).toBeGreaterThan(10);
-  const wordless = [...rules].filter((rule) => words.breachText(rule, {}) === rule);
+  const wordless = [...rules].filter(
+    (rule) =>
+      words.breachText(rule, {}) === rule &&
+      refusalText({ rule, numbers: {} }, sizeSheetWords.refusals) === rule,
+  );
   expect(wordless).toEqual([]);
 });
 

@@ -129,6 +129,7 @@ export const shopSchema = z
     'release-moisture': z.number().gte(0).lte(40),
     'largest-superfat-shift': z.number().gt(0).lte(5),
     'rework-cap': z.number().gt(0).lte(50).optional(),
+    'any-size': z.boolean().optional(),
     emergency: z.array(z.strictObject({ label: line, value: line })),
     rules: z.array(line).optional(),
     'release-limits': z.array(

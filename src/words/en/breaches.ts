@@ -1,28 +1,12 @@
-import { expectedMass } from '../measures.ts';
-import { fixed, plain } from '../numbers.ts';
+import { plain } from '../numbers.ts';
+import { numberOf as of, weightBreaches } from './weight-breaches.ts';
 
 type Numbers = Readonly<Record<string, number>>;
 
-const of = (numbers: Numbers, name: string, decimals = 2) => {
-  const value = numbers[name];
-  return value === undefined ? '?' : fixed(value, decimals);
-};
-
 /** Why there is no number, by the rule that was left. */
 const reasons: Readonly<Record<string, (numbers: Numbers) => string>> = {
-  'size-too-small-for-scale': (n) =>
-    `Rounding to the scale would move the superfat from ${of(n, 'written')} % to ${of(n, 'weighed')} %, by more than the ${of(n, 'allowed')} points that the shop allows. The size is too small for this scale.`,
-  'weight-below-scale-step': () =>
-    'One of the weights is smaller than half a step of the scale and would round to nothing.',
-  'weight-above-scale-capacity': (n) =>
-    `One of the weights would be ${expectedMass(n.mass ?? Number.NaN)}, more than the ${expectedMass(n.capacity ?? Number.NaN)} that the scale takes.`,
-  'nothing-sure-to-saponify': () =>
-    'With every error against us nothing is left in the pot that is sure to use up the alkali.',
+  ...weightBreaches,
   'scale-not-known': () => 'The shop’s data name no scale for this size.',
-  'stock-weaker-than-lye': () =>
-    'The stock lye already holds more water than the formula asks for. It cannot be made stronger by adding water.',
-  'liquids-need-more-alkali-than-they-leave-water-for': () =>
-    'The fat and acid of the liquids need more alkali than the remaining water can carry.',
   'composition-not-known': (n) =>
     `The fatty acids of ${of(n, 'percentOfFats', 1)} % of the fats are not known, and half a profile is none.`,
   'iodine-value-not-known': () => 'The iodine value of one of the waxes is not known.',
@@ -36,7 +20,6 @@ const reasons: Readonly<Record<string, (numbers: Numbers) => string>> = {
     'The lye is outside the density data, so a volume cannot be turned into a mass.',
   'fat-density-not-known': () =>
     'The density of one of the fats is not known, so a mould volume cannot be turned into a mass.',
-  'losses-out-of-range': () => 'The losses set for this size leave nothing to pour.',
   'dilution-not-weaker': () => 'The dilution asked for is not weaker than the paste.',
 };
 
