@@ -1,9 +1,8 @@
 import type { Breach } from '../chemistry/quantity.ts';
 import { anySizeWords } from '../words/en/any-size.ts';
 import { weightBreaches } from '../words/en/weight-breaches.ts';
-import { statedMass } from '../words/measures.ts';
 
-type Sentence = (numbers: Breach['numbers'], mass: typeof statedMass) => string;
+type Sentence = (numbers: Breach['numbers']) => string;
 
 /**
  * Why there are no weights, in a sentence; what the build refuses too has the same words as there. `more` has the words
@@ -18,5 +17,5 @@ export function refusalText(
     ...anySizeWords.refusals,
     ...more,
   };
-  return sentences[rule]?.(numbers, statedMass) ?? rule;
+  return sentences[rule]?.(numbers) ?? rule;
 }

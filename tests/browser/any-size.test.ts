@@ -3,6 +3,7 @@ import { join } from 'node:path';
 import { pathToFileURL } from 'node:url';
 import { gzipSync } from 'node:zlib';
 import type { Browser, Page } from 'playwright-core';
+import { extractText } from 'unpdf';
 import { afterAll, beforeAll, describe, expect, inject, test } from 'vitest';
 import type { FormulaDocument } from '../../src/formulary/document.ts';
 import { launch } from './launch.ts';
@@ -115,6 +116,10 @@ describe.each(['file', 'http'])('any size, opened by %s', (how) => {
       expect(text).toContain(words);
     }
     await page.emulateMedia({ media: 'screen' });
+    const { data } = await (await page.context().newCDPSession(page)).send('Page.printToPDF');
+    const printed = await extractText(new Uint8Array(Buffer.from(data, 'base64')));
+    expect(printed.totalPages).toBeGreaterThan(1);
+    for (const leaf of printed.text) expect(leaf).toContain('Not a listed size');
   });
 
   test('puts a slip right, or stops the batch', async () => {

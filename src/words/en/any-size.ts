@@ -1,9 +1,7 @@
-import { statedVolume } from '../measures.ts';
+import { statedMass, statedVolume } from '../measures.ts';
 import { fixed, plain } from '../numbers.ts';
 
 type Numbers = Readonly<Record<string, number>>;
-/** A mass with its unit, to the gram. */
-type Mass = (grams: number) => string;
 
 const percent = (value = 0, decimals = 1) => `${plain(value, decimals)} %`;
 
@@ -86,12 +84,12 @@ export const anySizeWords = {
   refusedTitle: 'No weights at this size',
   advice: 'Do not scale another size by hand. Ask the formulator.',
   refusals: {
-    'size-below-listed': (n: Numbers, mass: Mass) =>
-      `It takes ${mass(n.fats ?? 0)} of fats. The smallest listed size of this formula takes ${mass(n.smallest ?? 0)}.`,
-    'size-above-listed': (n: Numbers, mass: Mass) =>
-      `It takes ${mass(n.fats ?? 0)} of fats. The largest listed size of this formula takes ${mass(n.largest ?? 0)}.`,
-    'above-heat-limit': (n: Numbers, mass: Mass) =>
-      `It takes ${mass(n.fats ?? 0)} of fats. One pour may hold ${mass(n.limit ?? 0)}, as more cannot lose its heat.`,
+    'size-below-listed': (n: Numbers) =>
+      `It takes ${statedMass(n.fats ?? 0, 1)} of fats. The smallest listed size of this formula takes ${statedMass(n.smallest ?? 0, 1)}.`,
+    'size-above-listed': (n: Numbers) =>
+      `It takes ${statedMass(n.fats ?? 0, 1)} of fats. The largest listed size of this formula takes ${statedMass(n.largest ?? 0, 1)}.`,
+    'above-heat-limit': (n: Numbers) =>
+      `It takes ${statedMass(n.fats ?? 0, 1)} of fats. One pour may hold ${statedMass(n.limit ?? 0, 1)}, as more cannot lose its heat.`,
     'above-vessel': (n: Numbers) =>
       `It fills its vessel of ${statedVolume(n.vessel ?? 0)} to ${percent(n.fill)}. At most ${percent(n.limit)} is allowed.`,
     'lowest-superfat-below-limit': (n: Numbers) =>
@@ -110,8 +108,8 @@ export const sizeSheetWords = {
     'correction-too-large': (n: Numbers) =>
       `To make it right, the batch would grow by more than ${percent(n.most)} (common practice, no source). That is no slip of the hand: a cup or a line may be the wrong one.`,
     'correction-not-found': () => 'No weights on these scales make it right.',
-    'grown-above-listed': (n: Numbers, mass: Mass) =>
-      `To make it right, the batch would take ${mass(n.fats ?? 0)} of fats, more than its listed size of ${mass(n.largest ?? 0)}, and the shop states no vessel to hold it against.`,
+    'grown-above-listed': (n: Numbers) =>
+      `To make it right, the batch would take ${statedMass(n.fats ?? 0, 1)} of fats, more than its listed size of ${statedMass(n.largest ?? 0, 1)}, and the shop states no vessel to hold it against.`,
     'made-lye-lacks-water': (n: Numbers) =>
       `The lye is made and lacks ${percent(n.missing)} of a part of its liquid. More than ${percent(n.most)} is too much: it is hotter and stronger than anything that was reckoned.`,
     'made-lye-lacks-acid': (_: Numbers) =>

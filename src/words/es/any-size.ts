@@ -1,5 +1,5 @@
 import type * as english from '../en/any-size.ts';
-import { statedVolume } from '../measures.ts';
+import { statedMass, statedVolume } from '../measures.ts';
 import { fixed, plain } from '../numbers.ts';
 import type { SameShape } from '../same-shape.ts';
 
@@ -30,10 +30,10 @@ export const anySizePage: SameShape<typeof english.anySizePage> = {
   sheet: {
     mark: 'Tamaño que no está en la lista',
     markNote:
-      'Calculado en el navegador. La edición no tiene resumen de pesos para él, y la página que comprueba hojas no lo conoce.',
+      'Calculado en el navegador. La edición no tiene código de pesadas para él, y la página que comprueba hojas no lo conoce.',
     printHint: 'Imprima en A4 o Carta.',
     printListed:
-      'Este tamaño está en la lista. Imprima su propia hoja de trabajo, que lleva un resumen de pesos.',
+      'Este tamaño está en la lista. Imprima su propia hoja de trabajo, que lleva un código de pesadas.',
     nothing: 'No se ha calculado ningún tamaño. No hay nada que imprimir.',
     current:
       'El código, la revisión, la huella y la edición se han buscado hoy en el manual y son los vigentes.',
@@ -83,12 +83,12 @@ export const anySizeWords: SameShape<typeof english.anySizeWords> = {
   refusedTitle: 'Sin pesadas en este tamaño',
   advice: 'No cambie a mano la escala de otro tamaño. Pregunte al formulador.',
   refusals: {
-    'size-below-listed': (n, mass) =>
-      `Lleva ${mass(n.fats ?? 0)} de grasas. El menor tamaño de la lista de esta fórmula lleva ${mass(n.smallest ?? 0)}.`,
-    'size-above-listed': (n, mass) =>
-      `Lleva ${mass(n.fats ?? 0)} de grasas. El mayor tamaño de la lista de esta fórmula lleva ${mass(n.largest ?? 0)}.`,
-    'above-heat-limit': (n, mass) =>
-      `Lleva ${mass(n.fats ?? 0)} de grasas. De una vez se pueden verter ${mass(n.limit ?? 0)}, pues más no puede soltar su calor.`,
+    'size-below-listed': (n) =>
+      `Lleva ${statedMass(n.fats ?? 0, 1)} de grasas. El menor tamaño de la lista de esta fórmula lleva ${statedMass(n.smallest ?? 0, 1)}.`,
+    'size-above-listed': (n) =>
+      `Lleva ${statedMass(n.fats ?? 0, 1)} de grasas. El mayor tamaño de la lista de esta fórmula lleva ${statedMass(n.largest ?? 0, 1)}.`,
+    'above-heat-limit': (n) =>
+      `Lleva ${statedMass(n.fats ?? 0, 1)} de grasas. De una vez se pueden verter ${statedMass(n.limit ?? 0, 1)}, pues más no puede soltar su calor.`,
     'above-vessel': (n) =>
       `Llena su recipiente de ${statedVolume(n.vessel ?? 0)} hasta el ${percent(n.fill)}. Se permite como máximo el ${percent(n.limit)}.`,
     'lowest-superfat-below-limit': (n) =>
@@ -107,8 +107,8 @@ export const sizeSheetWords: SameShape<typeof english.sizeSheetWords> = {
     'correction-too-large': (n) =>
       `Para corregirlo, el lote crecería más del ${percent(n.most)} (práctica común, sin fuente). Eso no es un desliz: puede que el vaso o la línea sean otros.`,
     'correction-not-found': () => 'Ninguna pesada en estas balanzas lo corrige.',
-    'grown-above-listed': (n, mass) =>
-      `Para corregirlo, el lote llevaría ${mass(n.fats ?? 0)} de grasas, más que su tamaño de la lista de ${mass(n.largest ?? 0)}, y el taller no indica ningún recipiente con que compararlo.`,
+    'grown-above-listed': (n) =>
+      `Para corregirlo, el lote llevaría ${statedMass(n.fats ?? 0, 1)} de grasas, más que su tamaño de la lista de ${statedMass(n.largest ?? 0, 1)}, y el taller no indica ningún recipiente con que compararlo.`,
     'made-lye-lacks-water': (n) =>
       `La solución alcalina está hecha y le falta el ${percent(n.missing)} de uno de sus líquidos. Más del ${percent(n.most)} es demasiado: está más caliente y más concentrada que nada de lo calculado.`,
     'made-lye-lacks-acid': () =>
