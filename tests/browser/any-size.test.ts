@@ -115,7 +115,7 @@ describe.each(['file', 'http'])('any size, opened by %s', (how) => {
     for (const words of ['Not a listed size', 'QY-014', '1500', formula.fingerprint ?? '?']) {
       expect(text).toContain(words);
     }
-    await page.emulateMedia({ media: 'screen' });
+    await page.emulateMedia({ media: null });
     const { data } = await (await page.context().newCDPSession(page)).send('Page.printToPDF');
     const printed = await extractText(new Uint8Array(Buffer.from(data, 'base64')));
     expect(printed.totalPages).toBeGreaterThan(1);
