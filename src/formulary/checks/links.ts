@@ -69,6 +69,17 @@ function checkImage(node: Image, images: ReadonlySet<string>, report: Report) {
       expected: 'a file of this name in the folder of formulas',
       advice: 'capitals count',
     });
+  } else {
+    const twin = [...images].find(
+      (name) => name !== node.url && name.toLowerCase() === node.url.toLowerCase(),
+    );
+    if (twin !== undefined) {
+      report.at(place, 'formula/image-address', {
+        found: `the image "${node.url}" beside "${twin}"`,
+        expected: 'names that differ in more than capitals',
+        advice: 'give one of the two another name; on many disks they are one file',
+      });
+    }
   }
   if ((node.alt ?? '').trim() === '') {
     report.at(place, 'formula/image-without-text', {
