@@ -1,3 +1,4 @@
+import { isCalendarDate } from '../formulary/calendar-date.ts';
 import { loadFormulary } from '../formulary/load.ts';
 import { counted, problemSummary, problemText } from '../words/problem-text.ts';
 import { FOLDERS, readArguments } from './arguments.ts';
@@ -18,7 +19,12 @@ export function main(args: readonly string[]): number {
   const start = performance.now();
   const { formulas = 'formulas', data = 'data' } = read.given;
   speakFor(data);
-  const loaded = loadFormulary({ formulas, data }, { asOf: asOfFor(read.given['as-of'], data) });
+  const asOf = asOfFor(read.given['as-of'], data);
+  if (read.given['as-of'] !== undefined && !isCalendarDate(asOf)) {
+    console.error(`--as-of: "${asOf}" is no date. Write it like 2026-12-01.`);
+    return 1;
+  }
+  const loaded = loadFormulary({ formulas, data }, { asOf });
   for (const problem of loaded.problems) console.error(problemText(problem));
   const counts = loaded.ok
     ? [

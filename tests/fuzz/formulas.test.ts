@@ -9,7 +9,7 @@ const folder = mkdtempSync(join(tmpdir(), 'fuzz-'));
 afterAll(() => rmSync(folder, { recursive: true, force: true }));
 
 const SEEDS = IS_LONG ? [1, 2, 3, 4, 5, 6, 7, 8] : [1];
-const CASES = IS_LONG ? 1400 : 120;
+const CASES = IS_LONG ? 1400 : 70;
 
 test.each(SEEDS)(
   'a formula with other values is refused with a place, or sound (seed %i)',
