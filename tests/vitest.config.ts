@@ -2,6 +2,8 @@ import { defineConfig } from 'vitest/config';
 
 /** Tests that look at the built site, in a browser or as files, share one build of the demo. */
 const SITE = ['tests/browser/**/*.test.ts', 'tests/built/**/*.test.ts'];
+/** The site of another invented shop, in Spanish and in pounds and ounces. */
+const NEWCOMER = ['tests/newcomer/**/*.test.ts'];
 
 export default defineConfig({
   test: {
@@ -13,11 +15,19 @@ export default defineConfig({
     projects: [
       {
         extends: true,
-        test: { name: 'unit', include: ['tests/**/*.test.ts'], exclude: SITE },
+        test: { name: 'unit', include: ['tests/**/*.test.ts'], exclude: [...SITE, ...NEWCOMER] },
       },
       {
         extends: true,
         test: { name: 'site', include: SITE, globalSetup: ['tests/support/build-once.ts'] },
+      },
+      {
+        extends: true,
+        test: {
+          name: 'newcomer',
+          include: NEWCOMER,
+          globalSetup: ['tests/newcomer/build-once.ts'],
+        },
       },
     ],
   },
