@@ -7,16 +7,22 @@ import { editionProblem } from './edition-problem.ts';
 /** The list of checksums in a published folder, in the form that `sha256sum -c` reads. */
 export const CHECKSUMS = 'sha256sums.txt';
 
+/** Writes the list for every other file of a folder. The last thing that a build writes. */
+export function writeChecksums(folder: string): void {
+  writeFileSync(join(folder, CHECKSUMS), checksumList(folder));
+}
+
 /**
- * Writes the list for every other file of a folder. The last thing that a build writes.
+ * The list for every file of a folder but the list's own.
  *
  * @throws RangeError for a name with a line end or a backslash, which the list could not hold.
  */
-export function writeChecksums(folder: string): void {
+export function checksumList(folder: string): string {
   const odd = filesOf(folder).find((name) => /[\r\n\\]/.test(name));
   if (odd !== undefined) throw new RangeError(`no checksum list can hold ${JSON.stringify(odd)}`);
-  const lines = filesOf(folder).map((name) => `${hashOf(join(folder, name))}  ${name}\n`);
-  writeFileSync(join(folder, CHECKSUMS), lines.join(''));
+  return filesOf(folder)
+    .map((name) => `${hashOf(join(folder, name))}  ${name}\n`)
+    .join('');
 }
 
 /** How a folder differs from its list; three empty lists where it is whole. */

@@ -1,5 +1,5 @@
 const published =
-  "default-src 'none'; style-src 'self'; font-src 'self'; img-src 'self'; script-src 'self'; form-action 'none'; base-uri 'none'";
+  "default-src 'none'; style-src 'self'; font-src 'self'; img-src 'self'; script-src 'self'; worker-src 'self'; manifest-src 'self'; form-action 'none'; base-uri 'none'";
 
 // the preview's reload needs a socket and style elements; nothing published does
 const preview =

@@ -16,6 +16,7 @@ import { findCost } from './en/find-cost.ts';
 import { formulaPage } from './en/formula-page.ts';
 import { frame } from './en/frame.ts';
 import { hazardWords, STATEMENTS } from './en/hazard-statements.ts';
+import { keptCopy } from './en/kept-copy.ts';
 import { lostPage } from './en/lost-page.ts';
 import { lotsPage } from './en/lots-page.ts';
 import { lyeHeatWords } from './en/lye-heat.ts';
@@ -60,6 +61,7 @@ export const english = {
   formulaPage,
   frame,
   hazardWords,
+  keptCopy,
   lostPage,
   lyeHeatWords,
   lotsPage,

@@ -17,6 +17,7 @@ import { findCost } from './es/find-cost.ts';
 import { formulaPage } from './es/formula-page.ts';
 import { frame } from './es/frame.ts';
 import { hazardWords, STATEMENTS } from './es/hazard-statements.ts';
+import { keptCopy } from './es/kept-copy.ts';
 import { lostPage } from './es/lost-page.ts';
 import { lotsPage } from './es/lots-page.ts';
 import { lyeHeatWords } from './es/lye-heat.ts';
@@ -61,6 +62,7 @@ export const spanish: Catalogue = {
   formulaPage,
   frame,
   hazardWords,
+  keptCopy,
   lostPage,
   lyeHeatWords,
   lotsPage,

@@ -36,7 +36,7 @@ afterAll(async () => {
 describe.each(['http', 'file'])('the policy of a page over %s', (how) => {
   test('lets nothing of an injected attack run or reach another host', async () => {
     const base = how === 'http' ? server.origin : `${pathToFileURL(site)}/`;
-    const page = await browser.newPage();
+    const page = await browser.newPage({ serviceWorkers: 'block' });
     const outside: string[] = [];
     // what the policy stops never gets so far as to be answered
     await page.route('https://elsewhere.example/**', (route) => {

@@ -11,12 +11,16 @@ const TYPES: Readonly<Record<string, string>> = {
   '.csv': 'text/csv; charset=utf-8',
   '.svg': 'image/svg+xml',
   '.png': 'image/png',
+  '.webmanifest': 'application/manifest+json',
   '.woff2': 'font/woff2',
   '.txt': 'text/plain; charset=utf-8',
 };
 
-/** A plain web server for a folder, under a path such as `/` or `/shop/handbook/`; nothing is guessed. */
-export async function serve(folder: string, base: string) {
+/**
+ * A plain web server for a folder, under a path such as `/` or `/shop/handbook/`; nothing is guessed. Port 0 is any
+ * that is free.
+ */
+export async function serve(folder: string, base: string, port = 0) {
   const server = createServer((request, response) => {
     const path = decodeURIComponent(new URL(request.url ?? '/', 'http://localhost').pathname);
     const inside = path.startsWith(base) ? normalize(path.slice(base.length)) : '..';
@@ -34,10 +38,15 @@ export async function serve(folder: string, base: string) {
     response.writeHead(200, { 'content-type': TYPES[extname(file)] ?? 'application/octet-stream' });
     createReadStream(file).pipe(response);
   });
-  await new Promise<void>((resolve) => server.listen(0, '127.0.0.1', resolve));
-  const { port } = server.address() as AddressInfo;
+  await new Promise<void>((resolve) => server.listen(port, '127.0.0.1', resolve));
+  const { port: open } = server.address() as AddressInfo;
   return {
-    origin: `http://127.0.0.1:${port}${base}`,
-    close: () => new Promise<void>((resolve) => server.close(() => resolve())),
+    port: open,
+    origin: `http://127.0.0.1:${open}${base}`,
+    close: () =>
+      new Promise<void>((resolve) => {
+        server.close(() => resolve());
+        server.closeAllConnections();
+      }),
   };
 }
