@@ -23,7 +23,7 @@ afterAll(async () => {
 
 /** A page that fails the test at its first fault. */
 async function open(where: string, hash = '', path = 'find.html'): Promise<Page> {
-  const page = await browser.newPage();
+  const page = await browser.newPage({ serviceWorkers: 'block' });
   page.on('pageerror', (error) => {
     throw error;
   });
@@ -209,7 +209,7 @@ describe.each(['under a sub-path', 'opened as a file'])('the finder %s', (where)
 
 test('many rows: a screen at once, sixty soon, all when asked for; paper takes what is listed', async () => {
   const copies = 40;
-  const page = await browser.newPage();
+  const page = await browser.newPage({ serviceWorkers: 'block' });
   await page.route('**/search/finder.js', async (route) => {
     const body = await (await route.fetch()).text();
     const data: FinderData = JSON.parse(body.replace(/^[^{]*/, '').replace(/;\s*$/, ''));
@@ -256,7 +256,7 @@ test('many rows: a screen at once, sixty soon, all when asked for; paper takes w
 
 describe('search files that are missing or damaged', () => {
   const withFault = async (files: string, answer: string | null) => {
-    const page = await browser.newPage();
+    const page = await browser.newPage({ serviceWorkers: 'block' });
     await page.route(files, async (route) => {
       if (answer === null) await route.fulfill({ status: 404 });
       else await route.fulfill({ body: answer, contentType: 'text/javascript' });

@@ -24,7 +24,7 @@ describe('publishing', () => {
     const shop = approvedShop();
     const to = join(emptyFolder(), 'handbook');
     const first = builtFolder(shop, 'first');
-    expect(publish(shop, first, to)).toMatchObject({ ok: true, files: 3, previous: null });
+    expect(publish(shop, first, to)).toMatchObject({ ok: true, files: 4, previous: null });
     expect(pageIn(to)).toBe('first');
     expect(isVerified(to)).toBe(true);
     const second = builtFolder(shop, 'second', { asOf: '2026-12-15' });
@@ -144,7 +144,7 @@ test('verify and publish as commands', () => {
   expect(run('publish', to, '--from', from, '--data', shop.folders.data).status).toBe(0);
   expect(run('verify', to)).toMatchObject({
     status: 0,
-    stdout: expect.stringContaining('3 files, all as listed'),
+    stdout: expect.stringContaining('4 files, all as listed'),
   });
   writeFileSync(join(to, 'index.html'), 'changed');
   rmSync(join(to, 'formulas/TT-001.html'));
