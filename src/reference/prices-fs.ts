@@ -1,4 +1,5 @@
 import type { Problem } from '../words/problem.ts';
+import { POUND } from '../words/units.ts';
 import { didYouMean } from './nearest.ts';
 import { openFile } from './open-file.ts';
 import { readText } from './read-text-fs.ts';
@@ -51,7 +52,8 @@ export function readPrices(
         advice: 'keep the one that holds',
       });
     }
-    perKilogram.set(entry.material, entry['per-kilogram']);
+    const perPound = entry['per-pound'] ?? Number.NaN;
+    perKilogram.set(entry.material, entry['per-kilogram'] ?? (perPound * 1000) / POUND);
   }
   return { prices: { currency: opened.value.currency, perKilogram }, problems };
 }

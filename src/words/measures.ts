@@ -58,6 +58,13 @@ export const totalMass = (mass: number): string =>
 export const largeMass = (mass: number): string =>
   isUs() ? expectedMass(mass) : `${plain(mass / 1000, 2)} kg`;
 
+/** The unit that prices are told for. */
+export const priceUnit = (): string => (isUs() ? 'lb' : 'kg');
+
+/** A price of a kilogram as the price of that unit. */
+export const priceOf = (perKilogram: number): number =>
+  isUs() ? (perKilogram * POUND) / 1000 : perKilogram;
+
 /** The mass of fats or paste that yields are told for. [g] */
 export const tableBasis = (): number => (isUs() ? POUND : 1000);
 

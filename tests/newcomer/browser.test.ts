@@ -50,6 +50,17 @@ test('the shopping list adds up in pounds and ounces', async () => {
   await page.close();
 });
 
+test('a typed size is read and weighed in pounds and ounces', async () => {
+  const page = await browser.newPage();
+  await page.goto(`${base}formulas/TC-201.html`);
+  await page.locator('[data-way="fats"]').fill('3 lb 8 oz');
+  await page.locator('#any-size-weights tr[data-material="olive"]').waitFor();
+  // half of 56 oz
+  const weight = page.locator('#any-size-weights tr[data-material="olive"] td.n');
+  expect((await weight.textContent())?.replace(/\s+/g, ' ').trim()).toBe('1 lb 12.00 oz');
+  await page.close();
+});
+
 test('every sheet is one leaf of Letter', async () => {
   const page = await browser.newPage();
   const session = await page.context().newCDPSession(page);

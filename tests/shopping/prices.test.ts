@@ -31,6 +31,14 @@ describe('prices are read', () => {
     expect(prices?.perKilogram.get('olive')).toBe(6.43);
   });
 
+  test('by the pound of 453.592 37 g as well, in one way or the other', () => {
+    const byPound = pricesOf(GOOD.replace('per-kilogram: 6.43', 'per-pound: 4.5359237'));
+    expect(byPound.rules).toEqual([]);
+    expect(byPound.prices?.perKilogram.get('olive')).toBeCloseTo(10, 9);
+    const both = GOOD.replace('per-kilogram: 6.43', 'per-kilogram: 6.43, per-pound: 2');
+    expect(pricesOf(both).rules).toEqual(['3 data/missing-key']);
+  });
+
   test('or there are none', () => {
     expect(readPrices(join(folder, 'nowhere'), REFERENCE)).toEqual({ prices: null, problems: [] });
   });

@@ -14,14 +14,32 @@ const currency = z.string().superRefine((code, context) => {
   );
 });
 
-/** `data/prices.yaml`: what the shop pays, per kilogram as bought. */
+const price = z.number().gte(0).lte(100_000);
+
+/** `data/prices.yaml`: what the shop pays, per kilogram or per pound as bought. */
 export const pricesSchema = z.strictObject({
   currency,
   prices: z.array(
-    z.strictObject({
-      material: z.string(),
-      'per-kilogram': z.number().gte(0).lte(100_000),
-      on: date,
-    }),
+    z
+      .strictObject({
+        material: z.string(),
+        'per-kilogram': price.optional(),
+        'per-pound': price.optional(),
+        on: date,
+      })
+      .superRefine((entry, context) => {
+        const stated = [entry['per-kilogram'], entry['per-pound']].filter(
+          (each) => each !== undefined,
+        );
+        if (stated.length === 1) return;
+        context.addIssue(
+          broken({
+            rule: 'data/missing-key',
+            found: stated.length === 0 ? 'no price' : 'two prices',
+            expected: 'either "per-kilogram" or "per-pound"',
+            advice: 'state the price in one way',
+          }),
+        );
+      }),
   ),
 });

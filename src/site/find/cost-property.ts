@@ -4,11 +4,12 @@ import { batchMasses, WATER } from '../../handbook/materials/batch-masses.ts';
 import type { Prices } from '../../reference/prices-fs.ts';
 import type { Property } from '../../search/finder/finder-data.ts';
 import { words } from '../../words/catalogue.ts';
+import { priceOf } from '../../words/measures.ts';
 
 const DECIMALS = 2;
 
 /**
- * What the materials of a kilogram of batter cost at the first size that has weights. [currency per kg] A formula with
+ * What the materials of a kilogram of batter, or a pound, cost at the first size that has weights. A formula with
  * a material that has no price has no number, never a part of one.
  */
 export function costProperty({ formulas }: Formulary, prices: Prices): Property {
@@ -20,11 +21,11 @@ export function costProperty({ formulas }: Formulary, prices: Prices): Property 
     group,
     format: 'number',
     decimals: DECIMALS,
-    values: formulas.map((computed) => costPerKilogram(computed, prices)),
+    values: formulas.map((computed) => costOfBatter(computed, prices)),
   };
 }
 
-function costPerKilogram({ document }: ComputedFormula, prices: Prices): number | null {
+function costOfBatter({ document }: ComputedFormula, prices: Prices): number | null {
   const batch = document.batches.find(({ refused }) => !refused);
   if (!batch) return null;
   const masses = batchMasses(document, batch);
@@ -41,5 +42,5 @@ function costPerKilogram({ document }: ComputedFormula, prices: Prices): number 
   );
   const whole = masses.reduce((sum, { mass }) => sum + mass, 0) / 1000;
   if (!priced || priced.unpriced.length > 0 || whole === 0) return null;
-  return Number((priced.cost / whole).toFixed(DECIMALS));
+  return Number(priceOf(priced.cost / whole).toFixed(DECIMALS));
 }

@@ -39,5 +39,5 @@ export const contentsPage = {
   methods: 'every model behind the numbers, with its equation, its range and what it leaves out',
   safety: 'lye, protective equipment, spills, first aid',
   dataTitle: 'As files',
-  dataLead: 'The same numbers for spreadsheets and programs:',
+  dataLead: 'The same numbers for spreadsheets and programs, in grams and degrees Celsius:',
 } as const;

@@ -1,3 +1,5 @@
+import { voice } from '../voice.ts';
+
 /** A formula file to start from: sound as it stands, with every key explained where it is written. */
 export function starterFormula(code: string, name: string, day: string): string {
   return `---
@@ -34,7 +36,7 @@ water: { lye-concentration: 32 }
 # Earlier soap that may be worked in, in percent of the batter; it counts in no weight.
 # rework: 5
 
-targets: { fats: 38 C, lye: 35 C, combine: 35-40 C, unmould: 24-36 h, cure: 42 d }
+targets: { ${temperatures()}, unmould: 24-36 h, cure: 42 d }
 
 # Limits that a batch must meet before it is released; the methods are named on the sheet.
 release: { free-alkali: 0.05, ph: [9, 10.5], moisture: 12 }
@@ -65,3 +67,9 @@ function quoted(name: string): string {
   const plain = /^\p{L}[\p{L}\p{N}]*( [\p{L}\p{N}]+)*$/u.test(name);
   return plain && !/^(true|false|null)$/i.test(name) ? name : JSON.stringify(name);
 }
+
+/** In the degrees of the shop. */
+const temperatures = () =>
+  voice().units === 'us'
+    ? 'fats: 100 F, lye: 95 F, combine: 95-105 F'
+    : 'fats: 38 C, lye: 35 C, combine: 35-40 C';

@@ -43,5 +43,5 @@ export const contentsPage: SameShape<typeof english> = {
     'cada modelo que está detrás de los números, con su ecuación, su intervalo y lo que deja fuera',
   safety: 'solución alcalina, equipo de protección, derrames, primeros auxilios',
   dataTitle: 'Como archivos',
-  dataLead: 'Los mismos números para hojas de cálculo y programas:',
+  dataLead: 'Los mismos números para hojas de cálculo y programas, en gramos y grados Celsius:',
 };

@@ -1,9 +1,10 @@
 import type { starterFormula as english } from '../en/starter-formula.ts';
+import { voice } from '../voice.ts';
 
 /** A formula file to start from: sound as it stands, with every key explained where it is written. */
 export const starterFormula: typeof english = (code, name, day) => `---
 # Todo lo que sigue a "#" es una nota para usted. Las líneas que empiezan con "#" se pueden borrar.
-# Las claves, los ids y el título "## Method" quedan en inglés.
+# Las claves y los ids quedan en inglés.
 code: ${code}
 name: ${quoted(name)}
 kind: bar            # bar (pastilla), paste (pasta) o liquid (líquido)
@@ -37,7 +38,7 @@ water: { lye-concentration: 32 }
 # Jabón anterior que se puede reprocesar, en porcentaje de la masa de jabón; no cuenta en ningún peso.
 # rework: 5
 
-targets: { fats: 38 C, lye: 35 C, combine: 35-40 C, unmould: 24-36 h, cure: 42 d }
+targets: { ${temperatures()}, unmould: 24-36 h, cure: 42 d }
 
 # Límites que un lote debe cumplir antes de liberarse; la hoja nombra los métodos.
 release: { free-alkali: 0.05, ph: [9, 10.5], moisture: 12 }
@@ -49,7 +50,7 @@ changes:
   - { revision: 1, on: ${day}, note: Primera versión. }
 ---
 
-## Method
+## Método
 
 1. Lea la ficha de datos de seguridad del proveedor. Gafas protectoras y guantes puestos; ningún recipiente
    de aluminio.
@@ -68,3 +69,9 @@ function quoted(name: string): string {
   const plain = /^\p{L}[\p{L}\p{N}]*( [\p{L}\p{N}]+)*$/u.test(name);
   return plain && !/^(true|false|null)$/i.test(name) ? name : JSON.stringify(name);
 }
+
+/** In the degrees of the shop. */
+const temperatures = () =>
+  voice().units === 'us'
+    ? 'fats: 100 F, lye: 95 F, combine: 95-105 F'
+    : 'fats: 38 C, lye: 35 C, combine: 35-40 C';
