@@ -2,6 +2,7 @@ import type { FormulaDocument } from '../formulary/document.ts';
 import { dayAfter } from '../formulary/schedule.ts';
 import type { Reference } from '../reference/reference.ts';
 import { words } from '../words/catalogue.ts';
+import { dateText } from '../words/dates.ts';
 import { tableBasis } from '../words/measures.ts';
 import { wetMassesOf } from './batch-yields.ts';
 import { sourceName } from './names.ts';
@@ -95,9 +96,9 @@ export function scheduleLines(
   made: string,
 ): readonly [rule: string, example: string] | null {
   if (cut === null && release === null) return null;
-  const on = (day: number | null) => (day === null ? null : dayAfter(made, day));
+  const on = (day: number | null) => (day === null ? null : dateText(dayAfter(made, day)));
   return [
     words.yieldWords.schedule(cut, release),
-    words.yieldWords.scheduleExample(made, on(cut), on(release)),
+    words.yieldWords.scheduleExample(dateText(made), on(cut), on(release)),
   ];
 }

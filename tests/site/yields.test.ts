@@ -76,13 +76,13 @@ describe('yield of a bar', () => {
   test('the days as a rule and as dates', () => {
     expect(scheduleLines(document(), '2026-12-01')).toEqual([
       'Made on day 0, cut from day 1, tested for release from day 42.',
-      'Made on 2026-12-01: cut from 2026-12-02, tested for release from 2027-01-12.',
+      'Made on 1 Dec 2026: cut from 2 Dec 2026, tested for release from 12 Jan 2027.',
     ]);
     const none = { cutFromDay: null, releaseFromDay: null };
     expect(scheduleLines(document({ schedule: none }), '2026-12-01')).toBeNull();
     const cure = { cutFromDay: null, releaseFromDay: 7 };
     expect(scheduleLines(document({ schedule: cure }), '2026-12-01')?.[1]).toBe(
-      'Made on 2026-12-01: tested for release from 2026-12-08.',
+      'Made on 1 Dec 2026: tested for release from 8 Dec 2026.',
     );
   });
 });
