@@ -13,19 +13,28 @@ export const onePageOfEachKind = (pages: readonly string[]): readonly string[] =
     return folder === '' || !pages.slice(0, index).some((other) => other.startsWith(`${folder}/`));
   });
 
-/** What axe finds on a page of a built site, and whether it scrolls sideways. */
+/**
+ * What axe finds on a page of a built site, and whether it scrolls sideways. Contrasts take most of its time and can
+ * be left out where another test looks at the same colours.
+ */
 export async function faultsOf(
   browser: Browser,
   site: string,
   path: string,
   colorScheme: 'light' | 'dark',
   width: number,
+  { colours = true }: { readonly colours?: boolean } = {},
 ): Promise<readonly string[]> {
   const page = await browser.newPage({ colorScheme, viewport: { width, height: 900 } });
   await page.goto(`${pathToFileURL(site).href}/${path}`, { waitUntil: 'load' });
   await page.evaluate(axe.source);
-  const { violations } = await page.evaluate(() =>
-    (globalThis as unknown as { axe: typeof axe }).axe.run({ resultTypes: ['violations'] }),
+  const { violations } = await page.evaluate(
+    (enabled) =>
+      (globalThis as unknown as { axe: typeof axe }).axe.run({
+        resultTypes: ['violations'],
+        rules: { 'color-contrast': { enabled } },
+      }),
+    colours,
   );
   const overflow = await page.evaluate(
     () => document.documentElement.scrollWidth - document.documentElement.clientWidth,
