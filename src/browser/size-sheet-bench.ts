@@ -30,15 +30,20 @@ export function benchFields(sized: Sized, data: AnySizeData): { readonly read: (
     read: () => {
       const shown = new Map<number, Shown>();
       const dissolved = ticked('correction-dissolved');
+      const combined = ticked('correction-combined');
       for (const { line, row, field, mixed } of rows) {
         // in a made lye everything is in with the rest
         row.classList.toggle('in-made-lye', dissolved && line.group === 'lye');
         if (field.value.trim() === '') continue;
         const reading = readingOf(field.value, line);
-        if (typeof reading === 'string') return { ok: false, sentence: reading };
+        if (typeof reading === 'string') {
+          // what has met stays stopped, whatever else is typed
+          if (combined) continue;
+          return { ok: false, sentence: reading };
+        }
         shown.set(line.place, { mass: grams(reading), mixed: mixed?.checked ?? false });
       }
-      return { ok: true, bench: { combined: ticked('correction-combined'), dissolved, shown } };
+      return { ok: true, bench: { combined, dissolved, shown } };
     },
   };
 }

@@ -13,13 +13,24 @@ export function todoText(
   if (change === 0) return text.keep;
   const mass = statedMass(Math.abs(change));
   const inLye = dissolved && line.group === 'lye';
-  const instead = sentence(change < 0, line.what === 'alkali', inLye)(mass);
+  const instead = sentence(
+    change < 0,
+    line.what === 'alkali',
+    line.group === 'lye',
+    dissolved,
+  )(mass);
   if (shown || (mixed && inLye)) return instead;
   return text.notYet(weighed(line.mass, step), instead);
 }
 
-function sentence(takeBack: boolean, alkali: boolean, inLye: boolean) {
-  if (takeBack) return alkali ? text.takeBackAlkali : text.takeBack;
-  if (!inLye) return text.add;
+function sentence(takeBack: boolean, alkali: boolean, ofLye: boolean, dissolved: boolean) {
+  // whoever forgot to say that the lye is made must not be told to pour water on it
+  const beforeAlkali = ofLye && !alkali && !dissolved;
+  if (takeBack) {
+    if (beforeAlkali) return text.takeBackBeforeAlkali;
+    return alkali ? text.takeBackAlkali : text.takeBack;
+  }
+  if (beforeAlkali) return text.addBeforeAlkali;
+  if (!ofLye || !dissolved) return text.add;
   return alkali ? text.addAlkaliToLye : text.addLater;
 }

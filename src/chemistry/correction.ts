@@ -14,7 +14,7 @@ import { stepOf, type WeighingLine, weighingsOf } from './weighings.ts';
 export interface AtTheBench {
   /** Lye and fats have met. */
   readonly combined: boolean;
-  /** The alkali is in the water. */
+  /** Alkali is in the water, all of it or some. */
   readonly dissolved: boolean;
   /** What the scale showed, where it was not what is written: by place in `weighingsOf`. */
   readonly shown: ReadonlyMap<number, Shown>;
@@ -43,8 +43,8 @@ const MOST_TRIES = 60;
  * superfat is never below the one written. What nothing was said of is taken to be there as written and may not have to
  * become less where it may already be in.
  *
- * Refuses `lye-has-met-fats`; `correction-too-large`; `correction-not-found`; `made-lye-lacks-water`,
- * `made-lye-lacks-acid` and `made-lye-near-saturation`, as water and acid never go onto alkali;
+ * Refuses `lye-has-met-fats`; `correction-too-large`; `correction-not-found`; `made-lye-lacks-alkali`;
+ * `made-lye-lacks-water`, `made-lye-lacks-acid` and `made-lye-near-saturation`, as water and acid never go onto alkali;
  * `grown-above-listed` where no vessel is known; and what `anySize` refuses.
  *
  * `strongestLye` is the most hydroxide that the lye may hold, mass per mass of hydroxide and water; `null` where it

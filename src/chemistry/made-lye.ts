@@ -7,7 +7,8 @@ import type { WeighingLine } from './weighings.ts';
 
 /**
  * What a lye that is made may lack. Missing water joins the batter, not the lye, so until then the lye is stronger
- * than written; missing acid would have to go onto alkali.
+ * than written; missing acid would have to go onto alkali. Alkali that lacks more than a slip is a misread scale as
+ * likely as not, and nothing in the jug could show it: added to what is there it would make a caustic batch.
  */
 export function madeLyeBreach(
   lines: readonly CorrectedLine[],
@@ -16,14 +17,17 @@ export function madeLyeBreach(
 ): Breach | null {
   let missing = 0;
   for (const { line, change } of lines) {
-    if (line.group !== 'lye' || line.what === 'alkali' || change <= 0) continue;
+    if (line.group !== 'lye' || change <= 0) continue;
+    const tooMuch = change > LARGEST_CORRECTION * line.mass + 1e-9;
+    const numbers = { missing: (100 * change) / line.mass, most: 100 * LARGEST_CORRECTION };
+    if (line.what === 'alkali') {
+      if (tooMuch) return refused('made-lye-lacks-alkali', numbers).breach;
+      continue;
+    }
     if (acidityOf(charge, line) > 0) {
       return refused('made-lye-lacks-acid', { mass: change }).breach;
     }
-    if (change > LARGEST_CORRECTION * line.mass + 1e-9) {
-      const numbers = { missing: (100 * change) / line.mass, most: 100 * LARGEST_CORRECTION };
-      return refused('made-lye-lacks-water', numbers).breach;
-    }
+    if (tooMuch) return refused('made-lye-lacks-water', numbers).breach;
     missing += change;
   }
   if (missing === 0) return null;

@@ -75,12 +75,27 @@ describe('a slip at the scale', () => {
     expect(todoText(water, { shown: false, dissolved: true })).toContain('Never onto the lye');
   });
 
+  test('of water or acid in the jug is never put right without a word about alkali', () => {
+    for (const times of [0.95, 1.05]) {
+      const { outcome, place } = slip(lamp, 'water', times);
+      const water = givenValue(outcome).lines[place];
+      if (!water) throw new Error('no water');
+      expect(todoText(water, { shown: true, dissolved: false })).toContain(
+        'only while no alkali is in',
+      );
+    }
+  });
+
   test('beyond what can be put right stops the batch', () => {
     expect(ruleOf(slip(lamp, 'sodium-hydroxide', 1.15, { dissolved: true }))).toBe(
       'correction-too-large',
     );
     expect(ruleOf(slip(lamp, 'olive', 1.2, { mixed: true }))).toBe('correction-too-large');
     expect(ruleOf(slip(lamp, 'water', 0.8, { dissolved: true }))).toBe('made-lye-lacks-water');
+    const alkali = 'sodium-hydroxide';
+    expect(ruleOf(slip(lamp, alkali, 0.8, { dissolved: true }))).toBe('made-lye-lacks-alkali');
+    expect(ruleOf(slip(lamp, alkali, 0.95, { dissolved: true }))).toBe('corrected');
+    expect(ruleOf(slip(lamp, alkali, 0.8))).toBe('corrected');
     const acid = sour.formulation.additives.find(({ at }) => at === 'lye')?.additive.id ?? '';
     expect(ruleOf(slip(sour, acid, 0.5, { dissolved: true }))).toBe('made-lye-lacks-acid');
     expect(ruleOf(slip(sour, acid, 0.5))).toBe('corrected');

@@ -45,7 +45,7 @@ export const anySizePage = {
     title: 'Weighed wrong?',
     lead: 'Only before the lye meets the fats. Type what the scale showed, for each line that is not as written. Leave the others empty.',
     combined: 'Lye and fats have met',
-    dissolved: 'The alkali is in the water',
+    dissolved: 'Alkali is in the water, all of it or some',
   },
 } as const;
 
@@ -112,6 +112,8 @@ export const sizeSheetWords = {
       `To make it right, the batch would take ${statedMass(n.fats ?? 0, 1)} of fats, more than its listed size of ${statedMass(n.largest ?? 0, 1)}, and the shop states no vessel to hold it against.`,
     'made-lye-lacks-water': (n: Numbers) =>
       `The lye is made and lacks ${percent(n.missing)} of a part of its liquid. More than ${percent(n.most)} is too much: it is hotter and stronger than anything that was reckoned.`,
+    'made-lye-lacks-alkali': (n: Numbers) =>
+      `By this reading the made lye lacks ${percent(n.missing)} of an alkali. More than ${percent(n.most)} is no slip of the hand (common practice, no source), and if the scale was misread, adding it would make a caustic batch.`,
     'made-lye-lacks-acid': (_: Numbers) =>
       'The lye is made and an acid in it would be too little. Acid does not go onto alkali, and without it the soap is sharper.',
     'made-lye-near-saturation': (n: Numbers) =>
@@ -142,6 +144,10 @@ export const sizeSheetWords = {
     `What is in too much cannot be taken back, so the batch grows by ${percent(more, 2)}, to ${mass} in all. Every line changes. Do this, line by line, and have each line seen.`,
   keep: 'as it is',
   add: (mass: string) => `Add ${mass}.`,
+  addBeforeAlkali: (mass: string) =>
+    `Add ${mass}, only while no alkali is in. If any is, tick it above and read again.`,
+  takeBackBeforeAlkali: (mass: string) =>
+    `Take back ${mass}, only while no alkali is in. If any is, tick it above and read again.`,
   takeBack: (mass: string) => `Take back ${mass}.`,
   takeBackAlkali: (mass: string) =>
     `Take back ${mass}, gloves and goggles on, with a clean dry tool. It does not go back into its drum.`,

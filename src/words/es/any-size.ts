@@ -47,7 +47,7 @@ export const anySizePage: SameShape<typeof english.anySizePage> = {
     title: '¿Una pesada equivocada?',
     lead: 'Solo antes de que la solución alcalina toque las grasas. Escriba lo que marcó la balanza en cada línea que no es como está escrita. Deje vacías las demás.',
     combined: 'La solución alcalina y las grasas ya se han juntado',
-    dissolved: 'El álcali está en el agua',
+    dissolved: 'Hay álcali en el agua, todo o una parte',
   },
 };
 
@@ -111,6 +111,8 @@ export const sizeSheetWords: SameShape<typeof english.sizeSheetWords> = {
       `Para corregirlo, el lote llevaría ${statedMass(n.fats ?? 0, 1)} de grasas, más que su tamaño de la lista de ${statedMass(n.largest ?? 0, 1)}, y el taller no indica ningún recipiente con que compararlo.`,
     'made-lye-lacks-water': (n) =>
       `La solución alcalina está hecha y le falta el ${percent(n.missing)} de uno de sus líquidos. Más del ${percent(n.most)} es demasiado: está más caliente y más concentrada que nada de lo calculado.`,
+    'made-lye-lacks-alkali': (n) =>
+      `Según esta lectura, a la solución alcalina ya hecha le falta el ${percent(n.missing)} de un álcali. Más del ${percent(n.most)} no es un desliz (práctica común, sin fuente) y, si se leyó mal la balanza, añadirlo daría un lote cáustico.`,
     'made-lye-lacks-acid': () =>
       'La solución alcalina está hecha y un ácido que va en ella quedaría corto. El ácido no se echa sobre el álcali, y sin él el jabón es más cáustico.',
     'made-lye-near-saturation': (n) =>
@@ -140,6 +142,10 @@ export const sizeSheetWords: SameShape<typeof english.sizeSheetWords> = {
     `Lo que sobra no se puede retirar; por eso el lote crece un ${percent(more, 2)}, hasta ${mass} en total. Cambian todas las líneas. Haga esto, línea por línea, y que alguien vea cada línea.`,
   keep: 'queda igual',
   add: (mass) => `Añada ${mass}.`,
+  addBeforeAlkali: (mass) =>
+    `Añada ${mass}, solo mientras no haya álcali dentro. Si ya lo hay, márquelo arriba y lea otra vez.`,
+  takeBackBeforeAlkali: (mass) =>
+    `Retire ${mass}, solo mientras no haya álcali dentro. Si ya lo hay, márquelo arriba y lea otra vez.`,
   takeBack: (mass) => `Retire ${mass}.`,
   takeBackAlkali: (mass) =>
     `Retire ${mass}, con guantes y gafas, con un útil limpio y seco. No vuelve a su bidón.`,
