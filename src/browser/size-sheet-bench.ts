@@ -72,6 +72,7 @@ function fieldsOf(line: ShownLine) {
     type: 'text',
     inputmode: 'decimal',
     maxlength: '12',
+    placeholder: massUnit(),
     autocomplete: 'off',
     'aria-label': text.shown(name, massUnit()),
   });

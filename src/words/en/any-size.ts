@@ -156,5 +156,5 @@ export const sizeSheetWords = {
   addLater: (mass: string) =>
     `Weigh ${mass} into a cup of its own. Never onto the lye: it joins the batter once lye and fats are mixed.`,
   notYet: (mass: string, instead: string) =>
-    `Not weighed yet: weigh ${mass}. Weighed as written: ${instead}`,
+    `If not weighed yet: weigh ${mass}. If weighed as written: ${instead}`,
 } as const;

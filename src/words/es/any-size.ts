@@ -11,7 +11,7 @@ export const anySizePage: SameShape<typeof english.anySizePage> = {
   pageTitle: (code, name) => `${code} ${name}: otro tamaño`,
   link: '¿Otro tamaño, o una pesada equivocada?',
   needsScripts:
-    'Otro tamaño necesita scripts, que aquí están desactivados. Los tamaños de la lista valen sin ellos. No cambie nunca la escala de uno a mano.',
+    'Otro tamaño necesita scripts, que aquí están desactivados. Los tamaños de la lista valen sin ellos. Nunca calcule uno a mano a partir de otro.',
   notApproved:
     'No se calcula ningún otro tamaño: esta fórmula no está aprobada. Los tamaños de la lista están para leer, no para elaborar.',
   noWeights:
@@ -21,7 +21,7 @@ export const anySizePage: SameShape<typeof english.anySizePage> = {
     `De ${smallest} a ${largest} de grasas, el menor y el mayor tamaño de la lista (práctica común, sin fuente).`,
   fields: {
     fats: (unit) => `Grasas, ${unit}`,
-    batter: (unit) => `Masa para verter, ${unit}`,
+    batter: (unit) => `Masa de jabón para verter, ${unit}`,
     bars: (wetMass, like) => `Pastillas de ${wetMass} en fresco, como en ${like}`,
   },
   clear: 'Borrar',
@@ -37,15 +37,15 @@ export const anySizePage: SameShape<typeof english.anySizePage> = {
     nothing: 'No se ha calculado ningún tamaño. No hay nada que imprimir.',
     current:
       'El código, la revisión, la huella y la edición se han buscado hoy en el manual y son los vigentes.',
-    agreed: 'El formulador está de acuerdo con este tamaño. De acuerdo:',
+    agreed: 'Quien formula está de acuerdo con este tamaño. Nombre:',
     rework: 'Sin jabón reincorporado en un tamaño que no está en la lista.',
     amount: '(véanse las pesadas)',
     cautionsNote:
-      'Advertencias que no dependen del tamaño. El recipiente, el límite de calor, la balanza y el sobreengrasado más bajo de este tamaño se comprobaron al calcularlo.',
+      'Advertencias que no dependen del tamaño. El recipiente, el límite de calor, la balanza y el sobreengrasado mínimo de este tamaño se comprobaron al calcularlo.',
   },
   correction: {
     title: '¿Una pesada equivocada?',
-    lead: 'Solo antes de que la solución alcalina toque las grasas. Escriba lo que marcó la balanza en cada línea que no es como está escrita. Deje vacías las demás.',
+    lead: 'Solo antes de que la solución alcalina toque las grasas. Escriba lo que indicó la balanza en cada línea que no está como está escrita. Deje vacías las demás.',
     combined: 'La solución alcalina y las grasas ya se han juntado',
     dissolved: 'Hay álcali en el agua, todo o una parte',
   },
@@ -54,18 +54,18 @@ export const anySizePage: SameShape<typeof english.anySizePage> = {
 /** What is said of a size while the page is read. */
 export const anySizeWords: SameShape<typeof english.anySizeWords> = {
   broken:
-    'No se puede calcular otro tamaño: falta su archivo de datos o está dañado. Los tamaños de la lista valen. No cambie nunca la escala de uno a mano.',
+    'No se puede calcular otro tamaño: falta su archivo de datos o está dañado. Los tamaños de la lista valen. Nunca calcule uno a mano a partir de otro.',
   typed: {
     empty: 'Escriba primero un tamaño.',
     'other-sign': (sign) => `Escriba los decimales tras «${sign}», y nada entre los millares.`,
     'not-a-number': 'Eso no es un número. Use solo cifras.',
     'not-whole': 'Las pastillas se cuentan: escriba un número entero.',
-    zero: 'Eso es no elaborar nada. Escriba un número mayor que cero.',
+    zero: 'Con eso no hay nada que elaborar. Escriba un número mayor que cero.',
     'too-long': 'Es demasiado para cualquier tamaño de este taller.',
   },
   size: {
     fats: (mass) => `${mass} de grasas`,
-    batter: (mass) => `${mass} de masa`,
+    batter: (mass) => `${mass} de masa de jabón`,
     bars: (count, wetMass) =>
       count === 1 ? `1 pastilla de ${wetMass}` : `${count} pastillas de ${wetMass}`,
   },
@@ -73,15 +73,15 @@ export const anySizeWords: SameShape<typeof english.anySizeWords> = {
   listed: (label) =>
     `Este es el tamaño ${label} de la lista. Para elaborarlo, use su propia hoja de trabajo.`,
   caption: (code, size) => `${code}, ${size}: qué pesar, en orden de trabajo`,
-  lot: (lot) => `lote ${lot}`,
+  lot: (lot) => `partida ${lot}`,
   total: (mass) => `Todo junto ${mass}.`,
   poured: (mass, losses) => `Se espera verter ${mass}, tras pérdidas del ${percent(100 * losses)}.`,
   superfat: (weighed, lowest) =>
-    `Sobreengrasado con estos pesos ${fixed(weighed, 2)} %, el más bajo ${fixed(lowest, 1)} %, contada la balanza.`,
+    `Sobreengrasado con estos pesos ${fixed(weighed, 2)} %; sobreengrasado mínimo ${fixed(lowest, 1)} %, contada la balanza.`,
   thin: (lowest, limit) =>
-    `Advertencia. El sobreengrasado más bajo de este tamaño es ${fixed(lowest, 2)} %, menos del ${plain(limit)} %. Que otra persona lea cada pesada de grasa y de álcali, y ensaye antes de liberar.`,
+    `Advertencia. El sobreengrasado mínimo de este tamaño es ${fixed(lowest, 2)} %, menos del ${plain(limit)} %. Que otra persona lea cada pesada de grasa y de álcali, y haga usted el ensayo antes de liberar.`,
   refusedTitle: 'Sin pesadas en este tamaño',
-  advice: 'No cambie a mano la escala de otro tamaño. Pregunte al formulador.',
+  advice: 'Nunca lo calcule a mano a partir de otro tamaño. Pregunte a quien formula.',
   refusals: {
     'size-below-listed': (n) =>
       `Lleva ${statedMass(n.fats ?? 0, 1)} de grasas. El menor tamaño de la lista de esta fórmula lleva ${statedMass(n.smallest ?? 0, 1)}.`,
@@ -105,7 +105,7 @@ export const sizeSheetWords: SameShape<typeof english.sizeSheetWords> = {
     'lye-has-met-fats': () =>
       'La solución alcalina y las grasas se han juntado. No se puede calcular nada para lo que hay ahora en la olla.',
     'correction-too-large': (n) =>
-      `Para corregirlo, el lote crecería más del ${percent(n.most)} (práctica común, sin fuente). Eso no es un desliz: puede que el vaso o la línea sean otros.`,
+      `Para corregirlo, el lote crecería más del ${percent(n.most)} (práctica común, sin fuente). Eso no es un desliz: puede que sea otro vaso u otra línea.`,
     'correction-not-found': () => 'Ninguna pesada en estas balanzas lo corrige.',
     'grown-above-listed': (n) =>
       `Para corregirlo, el lote llevaría ${statedMass(n.fats ?? 0, 1)} de grasas, más que su tamaño de la lista de ${statedMass(n.largest ?? 0, 1)}, y el taller no indica ningún recipiente con que compararlo.`,
@@ -116,9 +116,9 @@ export const sizeSheetWords: SameShape<typeof english.sizeSheetWords> = {
     'made-lye-lacks-acid': () =>
       'La solución alcalina está hecha y un ácido que va en ella quedaría corto. El ácido no se echa sobre el álcali, y sin él el jabón es más cáustico.',
     'made-lye-near-saturation': (n) =>
-      `Hasta que se añada el agua que falta, la solución tendría un ${percent(n.strength)} de hidróxido, demasiado cerca de donde forma cristales, o de donde no se sabe.`,
+      `Hasta que se añada el agua que falta, la solución tendría un ${percent(n.strength)} de hidróxido, demasiado cerca del punto en que forma cristales, o no se sabe dónde está ese punto.`,
   },
-  shown: (name, unit) => `${name}: marcó la balanza, ${unit}`,
+  shown: (name, unit) => `${name}: la balanza indicó, ${unit}`,
   mixed: 'Junto con otros',
   mixedOf: (name) => `${name}: junto con otros, no se puede retirar`,
   columns: {
@@ -133,9 +133,9 @@ export const sizeSheetWords: SameShape<typeof english.sizeSheetWords> = {
   faulty: (name, sentence) => `${name}: ${sentence}`,
   stopTitle: 'Pare. No junte nada.',
   stopAdvice:
-    'Mantenga separadas la solución alcalina y las grasas, escriba en ambas qué son y avise al formulador. No se quite las gafas ni los guantes.',
+    'Mantenga separadas la solución alcalina y las grasas, escriba en ambas qué son y avise a quien formula. No se quite las gafas protectoras ni los guantes.',
   metAdvice:
-    'Déjelo donde está, escriba en él qué es y avise al formulador. No se quite las gafas ni los guantes.',
+    'Déjelo donde está, escriba en él qué es y avise a quien formula. No se quite las gafas protectoras ni los guantes.',
   right: 'Todo está como está escrito. No hay nada que corregir.',
   sameSize: 'El tamaño queda igual. Haga esto, línea por línea, y que alguien vea cada línea.',
   grown: (mass, more) =>
@@ -148,10 +148,11 @@ export const sizeSheetWords: SameShape<typeof english.sizeSheetWords> = {
     `Retire ${mass}, solo mientras no haya álcali dentro. Si ya lo hay, márquelo arriba y lea otra vez.`,
   takeBack: (mass) => `Retire ${mass}.`,
   takeBackAlkali: (mass) =>
-    `Retire ${mass}, con guantes y gafas, con un útil limpio y seco. No vuelve a su bidón.`,
+    `Retire ${mass}, con guantes y gafas protectoras puestos y un utensilio limpio y seco. No vuelve a su bidón.`,
   addAlkaliToLye: (mass) =>
-    `Añada ${mass} a la solución: déjela enfriar antes, luego en porciones pequeñas, removiendo.`,
+    `Añada ${mass} a la solución alcalina: déjela enfriar antes; después, en porciones pequeñas y removiendo.`,
   addLater: (mass) =>
-    `Pese ${mass} en un vaso aparte. Nunca sobre la solución: se añade a la masa cuando la solución y las grasas ya están mezcladas.`,
-  notYet: (mass, instead) => `Sin pesar aún: pese ${mass}. Pesado como está escrito: ${instead}`,
+    `Pese ${mass} en un vaso aparte. Nunca sobre la solución alcalina: se añade a la masa de jabón cuando la solución alcalina y las grasas ya están mezcladas.`,
+  notYet: (mass, instead) =>
+    `Si aún no está pesado: pese ${mass}. Si está pesado como está escrito: ${instead}`,
 };

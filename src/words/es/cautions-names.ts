@@ -29,7 +29,7 @@ export const cautionNames: SameShape<typeof english> = {
   'alcohol-near-heat': 'Alcohol cerca del calor',
   'heats-batter': 'Azúcar o alcohol calienta la masa',
   'salt-sets-fast': 'La sal la endurece deprisa',
-  'free-acid-seizes': 'El ácido libre espesa la masa de golpe',
+  'free-acid-seizes': 'El ácido libre espesa de golpe',
   'fast-trace': 'Espesa pronto',
   'slow-trace': 'Espesa tarde',
   'fragrance-speeds-trace': 'La fragancia acelera la masa',

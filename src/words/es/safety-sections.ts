@@ -7,7 +7,7 @@ export const safetySections: SameShape<typeof english> = [
     id: 'what',
     title: 'Qué es la solución alcalina',
     items: [
-      'El hidróxido de sodio (sosa cáustica) y el hidróxido de potasio (potasa cáustica) convierten la grasa en jabón. La piel y los ojos están hechos de cosas que estos disuelven igual de bien.',
+      'El hidróxido de sodio (sosa o soda cáustica) y el hidróxido de potasio (potasa cáustica) convierten la grasa en jabón. La piel y los ojos están hechos de cosas que estos disuelven igual de bien.',
       'Disueltos en agua son la solución alcalina: transparente, sin olor y caliente. Parece agua. Por eso se etiqueta y nunca se pierde de vista. En el oficio se llama también lejía cáustica; nunca es lejía doméstica (cloro, lavandina).',
       'La solución alcalina y las grasas mezcladas son la masa de jabón; también es cáustica. El jabón fresco puede contener todavía álcali libre, que es álcali que no ha encontrado grasa. Trátelo como cáustico hasta que se haya medido.',
     ],

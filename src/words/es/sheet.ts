@@ -94,10 +94,10 @@ export const sheetWords: SameShape<typeof english> = {
   record: {
     title: 'Lo que se hizo de otro modo',
     deviations: 'Desviaciones y lo que se decidió',
-    rework: 'Jabón reprocesado: lote, masa, acordado por',
+    rework: 'Jabón reincorporado: lote, masa, acordado por',
     /** Cut off, never rounded up: it is the most. */
     reworkAtMost: (percent, mass) =>
-      `Jabón reprocesado (máximo ${plain(percent)} %, ${massAtMost(mass)}): lote, masa, acordado por`,
+      `Jabón reincorporado (máximo ${plain(percent)} %, ${massAtMost(mass)}): lote, masa, acordado por`,
     portions: 'Masa de jabón dividida: porción, peso, qué se le unió',
   },
   yield: {
