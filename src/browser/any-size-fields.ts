@@ -1,3 +1,4 @@
+import { wellFormed } from '../search/well-formed.ts';
 import type { Wish } from './any-size-wanted.ts';
 import { inputs, part } from './find-dom.ts';
 
@@ -22,7 +23,7 @@ export function wishFields(): WishFields {
     for (const field of fields) field.value = wish?.way === wayOf(field) ? wish.text : '';
   };
   const keep = (wish: Wish | null) => {
-    const hash = wish && `#${wish.way}=${encodeURIComponent(wish.text.toWellFormed())}`;
+    const hash = wish && `#${wish.way}=${encodeURIComponent(wellFormed(wish.text))}`;
     history.replaceState(null, '', hash ?? location.pathname + location.search);
   };
   show(addressWish());

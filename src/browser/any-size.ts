@@ -1,4 +1,5 @@
 import './speak.ts';
+import { wellFormed } from '../search/well-formed.ts';
 import { askForSize, withData } from './any-size-ask.ts';
 import { notes } from './any-size-notes.ts';
 import { weightsTable } from './any-size-weights.ts';
@@ -14,6 +15,6 @@ withData((data) => {
     );
     // the size goes along to the sheet
     const link = part('any-size-link') as HTMLAnchorElement;
-    link.hash = wish ? `${wish.way}=${encodeURIComponent(wish.text.toWellFormed())}` : '';
+    link.hash = wish ? `${wish.way}=${encodeURIComponent(wellFormed(wish.text))}` : '';
   });
 });

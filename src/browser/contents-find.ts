@@ -1,3 +1,4 @@
+import { wellFormed } from '../search/well-formed.ts';
 import { part } from './find-dom.ts';
 
 /** Takes the words typed on the page of contents to the finder, whose address keeps them. */
@@ -8,6 +9,6 @@ const link = part('contents-find-link') as HTMLAnchorElement;
 form.hidden = false;
 form.addEventListener('submit', (event) => {
   event.preventDefault();
-  const words = encodeURIComponent(field.value.toWellFormed());
+  const words = encodeURIComponent(wellFormed(field.value));
   location.assign(words === '' ? link.href : `${link.href}#words=${words}`);
 });

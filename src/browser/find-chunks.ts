@@ -9,6 +9,9 @@ declare global {
 /** A file of the search data that is missing or damaged; its message is the file's path. */
 export class ChunkError extends Error {}
 
+/** Whether this browser can unpack the files of the search. */
+export const canSearch = (): boolean => 'DecompressionStream' in globalThis;
+
 /** Path from this page to the root of the handbook. */
 const root = document.documentElement.dataset.root ?? '';
 

@@ -12,7 +12,7 @@ export function resultTable(
   const body = element('tbody');
   const table = element(
     'table',
-    { class: 'list find-table' },
+    { class: 'list find-table', 'aria-label': findWords.results },
     element('caption', {}, findWords.acidsNote),
     element(
       'thead',

@@ -4,6 +4,7 @@ import type { FinderData } from '../search/finder/finder-data.ts';
 import { type FinderState, NOTHING_ASKED } from '../search/finder/state.ts';
 import { LONGEST_QUERY } from '../search/reader/query.ts';
 import { findWords } from '../words/en/find.ts';
+import { canSearch } from './find-chunks.ts';
 import { shownColumns, withColumn } from './find-columns.ts';
 import { part } from './find-dom.ts';
 import { fieldsOf, fillFields, readFields } from './find-fields.ts';
@@ -69,6 +70,11 @@ function start(data: FinderData): void {
   }
 
   async function lookForWords(): Promise<void> {
+    if (!canSearch()) {
+      say('find-words-note', findWords.browserTooOld);
+      draw();
+      return;
+    }
     const mine = ++turn;
     const asked = state.words;
     try {
@@ -158,6 +164,10 @@ function start(data: FinderData): void {
   });
   addEventListener('hashchange', readFromAddress);
 
+  if (fields.words && !canSearch()) {
+    fields.words.disabled = true;
+    say('find-words-note', findWords.browserTooOld);
+  }
   for (const id of ['find-form', 'find-results']) part(id).hidden = false;
   part('find-off').hidden = true;
   const narrow = !matchMedia('(min-width: 60rem)').matches;

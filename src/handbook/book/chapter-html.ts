@@ -32,6 +32,8 @@ export function chapterHtml(
     }
     node.tagName = lowered(node.tagName);
     const { properties } = node;
+    // three hundred regions of a few names would help nobody to find the way
+    if (node.tagName === 'section') delete properties.ariaLabelledBy;
     // what is folded away on a screen cannot be unfolded on paper
     if (node.tagName === 'details') properties.open = true;
     if (typeof properties.id === 'string') properties.id = prefixed(properties.id);

@@ -1,3 +1,4 @@
+import { wellFormed } from '../well-formed.ts';
 import { dateOf, dayOf, type FinderData, type Property, type Trait } from './finder-data.ts';
 import { pageTypeOf } from './page-types.ts';
 import {
@@ -41,7 +42,7 @@ export function writeAddress(state: FinderState, data: FinderData): string {
   const add = (key: string, values: readonly string[]) => {
     if (values.length > 0) parts.push(`${key}=${values.map(encodeURIComponent).join(',')}`);
   };
-  if (state.words !== '') add('words', [state.words.toWellFormed()]);
+  if (state.words !== '') add('words', [wellFormed(state.words)]);
   if (state.where) add('where', [state.where]);
   for (const property of data.properties) {
     const range = state.ranges[property.id];

@@ -1,3 +1,4 @@
+import { wellFormed } from '../well-formed.ts';
 import type { Stem } from './stemmer.ts';
 
 /** What was typed, taken apart as the index took the pages apart. */
@@ -38,7 +39,7 @@ export function readQuery(typed: string, include: ReadonlySet<string>, stem: Ste
     .replace(/\s{2,}/g, ' ')
     .trim()
     .split(' ')
-    .map((term) => ({ typed: term.toWellFormed(), bare: withoutMarks(term).toWellFormed() }))
+    .map((term) => ({ typed: wellFormed(term), bare: wellFormed(withoutMarks(term)) }))
     .filter(({ bare }) => bare !== '')
     .map(({ typed, bare }) => {
       const letters = bare.replace(DROPPED, '');
@@ -51,10 +52,12 @@ export function readQuery(typed: string, include: ReadonlySet<string>, stem: Ste
 /** What a reader takes for one letter. Printable ASCII has no others than its characters, and needs no segmenter made. */
 function* lettersOf(text: string): Iterable<string> {
   if (/^[ -~]*$/.test(text)) yield* text;
-  else {
+  else if (typeof Intl.Segmenter === 'function') {
     const letters = new Intl.Segmenter(undefined, { granularity: 'grapheme' }).segment(text);
     for (const { segment } of letters) yield segment;
   }
+  // Firefox before 125 has none: a letter and its marks, which is the same in the languages of the handbook
+  else for (const [letter] of text.matchAll(/\P{M}\p{M}*|\p{M}+/gu)) yield letter;
 }
 
 /** The text without its combining marks. */

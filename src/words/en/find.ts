@@ -71,7 +71,7 @@ export const findWords = {
   noWord: 'There is no word in this.',
   limits: 'Limits',
   limitsLead:
-    'Each mark on a strip is a formula; the dark ones are those found. Type the ends, step them with the arrow keys, or drag over the strip. A value is compared as it is shown.',
+    'Each mark on a strip is a formula; the strong ones are those found. Type the ends, step them with the arrow keys, or drag over the strip. A value is compared as it is shown.',
   least: (name: string) => `${name}, at least`,
   most: (name: string) => `${name}, at most`,
   asColumn: 'column',
@@ -102,7 +102,7 @@ export const findWords = {
   acidsOf: (saturated: string, mono: string, poly: string) =>
     `saturated ${saturated} %, monounsaturated ${mono} %, polyunsaturated ${poly} %`,
   acidsNote:
-    'Acids: dark, saturated; grey, monounsaturated; white, polyunsaturated; what is left, hydroxylated.',
+    'Acids, from the left: filled, saturated; grey, monounsaturated; open, polyunsaturated; what is left, hydroxylated.',
   noValue: '–',
   listed: (n: number, all: number) => `The first ${n} of ${all} are listed.`,
   showMore: (n: number) => `Show ${n} more`,
@@ -116,6 +116,8 @@ export const findWords = {
     `This part of the address says nothing here and was left out: ${parts}`,
   needsScripts:
     'Asking by word and by number needs scripts, which are off or could not start. These lists answer the same questions without them.',
+  browserTooOld:
+    'This browser is too old to search by word. The limits work, and so do the lists below.',
   searchBroken: (file: string) =>
     `The search cannot be used: ${file} is missing or damaged. The lists below need no search.`,
   lists: 'Lists',

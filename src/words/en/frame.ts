@@ -17,6 +17,8 @@ export const frame = {
   invented: 'Demonstration: an invented workshop, not a formulary to work from.',
   foot: 'Not a substitute for the supplier’s safety data sheet, for local rules, or for a licensed practitioner’s advice. Those come first.',
   percent: '%',
+  /** For those who hear a table: `g` after a number is easily taken for a letter. */
+  massIn: { metric: 'in grams', us: 'in pounds and ounces' },
   kinds: { bar: 'Bar', paste: 'Paste', liquid: 'Liquid' },
   processes: { cold: 'cold process', hot: 'hot process' },
   stages: {

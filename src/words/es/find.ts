@@ -68,7 +68,7 @@ export const findWords: SameShape<typeof english> = {
   noWord: 'Aquí no hay ninguna palabra.',
   limits: 'Límites',
   limitsLead:
-    'Cada marca de una franja es una fórmula; las oscuras son las encontradas. Escriba los extremos, muévalos con las teclas de flecha o arrastre sobre la franja. Cada valor se compara tal como se muestra.',
+    'Cada marca de una franja es una fórmula; las más marcadas son las encontradas. Escriba los extremos, muévalos con las teclas de flecha o arrastre sobre la franja. Cada valor se compara tal como se muestra.',
   least: (name) => `${name}, como mínimo`,
   most: (name) => `${name}, como máximo`,
   asColumn: 'columna',
@@ -99,7 +99,7 @@ export const findWords: SameShape<typeof english> = {
   acidsOf: (saturated, mono, poly) =>
     `saturados ${saturated} %, monoinsaturados ${mono} %, poliinsaturados ${poly} %`,
   acidsNote:
-    'Ácidos: oscuro, saturados; gris, monoinsaturados; blanco, poliinsaturados; lo que queda, hidroxilados.',
+    'Ácidos, desde la izquierda: lleno, saturados; gris, monoinsaturados; vacío, poliinsaturados; lo que queda, hidroxilados.',
   noValue: '–',
   listed: (n, all) => `Se muestran las primeras ${n} de ${all}.`,
   showMore: (n) => `Mostrar ${n} más`,
@@ -112,6 +112,8 @@ export const findWords: SameShape<typeof english> = {
   ignored: (parts) => `Esta parte de la dirección no significa nada aquí y se dejó fuera: ${parts}`,
   needsScripts:
     'Para buscar por palabra y por número hacen falta scripts, que están desactivados o no pudieron iniciarse. Estas listas responden a las mismas preguntas sin ellos.',
+  browserTooOld:
+    'Este navegador es demasiado antiguo para buscar por palabra. Los límites funcionan, y las listas de abajo también.',
   searchBroken: (file) =>
     `La búsqueda no puede usarse: ${file} falta o está dañado. Las listas de abajo no necesitan búsqueda.`,
   lists: 'Listas',

@@ -19,6 +19,7 @@ export const frame: SameShape<typeof english> = {
   invented: 'Demostración: un taller inventado, no un formulario con el que trabajar.',
   foot: 'No sustituye la ficha de datos de seguridad (FDS) del proveedor, las normas locales ni el consejo de un profesional habilitado. Eso va primero.',
   percent: '%',
+  massIn: { metric: 'en gramos', us: 'en libras y onzas' },
   kinds: { bar: 'Pastilla', paste: 'Pasta', liquid: 'Líquido' },
   processes: { cold: 'proceso en frío', hot: 'proceso en caliente' },
   stages: {
