@@ -27,15 +27,14 @@ const FORCED = { ...LIGHT, forcedColors: 'active' } as const;
 const PRINT = { ...LIGHT, media: 'print' } as const;
 
 /**
- * All rules where the page is first seen; then, in place, those that a mode can break. What contrast is in forced
- * colours is the reader's own choice.
+ * All rules where the page is first seen; then, in place, those that a mode can break. Contrast takes longest and is
+ * looked at once a theme; in forced colours it is the reader's own choice.
  */
 const MODES = [
   { mode: 'light, desktop', size: DESKTOP, media: LIGHT, rules: null },
-  { mode: 'dark, desktop', size: DESKTOP, media: DARK, rules: ['color-contrast'] },
   { mode: 'forced colours, desktop', size: DESKTOP, media: FORCED, rules: LAYOUT },
   { mode: 'print', size: DESKTOP, media: PRINT, rules: ['color-contrast', ...STRUCTURE] },
-  { mode: 'light, phone', size: PHONE, media: LIGHT, rules: ['color-contrast', ...LAYOUT] },
+  { mode: 'light, phone', size: PHONE, media: LIGHT, rules: LAYOUT },
   { mode: 'dark, phone', size: PHONE, media: DARK, rules: ['color-contrast'] },
   { mode: 'forced colours, phone', size: PHONE, media: FORCED, rules: LAYOUT },
 ] as const;
