@@ -21,6 +21,7 @@ export const PAGE_KINDS: Readonly<Record<string, string | null>> = {
   'materials/[id].astro': 'materials/goat-milk.html',
   'materials/index.astro': 'materials/index.html',
   'methods.astro': 'methods.html',
+  'not-kept.astro': 'not-kept.html',
   'print.astro': 'print.html',
   'safety-poster.astro': 'safety-poster.html',
   'safety-record.astro': 'safety-record.html',
