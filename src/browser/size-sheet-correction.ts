@@ -25,9 +25,10 @@ export function correctionForm(data: AnySizeData, redraw: Redraw): (planned: Siz
   };
   const stop = (breach: Breach) => {
     redraw(null, 'stopped');
-    const advice = breach.rule === 'lye-has-met-fats' ? text.metAdvice : text.stopAdvice;
-    say('', refusal(text.stopTitle, refusalText(breach, text.refusals), advice));
-    part('correction-said').textContent = text.stopTitle;
+    const met = breach.rule === 'lye-has-met-fats';
+    const title = met ? text.metTitle : text.stopTitle;
+    const advice = met ? text.metAdvice : text.stopAdvice;
+    say(title, refusal(title, refusalText(breach, text.refusals), advice));
   };
   const answer = () => {
     const read = fields?.read();

@@ -1,3 +1,4 @@
+import { RECKONED } from '../cautions/rule.ts';
 import { COMMON_PRACTICE } from '../reference/caution-thresholds.ts';
 import type { Reference } from '../reference/reference.ts';
 import { words } from '../words/catalogue.ts';
@@ -17,6 +18,7 @@ export function nameOf(reference: Reference, id: string): string {
 /** Title of a source with its edition or year; an id without a record stands for itself. */
 export function sourceName(reference: Reference, id: string): string {
   const source = reference.sources.get(id);
+  if (id === RECKONED) return words.frame.reckoned;
   if (!source) return id === COMMON_PRACTICE ? words.frame.how['common practice'] : id;
   const edition = source.edition ?? (source.year === null ? null : String(source.year));
   return edition === null ? source.title : `${source.title}, ${edition}`;

@@ -136,7 +136,11 @@ describe.each(['file', 'http'])('any size, opened by %s', (how) => {
     expect(weights.coconut).toBeCloseTo((250 * 460) / 450, 0);
     expect(await page.locator('#correction-said').textContent()).toContain('the batch grows by');
     await page.getByLabel('Lye and fats have met').check();
-    expect(await todo.textContent()).toContain('Stop. Do not combine.');
+    expect(await todo.textContent()).toContain('Stop. No weights.');
+    expect(await shown(page)).toEqual({});
+    // what has met stays stopped, whatever is typed after it
+    await olive.fill('4x');
+    expect(await todo.textContent()).toContain('Stop. No weights.');
     expect(await shown(page)).toEqual({});
   });
 });

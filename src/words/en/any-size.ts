@@ -134,10 +134,11 @@ export const sizeSheetWords = {
     `${name}: this scale shows steps of ${step}. Read it again.`,
   faulty: (name: string, sentence: string) => `${name}: ${sentence}`,
   stopTitle: 'Stop. Do not combine.',
+  metTitle: 'Stop. No weights.',
   stopAdvice:
     'Keep lye and fats apart, write on both what they are, and tell the formulator. Goggles and gloves stay on.',
   metAdvice:
-    'Leave it where it is, write on it what it is, and tell the formulator. Goggles and gloves stay on.',
+    'Heat off. Leave it where it is, write on it what it is, and tell the formulator. Goggles and gloves stay on.',
   right: 'Everything is as written. Nothing to put right.',
   sameSize: 'The size stays. Do this, line by line, and have each line seen.',
   grown: (mass: string, more: number) =>

@@ -43,6 +43,8 @@ export const frame = {
     bars: (count: number, grams: number) => `${count} bars of ${statedMass(grams)}, poured weight`,
     mould: (millilitres: number) => `mould of ${volume(millilitres)}`,
   },
+  /** Of a caution that follows from the formula's own numbers. */
+  reckoned: 'reckoned here, see methods',
   how: {
     measured: 'measured',
     standard: 'standard',

@@ -132,10 +132,11 @@ export const sizeSheetWords: SameShape<typeof english.sizeSheetWords> = {
   offStep: (name, step) => `${name}: esta balanza marca escalones de ${step}. Léala otra vez.`,
   faulty: (name, sentence) => `${name}: ${sentence}`,
   stopTitle: 'Pare. No junte nada.',
+  metTitle: 'Pare. No hay pesadas.',
   stopAdvice:
     'Mantenga separadas la solución alcalina y las grasas, escriba en ambas qué son y avise a quien formula. No se quite las gafas protectoras ni los guantes.',
   metAdvice:
-    'Déjelo donde está, escriba en él qué es y avise a quien formula. No se quite las gafas protectoras ni los guantes.',
+    'Apague el calor. Déjelo donde está, escriba en el recipiente qué es y avise a quien formula. No se quite las gafas protectoras ni los guantes.',
   right: 'Todo está como está escrito. No hay nada que corregir.',
   sameSize: 'El tamaño queda igual. Haga esto, línea por línea, y que alguien vea cada línea.',
   grown: (mass, more) =>

@@ -44,6 +44,7 @@ export const frame: SameShape<typeof english> = {
     bars: (count, grams) => `${count} pastillas de ${statedMass(grams)}, peso al verter`,
     mould: (millilitres) => `molde de ${volume(millilitres)}`,
   },
+  reckoned: 'calculado aquí, véanse los métodos',
   how: {
     measured: 'medido',
     standard: 'norma',
