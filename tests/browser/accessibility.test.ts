@@ -72,3 +72,23 @@ describe('axe finds nothing', { timeout: 90_000 }, () => {
     expect(faults).toEqual({});
   });
 });
+
+test('in forced colours one entry of the menu is marked, and drawings have the colours of the text', async () => {
+  const page = await browser.newPage({ forcedColors: 'active' });
+  await page.goto(`${pathToFileURL(site).href}/formulas/QY-018.html`);
+  const seen = await page.evaluate(() => {
+    const colour = (element: Element | null, property: string) =>
+      element && getComputedStyle(element).getPropertyValue(property);
+    const ground = colour(document.documentElement, 'background-color');
+    const entries = [...document.querySelectorAll('.running-head nav a')];
+    const marked = entries.filter((entry) => colour(entry, 'border-bottom-color') !== ground);
+    return {
+      marked: marked.map((entry) => entry.hasAttribute('aria-current')),
+      drawn: colour(document.querySelector('.bar .solid'), 'fill'),
+      written: colour(document.body, 'color'),
+    };
+  });
+  await page.close();
+  expect(seen.marked).toEqual([true]);
+  expect(seen.drawn).toBe(seen.written);
+});

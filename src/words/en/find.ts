@@ -102,7 +102,7 @@ export const findWords = {
   acidsOf: (saturated: string, mono: string, poly: string) =>
     `saturated ${saturated} %, monounsaturated ${mono} %, polyunsaturated ${poly} %`,
   acidsNote:
-    'Acids, from the left: filled, saturated; grey, monounsaturated; open, polyunsaturated; what is left, hydroxylated.',
+    'Acids, from the left: filled, saturated; half-tone, monounsaturated; open, polyunsaturated; what is left, hydroxylated.',
   noValue: '–',
   listed: (n: number, all: number) => `The first ${n} of ${all} are listed.`,
   showMore: (n: number) => `Show ${n} more`,

@@ -99,7 +99,7 @@ export const findWords: SameShape<typeof english> = {
   acidsOf: (saturated, mono, poly) =>
     `saturados ${saturated} %, monoinsaturados ${mono} %, poliinsaturados ${poly} %`,
   acidsNote:
-    'Ácidos, desde la izquierda: lleno, saturados; gris, monoinsaturados; vacío, poliinsaturados; lo que queda, hidroxilados.',
+    'Ácidos, desde la izquierda: lleno, saturados; medio tono, monoinsaturados; vacío, poliinsaturados; lo que queda, hidroxilados.',
   noValue: '–',
   listed: (n, all) => `Se muestran las primeras ${n} de ${all}.`,
   showMore: (n) => `Mostrar ${n} más`,
