@@ -2,7 +2,7 @@ import type { Sized } from '../chemistry/any-size.ts';
 import type { AtTheBench, Shown } from '../chemistry/correction.ts';
 import { grams } from '../chemistry/quantity.ts';
 import { anySizeWords, sizeSheetWords as text } from '../words/en/any-size.ts';
-import { massUnit, statedMass, weighed } from '../words/measures.ts';
+import { massUnit, stepText, weighed } from '../words/measures.ts';
 import { voice } from '../words/voice.ts';
 import type { AnySizeData } from './any-size-data.ts';
 import { type ShownLine, shownGroups } from './any-size-lines.ts';
@@ -59,7 +59,7 @@ function readingOf(typed: string, { name, step }: ShownLine): number | string {
     return text.faulty(name, said);
   }
   const steps = mass.value / step;
-  if (Math.abs(steps - Math.round(steps)) > 1e-6) return text.offStep(name, statedMass(step));
+  if (Math.abs(steps - Math.round(steps)) > 1e-6) return text.offStep(name, stepText(step));
   // to the digits that weights are kept to, so that what is right is right to the last bit
   return Number((Math.round(steps) * step).toPrecision(12));
 }

@@ -1,7 +1,7 @@
 import './speak.ts';
 import type { Sized } from '../chemistry/any-size.ts';
 import { sizeSheetWords as text } from '../words/en/any-size.ts';
-import { statedMass } from '../words/measures.ts';
+import { stepText } from '../words/measures.ts';
 import { type Asked, askForSize, withData } from './any-size-ask.ts';
 import type { AnySizeData } from './any-size-data.ts';
 import { shownGroups, stepsOf } from './any-size-lines.ts';
@@ -27,7 +27,7 @@ function put(sized: Sized | null, name: string, data: AnySizeData): void {
 /** `steps of 0.1 g; steps of 1 g` */
 const scalesOf = ({ weighed }: Sized, data: AnySizeData): string =>
   stepsOf(shownGroups(weighed, data))
-    .map((step) => text.scale(statedMass(step)))
+    .map((step) => text.scale(stepText(step)))
     .join('; ');
 
 withData((data) => {

@@ -43,6 +43,12 @@ export const massAtMost = (mass: number): string =>
     ? expectedMass((Math.floor((mass / OUNCE) * 10) / 10) * OUNCE)
     : expectedMass(Math.floor(mass));
 
+/** The same, rounded up and never down: for the least that may go in. [g] */
+export const massAtLeast = (mass: number): string =>
+  isUs()
+    ? expectedMass((Math.ceil((mass / OUNCE) * 10 - 1e-9) / 10) * OUNCE)
+    : expectedMass(Math.ceil(mass - 1e-9));
+
 /** A mass that a file states, with no more decimals than it has. [g] */
 export function statedMass(mass: number, decimals = 3): string {
   if (!isUs()) return `${plain(mass, decimals)} g`;

@@ -5,6 +5,7 @@ import { speak } from '../../src/words/catalogue.ts';
 import {
   expectedMass,
   fineMass,
+  massAtLeast,
   massAtMost,
   massUnits,
   statedMass,
@@ -92,6 +93,12 @@ describe('in a US edition', () => {
     expect(spaced(massAtMost(16 * OUNCE))).toBe('1 lb 0.0 oz');
     speak('en-GB');
     expect(massAtMost(99.9)).toBe('99 g');
+    expect(massAtLeast(99.1)).toBe('100 g');
+    expect(massAtLeast(100)).toBe('100 g');
+    speak('en-US', 'us');
+    expect(spaced(massAtLeast(15.91 * OUNCE))).toBe('1 lb 0.0 oz');
+    expect(spaced(massAtLeast(3 * POUND))).toBe('3 lb 0.0 oz');
+    expect(spaced(massAtMost(24.5 * POUND))).toBe('24 lb 8.0 oz');
   });
 
   test('volumes and temperatures; a difference has no 32 in it', () => {
