@@ -11,6 +11,7 @@ export type Parts =
       readonly body: string;
       /** The text after the frontmatter alone. */
       readonly bodyText: string;
+      /** Where the text begins; the closing line where there is no line after it. */
       readonly bodyPlace: Place;
     }
   | {
@@ -51,7 +52,7 @@ export function splitFrontmatter(fileText: string): Parts {
     yamlLine: opening + 2,
     body: before.replaceAll(/[^\r\n]/g, ' ') + bodyText,
     bodyText,
-    bodyPlace: { line: closing + 2, column: 1 },
+    bodyPlace: { line: Math.min(closing + 2, lines.length), column: 1 },
   };
 }
 

@@ -105,7 +105,8 @@ export function margin(working: Working): Section {
         numbers: rootOf(sumOf(...contributions.map(({ result }) => squareOf(result)))),
         value: together,
         digits: digitsOf(together),
-        within: 0.0005,
+        // each contribution is rounded by itself
+        within: 0.0005 * Math.max(1, Math.sqrt(contributions.length)),
         unit: '%',
       }),
       sumStep('worst-equivalents', 'E', fats, (range) => range.low, atWorst.saponifiable, working),

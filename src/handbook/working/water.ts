@@ -14,28 +14,40 @@ export function water(working: Working): Section {
     rule.form === 'lye-concentration'
       ? [
           product(symbol('m', 'alkali'), fractionOf(minus(exact(1), symbol('c')), symbol('c'))),
-          product(figure(ruled), fractionOf(minus(exact(1), exact(rule.value)), exact(rule.value))),
+          product(
+            figure(ruled, toMilligram(ruled)),
+            fractionOf(minus(exact(1), exact(rule.value)), exact(rule.value)),
+          ),
           (ruled * (1 - rule.value)) / rule.value,
         ]
       : rule.form === 'per-alkali'
         ? [
             product(symbol('r'), symbol('m', 'alkali')),
-            product(exact(rule.value), figure(ruled)),
+            product(exact(rule.value), figure(ruled, toMilligram(ruled))),
             ruled * rule.value,
           ]
         : [
             product(symbol('p'), symbol('m', 'fats')),
-            product(exact(rule.value), figure(fats)),
+            product(exact(rule.value), figure(fats, toMilligram(fats))),
             fats * rule.value,
           ];
   const steps = [
-    step({ kind: 'water-total', symbol: symbol('W'), equation, numbers, value: total, unit: 'g' }),
+    step({
+      kind: 'water-total',
+      symbol: symbol('W'),
+      equation,
+      numbers,
+      value: total,
+      digits: toMilligram(total),
+      unit: 'g',
+    }),
   ];
-  let left = figure(total);
+  let left = figure(total, toMilligram(total));
   const takeAway = (kind: 'water-from-liquids' | 'water-in-stock', part: Step) => {
     steps.push({ ...part, kind });
     left = minus(left, part.result);
   };
+  const inLiquids = charge.liquids.reduce((sum, { liquid, mass }) => sum + mass * liquid.water, 0);
   if (liquids.length > 0) {
     takeAway(
       'water-from-liquids',
@@ -44,9 +56,12 @@ export function water(working: Working): Section {
         symbol: symbol('W', 'liquids'),
         equation: product(symbol('m'), symbol('w')),
         numbers: sumOf(
-          ...charge.liquids.map(({ liquid, mass }) => product(figure(mass), exact(liquid.water))),
+          ...charge.liquids.map(({ liquid, mass }) =>
+            product(figure(mass, toMilligram(mass)), exact(liquid.water)),
+          ),
         ),
-        value: charge.liquids.reduce((sum, { liquid, mass }) => sum + mass * liquid.water, 0),
+        value: inLiquids,
+        digits: toMilligram(inLiquids),
         unit: 'g',
       }),
     );
@@ -62,10 +77,14 @@ export function water(working: Working): Section {
         equation: minus(symbol('m', 'weighed'), symbol('m', 'pure')),
         numbers: sumOf(
           ...solutions.map(({ weighedMass, pureMass }) =>
-            minus(figure(weighedMass), figure(pureMass)),
+            minus(
+              figure(weighedMass, toMilligram(weighedMass)),
+              figure(pureMass, toMilligram(pureMass)),
+            ),
           ),
         ),
         value: stock,
+        digits: toMilligram(stock),
         unit: 'g',
       }),
     );
@@ -93,3 +112,6 @@ export function water(working: Working): Section {
   }
   return { id: 'water', subject: null, steps };
 }
+
+/** Digits that print grams to the milligram at least: what is left may be a small difference of large masses. */
+const toMilligram = (mass: number): number => Math.max(6, 4 + Math.floor(Math.log10(mass || 1)));
