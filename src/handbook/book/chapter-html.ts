@@ -1,13 +1,11 @@
-import type { Element, ElementContent, Properties, Root } from 'hast';
-import { fromHtml } from 'hast-util-from-html';
-import { toHtml } from 'hast-util-to-html';
-import { SKIP, visit } from 'unist-util-visit';
 import type { Chapter } from './chapters.ts';
+import { type Attribute, attributesOf, htmlPieces, type Piece } from './html-tags.ts';
 
 /** What can only be used on a screen, or only where its script runs. */
 const LEFT_OUT = new Set(['script', 'noscript', 'template', 'form', 'search', 'button']);
-/** Attributes that name ids, by their names in hast. */
-const NAMING_IDS = ['htmlFor', 'headers', 'list', 'ariaLabelledBy', 'ariaDescribedBy'] as const;
+const LEFT_OUT_CLASSES = /(?:^|\s)(?:screen|sizes)(?:\s|$)/;
+/** Attributes that name ids. */
+const NAMING_IDS = new Set(['for', 'headers', 'list', 'aria-labelledby', 'aria-describedby']);
 
 /**
  * A page of the handbook as a chapter of the one document: what stands in its `main`, one rank of headings lower,
@@ -15,64 +13,91 @@ const NAMING_IDS = ['htmlFor', 'headers', 'list', 'ariaLabelledBy', 'ariaDescrib
  *
  * @param html The whole page, its addresses still counted from the root.
  * @param chapters All chapters of the document by the name of their page.
- * @throws Error for a page without a `main`.
+ * @throws Error for a page without a `main`, or one that is not closed tag by tag.
  */
 export function chapterHtml(
   html: string,
-  { page, id }: Chapter,
+  chapter: Chapter,
   chapters: ReadonlyMap<string, Chapter>,
 ): string {
-  const main = mainOf(fromHtml(html));
-  if (!main) throw new Error(`${page} has no <main> to print`);
-  const prefixed = (name: string) => `${id}--${name}`;
-  visit(main, 'element', (node, index, parent) => {
-    if (isLeftOut(node) && parent && index !== undefined) {
-      parent.children.splice(index, 1);
-      return [SKIP, index];
-    }
-    node.tagName = lowered(node.tagName);
-    const { properties } = node;
-    // three hundred regions of a few names would help nobody to find the way
-    if (node.tagName === 'section') delete properties.ariaLabelledBy;
-    // what is folded away on a screen cannot be unfolded on paper
-    if (node.tagName === 'details') properties.open = true;
-    if (typeof properties.id === 'string') properties.id = prefixed(properties.id);
-    if (typeof properties.href === 'string') {
-      properties.href = placeOf(properties.href, page, chapters);
-    }
-    for (const name of NAMING_IDS) prefixAll(properties, name, prefixed);
-    for (const [name, value] of Object.entries(properties)) {
-      if (name.startsWith('dataPagefind')) delete properties[name];
-      else if (typeof value === 'string') {
-        properties[name] = value.replace(/url\(#([^)]+)\)/g, (_, to) => `url(#${prefixed(to)})`);
-      }
-    }
-    return undefined;
-  });
-  return toHtml(main.children as ElementContent[], { allowDangerousHtml: false });
+  const written: string[] = [];
+  // how many elements of what is left out are open
+  let leftOut = 0;
+  for (const piece of htmlPieces(mainOf(html, chapter.page))) {
+    if (leftOut > 0) {
+      if (piece.kind === 'open' && !piece.empty) leftOut++;
+      else if (piece.kind === 'close') leftOut--;
+    } else if (piece.kind === 'open') {
+      const tag = opened(piece, chapter, chapters);
+      if (tag !== null) written.push(tag);
+      else if (!piece.empty) leftOut = 1;
+    } else written.push(piece.kind === 'close' ? `</${lowered(piece.name)}>` : piece.raw);
+  }
+  return written.join('');
 }
 
-function mainOf(root: Root): Element | null {
-  let found: Element | null = null;
-  visit(root, 'element', (node) => {
-    if (node.tagName === 'main') found = node;
-  });
-  return found;
+type Opening = Extract<Piece, { readonly kind: 'open' }>;
+
+function mainOf(html: string, page: string): string {
+  const start = /<main[\s>]/.exec(html)?.index ?? -1;
+  const end = html.lastIndexOf('</main>');
+  if (start < 0 || end < start) throw new Error(`${page} has no <main> to print`);
+  return html.slice(html.indexOf('>', start) + 1, end);
 }
 
-function isLeftOut({ tagName, properties }: Element): boolean {
-  const classes = Array.isArray(properties.className) ? properties.className : [];
-  return (
-    LEFT_OUT.has(tagName) ||
-    properties.hidden === true ||
-    classes.includes('screen') ||
-    classes.includes('sizes')
-  );
+/** Attributes that decide anything here; all others stay as they are. */
+const TELLING =
+  /\s(?:id|href|for|headers|list|hidden|aria-(?:labelledby|describedby)|data-pagefind)|url\(#|\b(?:screen|sizes)\b/;
+
+/** A start tag as the chapter has it; `null` where its element is left out. */
+function opened(
+  { name, attributes, empty, raw }: Opening,
+  chapter: Chapter,
+  chapters: ReadonlyMap<string, Chapter>,
+): string | null {
+  if (LEFT_OUT.has(name)) return null;
+  const isFolded = name === 'details';
+  const isHeading = /^h[1-5]$/.test(name);
+  if (!isFolded && !isHeading && !TELLING.test(attributes)) return raw;
+  const given = attributesOf(attributes);
+  if (given.some(leavesOut)) return null;
+  const kept = given
+    .filter((attribute) => !isDropped(name, attribute))
+    .map((attribute) => ({ ...attribute, value: moved(attribute, chapter, chapters) }));
+  // what is folded away on a screen cannot be unfolded on paper
+  if (isFolded && !kept.some((attribute) => attribute.name === 'open')) {
+    kept.push({ name: 'open', value: null });
+  }
+  const written = kept.map((attribute) => ` ${attribute.name}${quoted(attribute.value)}`).join('');
+  return `<${lowered(name)}${written}${empty && raw.endsWith('/>') ? '/' : ''}>`;
 }
+
+/** What the search reads; and three hundred regions of a few names would help nobody to find the way. */
+const isDropped = (tag: string, { name }: Attribute) =>
+  name.startsWith('data-pagefind') || (tag === 'section' && name === 'aria-labelledby');
+
+const leavesOut = ({ name, value }: Attribute) =>
+  (name === 'hidden' && value !== 'until-found') ||
+  (name === 'class' && LEFT_OUT_CLASSES.test(value ?? ''));
+
+function moved(
+  { name, value }: Attribute,
+  chapter: Chapter,
+  chapters: ReadonlyMap<string, Chapter>,
+): string | null {
+  if (value === null) return null;
+  const prefixed = (id: string) => `${chapter.id}--${id}`;
+  if (name === 'id') return prefixed(value);
+  if (name === 'href') return placeOf(value, chapter.page, chapters);
+  if (NAMING_IDS.has(name)) return value.trim().split(/\s+/).map(prefixed).join(' ');
+  return value.replace(/url\(#([^)]+)\)/g, (_, to: string) => `url(#${prefixed(to)})`);
+}
+
+const quoted = (value: string | null) =>
+  value === null ? '' : value.includes('"') ? `='${value}'` : `="${value}"`;
 
 /** The document has one first heading, and it is on the cover. */
-const lowered = (tag: string) =>
-  tag.replace(/^h([1-5])$/, (_, rank: string) => `h${Number(rank) + 1}`);
+const lowered = (name: string) => (/^h[1-5]$/.test(name) ? `h${Number(name[1]) + 1}` : name);
 
 function placeOf(href: string, page: string, chapters: ReadonlyMap<string, Chapter>): string {
   const [path = '', anchor] = href.split('#');
@@ -80,10 +105,4 @@ function placeOf(href: string, page: string, chapters: ReadonlyMap<string, Chapt
   const chapter = chapters.get(target);
   if (!chapter || anchor?.includes('=')) return href;
   return anchor ? `#${chapter.id}--${anchor}` : `#${chapter.id}`;
-}
-
-function prefixAll(properties: Properties, name: string, prefixed: (id: string) => string): void {
-  const value = properties[name];
-  if (typeof value === 'string') properties[name] = value.split(/\s+/).map(prefixed).join(' ');
-  else if (Array.isArray(value)) properties[name] = value.map((id) => prefixed(String(id)));
 }
