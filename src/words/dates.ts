@@ -7,6 +7,13 @@ export const dateText = (iso: string): string => written(iso, { dateStyle: 'medi
 export const monthText = (iso: string): string => written(iso, { year: 'numeric', month: 'short' });
 
 function written(iso: string, style: Intl.DateTimeFormatOptions): string {
-  const format = new Intl.DateTimeFormat(voice().locale, { ...style, timeZone: 'UTC' });
+  const { locale } = voice();
+  const name = JSON.stringify([locale, style]);
+  const format =
+    formats.get(name) ?? new Intl.DateTimeFormat(locale, { ...style, timeZone: 'UTC' });
+  formats.set(name, format);
   return format.format(new Date(`${iso}T00:00:00Z`));
 }
+
+/** To make one takes a hundred times as long as to write a date with it. */
+const formats = new Map<string, Intl.DateTimeFormat>();
