@@ -1,6 +1,7 @@
 import { defineConfig } from 'astro/config';
 import { benchCards } from './src/site/integrations/bench-cards.ts';
 import { formulaPictures } from './src/site/integrations/formula-pictures.ts';
+import { keepPages } from './src/site/integrations/keep-pages.ts';
 import { ownWords } from './src/site/integrations/own-words.ts';
 import { pageClock } from './src/site/integrations/page-clock.ts';
 import { printDocument } from './src/site/integrations/print-document.ts';
@@ -22,6 +23,7 @@ export default defineConfig({
   integrations: [
     pageClock(),
     unusedScripts(),
+    keepPages(),
     formulaPictures(),
     benchCards(),
     printDocument(),

@@ -17,6 +17,7 @@ import {
 import { writeProblem } from '../edition/write-problem.ts';
 import { isCalendarDate } from '../formulary/calendar-date.ts';
 import { measureStage, onStage } from '../formulary/stages.ts';
+import { EDITION_MARK } from '../site/common-input.ts';
 import { handOver } from '../site/input.ts';
 import { counted, problemSummary, problemText } from '../words/problem-text.ts';
 import { FOLDERS, readArguments } from './arguments.ts';
@@ -128,7 +129,7 @@ async function buildInto(
   }
   const count = loaded.input.formulary.formulas.length;
   console.log(`Building ${counted(count, 'formula')} as of ${asOf} ...`);
-  handOver(loaded.input);
+  handOver(loaded.input, EDITION_MARK);
   const work = workFolder(PROJECT);
   const here = process.cwd();
   try {

@@ -52,7 +52,7 @@ export async function main(args: readonly string[]): Promise<number | undefined>
   let problems: readonly Problem[] = [];
   const load = () => {
     const loaded = loadSite({ formulas, data }, { asOf, drafts: true });
-    if (loaded.ok) handOver(loaded.input);
+    if (loaded.ok) handOver(loaded.input, loaded.input.edition.id);
     problems = loaded.ok ? [] : loaded.problems;
     // warnings are counted only: while a shop writes, most formulas are not approved yet
     for (const problem of problems) console.error(problemText(problem));

@@ -11,6 +11,9 @@ export type ApprovalState =
   | 'not-approved'
   | 'withdrawn';
 
+/** Of a formula that is in use. */
+export type StateInUse = Exclude<ApprovalState, 'withdrawn'>;
+
 /** Rules that a proof edition only warns of. */
 export const APPROVAL_RULES: ReadonlySet<string> = new Set<EditionRule>([
   'edition/not-approved',

@@ -1,6 +1,6 @@
 import type { FormulaDocument } from '../formulary/document.ts';
 import type { Formula } from '../formulary/formula.ts';
-import type { ApprovalState } from './approval.ts';
+import type { StateInUse } from './approval.ts';
 import type { LotInForce } from './weights-digest.ts';
 import { sixDigits, type WeightsPerKilogram, weightsOfDocument } from './weights-per-kilogram.ts';
 
@@ -28,7 +28,7 @@ interface Entry {
 }
 
 export interface CurrentEntry extends Entry {
-  readonly state: Exclude<ApprovalState, 'withdrawn'>;
+  readonly state: StateInUse;
   readonly fingerprint: string;
   readonly approval: { readonly by: string; readonly on: string; readonly reviewBy: string } | null;
   /** Weights digest by batch size; `null` where a size has no weights. */

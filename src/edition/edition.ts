@@ -1,6 +1,6 @@
 import type { ComputedFormula, Formulary } from '../formulary/formulary.ts';
 import type { Problem } from '../words/problem.ts';
-import { type ApprovalState, approvalOf, approvalProblems } from './approval.ts';
+import { approvalOf, approvalProblems, type StateInUse } from './approval.ts';
 import { MODELS_VERSION } from './approved-content.ts';
 import type { Canonical } from './canonical-text.ts';
 import { compareEditions, type EditionChanges } from './changes.ts';
@@ -32,7 +32,7 @@ export interface Edition {
   /** Formulas in use, with cautions and digests. Withdrawn ones are not in it. */
   readonly formulary: Formulary;
   /** By code, for every formula of `formulary`. */
-  readonly states: ReadonlyMap<string, Exclude<ApprovalState, 'withdrawn'>>;
+  readonly states: ReadonlyMap<string, StateInUse>;
   readonly withdrawn: readonly WithdrawnFormula[];
   /** What `edition.json` holds. */
   readonly document: EditionDocument;

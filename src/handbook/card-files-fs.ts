@@ -1,15 +1,5 @@
 import { createHash } from 'node:crypto';
-import {
-  existsSync,
-  mkdirSync,
-  readdirSync,
-  readFileSync,
-  renameSync,
-  rmSync,
-  statSync,
-  utimesSync,
-  writeFileSync,
-} from 'node:fs';
+import { existsSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { voice } from '../words/voice.ts';
@@ -17,6 +7,7 @@ import type { CardContent } from './card-content.ts';
 import { drawCard } from './card-drawing.ts';
 import { cardFonts } from './card-fonts.ts';
 import { cardPng } from './card-png.ts';
+import { keepFile, markUsed } from './kept-files-fs.ts';
 
 export interface CardFiles {
   readonly svg: Buffer;
@@ -38,17 +29,25 @@ const DRAWING = [
 
 let drawing: string | undefined;
 
-/**
- * The two files of a card, drawn once for each content and kept in `folder` under the hash of all that
- * decides them: the content, the program that draws, its packages and the fonts.
- */
-export async function cardFiles(content: CardContent, folder: string): Promise<CardFiles> {
+/** Where the two files of a card are kept in `folder`: under the hash of all that decides how it looks. */
+export function cardPaths(
+  content: CardContent,
+  folder: string,
+): { readonly svg: string; readonly png: string } {
   const name = createHash('sha256')
     .update(drawingHash())
     .update(JSON.stringify(voice()))
     .update(JSON.stringify(content))
     .digest('hex');
-  const paths = { svg: join(folder, `${name}.svg`), png: join(folder, `${name}.png`) };
+  return { svg: join(folder, `${name}.svg`), png: join(folder, `${name}.png`) };
+}
+
+/**
+ * The two files of a card, drawn once for each content and kept in `folder` under the hash of all that
+ * decides them: the content, the program that draws, its packages and the fonts.
+ */
+export async function cardFiles(content: CardContent, folder: string): Promise<CardFiles> {
+  const paths = cardPaths(content, folder);
   if (existsSync(paths.svg) && existsSync(paths.png)) {
     markUsed(paths.svg);
     markUsed(paths.png);
@@ -56,39 +55,9 @@ export async function cardFiles(content: CardContent, folder: string): Promise<C
   }
   const { svg: text } = await drawCard(content);
   const files = { svg: Buffer.from(text), png: cardPng(text) };
-  mkdirSync(folder, { recursive: true });
-  keep(paths.svg, files.svg);
-  keep(paths.png, files.png);
+  keepFile(paths.svg, files.svg);
+  keepFile(paths.png, files.png);
   return files;
-}
-
-const DAY = 24 * 60 * 60 * 1000;
-/** A card that no build has asked for in this time is of a formula that has changed since. [ms] */
-const LONGEST_UNUSED = 60 * DAY;
-
-/**
- * Deletes the cards that no build has asked for in sixty days before `now`, and what broken writes have left. What
- * is published never depends on it: a card that is missed is drawn again, the same to the byte.
- */
-export function pruneCards(folder: string, now: number): void {
-  for (const name of existsSync(folder) ? readdirSync(folder) : []) {
-    const path = join(folder, name);
-    const used = statSync(path, { throwIfNoEntry: false })?.mtimeMs;
-    if (used !== undefined && now - used > LONGEST_UNUSED) rmSync(path, { force: true });
-  }
-}
-
-/** The time of a file is when it was last used, to the day: most builds then leave it alone. */
-function markUsed(path: string): void {
-  const now = new Date();
-  if (now.getTime() - statSync(path).mtimeMs > DAY) utimesSync(path, now, now);
-}
-
-/** Under another name first, so that a broken write is never taken for a card. */
-function keep(path: string, bytes: Buffer): void {
-  const beside = `${path}.${process.pid}`;
-  writeFileSync(beside, bytes);
-  renameSync(beside, path);
 }
 
 function drawingHash(): string {

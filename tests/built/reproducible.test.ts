@@ -1,22 +1,9 @@
-import { execFileSync } from 'node:child_process';
-import {
-  cpSync,
-  mkdirSync,
-  mkdtempSync,
-  readdirSync,
-  readFileSync,
-  rmSync,
-  symlinkSync,
-  writeFileSync,
-} from 'node:fs';
+import { mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
-import { fileURLToPath, pathToFileURL } from 'node:url';
+import { pathToFileURL } from 'node:url';
 import { afterAll, expect, inject, test } from 'vitest';
-
-const ROOT = fileURLToPath(new URL('../..', import.meta.url));
-/** What a copy of the project does without: what a build leaves behind, and what is linked. */
-const NOT_COPIED = ['node_modules', 'dist', 'tests'];
+import { buildWithCopy, copyProject } from '../support/project-copy.ts';
 
 /** Runs before the command and puts its clock 400 days forward. */
 const CLOCK = `const Real = Date;
@@ -38,24 +25,13 @@ test('the same inputs give the same bytes in another folder, time zone and year'
   const site = inject('site');
   const { asOf } = JSON.parse(readFileSync(join(site, 'edition.json'), 'utf8')) as { asOf: string };
   const copy = join(elsewhere, 'x');
-  mkdirSync(copy);
-  for (const part of readdirSync(ROOT)) {
-    if (part.startsWith('.') || NOT_COPIED.includes(part)) continue;
-    cpSync(join(ROOT, part), join(copy, part), { recursive: true });
-  }
-  symlinkSync(join(ROOT, 'node_modules'), join(copy, 'node_modules'), 'junction');
+  copyProject(copy);
   writeFileSync(join(copy, 'clock.mjs'), CLOCK);
   const clock = pathToFileURL(join(copy, 'clock.mjs')).href;
-  execFileSync(
-    process.execPath,
-    ['--import', clock, 'src/commands/run.js', 'build', '--drafts', '--as-of', asOf],
-    {
-      cwd: copy,
-      // the test runner's own DEV and NODE_ENV go along: they must not reach the pages
-      env: { ...process.env, TZ: 'Pacific/Kiritimati' },
-      stdio: ['ignore', 'ignore', 'pipe'],
-    },
-  );
+  buildWithCopy(copy, ['--drafts', '--as-of', asOf], {
+    imports: [clock],
+    env: { TZ: 'Pacific/Kiritimati' },
+  });
   const sums = (folder: string) => readFileSync(join(folder, 'sha256sums.txt'), 'utf8').split('\n');
   const [here, there] = [sums(site), sums(join(copy, 'dist'))];
   const differing = [...here, ...there].filter(

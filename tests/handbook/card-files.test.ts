@@ -4,7 +4,8 @@ import { join } from 'node:path';
 import { crc32, inflateSync } from 'node:zlib';
 import { Resvg } from '@resvg/resvg-js';
 import { afterAll, expect, test } from 'vitest';
-import { cardFiles, pruneCards } from '../../src/handbook/card-files-fs.ts';
+import { cardFiles } from '../../src/handbook/card-files-fs.ts';
+import { pruneKept } from '../../src/handbook/kept-files-fs.ts';
 import { shortPath } from '../../src/handbook/short-path.ts';
 import { CARD } from './card-fixture.ts';
 
@@ -33,18 +34,18 @@ test('what no build has asked for in sixty days goes, and what was used lately s
   const { png } = await cardFiles(CARD, cache);
   writeFileSync(join(cache, 'broken.svg.123'), '<svg');
   age(59);
-  pruneCards(cache, now);
+  pruneKept(cache, 60, now);
   expect(readdirSync(cache)).toHaveLength(3);
   age(61);
   // asked for again, the card counts as used; the rest of a broken write does not
   await cardFiles(CARD, cache);
-  pruneCards(cache, now);
+  pruneKept(cache, 60, now);
   expect(readdirSync(cache)).toHaveLength(2);
   age(61);
-  pruneCards(cache, now);
+  pruneKept(cache, 60, now);
   expect(readdirSync(cache)).toEqual([]);
   expect((await cardFiles(CARD, cache)).png.equals(png)).toBe(true);
-  pruneCards(join(cache, 'none'), now);
+  pruneKept(join(cache, 'none'), 60, now);
   rmSync(cache, { recursive: true });
 });
 

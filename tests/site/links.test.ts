@@ -1,5 +1,5 @@
 import { expect, test } from 'vitest';
-import { rewriteLinks } from '../../src/site/integrations/rewrite-links.ts';
+import { idsOf, rewriteLinks } from '../../src/site/integrations/rewrite-links.ts';
 
 const texts = new Map([
   ['index.html', '<h2 id="a">A</h2>'],
@@ -8,7 +8,8 @@ const texts = new Map([
   ['assets/font.woff2', ''],
 ]);
 const files = new Set(texts.keys());
-const rewrite = (file: string, text: string) => rewriteLinks(file, text, files, texts);
+const rewrite = (file: string, text: string) =>
+  rewriteLinks(file, text, files, (page) => idsOf(texts.get(page) ?? ''));
 
 test('links become relative to their page', () => {
   expect(rewrite('formulas/TT-001.html', '<a href="/index.html#a">').rewritten).toBe(

@@ -4,11 +4,13 @@ import { fileURLToPath } from 'node:url';
 import type { AstroIntegration } from 'astro';
 import { SEAL_FILES } from '../../edition/seal-fs.ts';
 import { measureStage } from '../../formulary/stages.ts';
-import { rewriteLinks } from './rewrite-links.ts';
+import { EDITION_MARK } from '../common-input.ts';
+import { siteInput } from '../input.ts';
+import { idsOf, rewriteLinks } from './rewrite-links.ts';
 
 /**
  * Turns the site-absolute links of the written pages and style sheets into relative ones, so that the
- * folder works at any address and from a disk. Fails the build on a link to a file or an anchor that is not there.
+ * folder works at any address and from a disk, and puts the id of the edition in. Fails the build on a link to a file or an anchor that is not there.
  */
 export function relativeLinks(): AstroIntegration {
   return {
@@ -18,18 +20,26 @@ export function relativeLinks(): AstroIntegration {
         const start = performance.now();
         const folder = fileURLToPath(dir);
         const files = filesIn(folder);
-        const texts = new Map(
-          files
-            .filter((file) => /\.(html|css|svg)$/.test(file))
-            .map((file) => [file, readFileSync(join(folder, file), 'utf8')]),
-        );
         // the seal is put on the finished folder
         const there = new Set([...files, ...SEAL_FILES]);
+        // pages are read one after the other: all of them at once would fill the memory
+        const read = (file: string) => readFileSync(join(folder, file), 'utf8');
+        const ids = new Map<string, ReadonlySet<string>>();
+        const idsOn = (page: string) => {
+          const found = ids.get(page) ?? (isText(page) ? idsOf(read(page)) : NO_IDS);
+          ids.set(page, found);
+          return found;
+        };
+        const { edition } = siteInput();
         const dangling: string[] = [];
-        for (const [file, text] of texts) {
-          const { rewritten, missing } = rewriteLinks(file, text, there, texts);
+        for (const file of files.filter(isText)) {
+          const text = read(file);
+          const { rewritten, missing } = rewriteLinks(file, text, there, (page) =>
+            page === file ? idsOf(text) : idsOn(page),
+          );
+          const finished = rewritten.replaceAll(EDITION_MARK, edition.id);
           dangling.push(...missing.map((link) => `${file}: ${link}`));
-          if (rewritten !== text) writeFileSync(join(folder, file), rewritten);
+          if (finished !== text) writeFileSync(join(folder, file), finished);
         }
         if (dangling.length > 0) {
           throw new Error(`Links that lead nowhere:\n${dangling.join('\n')}`);
@@ -39,6 +49,9 @@ export function relativeLinks(): AstroIntegration {
     },
   };
 }
+
+const isText = (file: string) => /\.(html|css|svg)$/.test(file);
+const NO_IDS: ReadonlySet<string> = new Set();
 
 function filesIn(folder: string): string[] {
   return readdirSync(folder, { recursive: true, withFileTypes: true })

@@ -9,23 +9,29 @@ export interface RewrittenLinks {
 /**
  * Rewrites every site-absolute `href`, `src`, `srcset`, `data-root` and CSS `url()` of one file.
  *
- * `files` are all files of the site, with `/` and without a leading one; `texts` holds the pages, in which
+ * `files` are all files of the site, with `/` and without a leading one; `idsOn` gives the ids of one of them, in which
  * anchors are looked up. Links within a page (`#weights`) are checked too. Other hosts are left alone.
  */
 export function rewriteLinks(
   file: string,
   text: string,
   files: ReadonlySet<string>,
-  texts: ReadonlyMap<string, string>,
+  idsOn: (page: string) => ReadonlySet<string>,
 ): RewrittenLinks {
   const missing: string[] = [];
   const from = posix.dirname(file);
+  const targets = new Map<string, ReadonlySet<string>>();
+  const has = (page: string, id: string) => {
+    const ids = targets.get(page) ?? idsOn(page);
+    targets.set(page, ids);
+    return ids.has(id);
+  };
   const relativeTo = (link: string) => {
     const [path = '', anchor] = link.split('#');
     const target = path === '' ? file : path.slice(1);
     if (!files.has(target)) missing.push(link);
     // with a `=` it asks the finder something
-    else if (anchor && !anchor.includes('=') && !hasAnchor(texts, target, anchor)) {
+    else if (anchor && !anchor.includes('=') && !has(target, anchor)) {
       missing.push(link);
     }
     const hash = anchor === undefined ? '' : `#${anchor}`;
@@ -47,16 +53,6 @@ export function rewriteLinks(
   return { rewritten, missing };
 }
 
-const known = new WeakMap<ReadonlyMap<string, string>, Map<string, ReadonlySet<string>>>();
-
-/** Whether a page has an id. The ids of a page are looked for once, as hundreds of links lead into some. */
-function hasAnchor(texts: ReadonlyMap<string, string>, page: string, anchor: string): boolean {
-  const pages = known.get(texts) ?? new Map<string, ReadonlySet<string>>();
-  known.set(texts, pages);
-  const ids = pages.get(page) ?? idsOf(texts.get(page) ?? '');
-  pages.set(page, ids);
-  return ids.has(anchor);
-}
-
-const idsOf = (html: string) =>
+/** The ids of a page, which links lead to. */
+export const idsOf = (html: string): ReadonlySet<string> =>
   new Set([...html.matchAll(/ id="([^"]*)"/g)].map(([, id]) => id ?? ''));

@@ -4,7 +4,10 @@ import { anySizeOffers } from '../../any-size/offers.ts';
 import { siteInput } from '../../input.ts';
 
 export const getStaticPaths = () =>
-  anySizeOffers(siteInput()).map(({ data }) => ({ params: { code: data.code }, props: { data } }));
+  anySizeOffers(siteInput().edition).map(({ data }) => ({
+    params: { code: data.code },
+    props: { data },
+  }));
 
 /** The numbers of one formula as a classic script: it works from a disk too, where nothing can be fetched. */
 export const GET: APIRoute<{ data: AnySizeData }> = ({ props: { data } }) =>
