@@ -31,14 +31,14 @@ const page = (site: string) => `---
 import { readdirSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 
-const SITE = ${JSON.stringify(site)};
-
 export function getStaticPaths() {
-  return readdirSync(SITE, { recursive: true, encoding: 'utf8' })
+  // it is taken out of here, without what stands beside it
+  const site = ${JSON.stringify(site)};
+  return readdirSync(site, { recursive: true, encoding: 'utf8' })
     .filter((path) => path.endsWith('.html') && path !== 'print.html')
     .map((path) => ({
       params: { path: path.replaceAll('\\\\', '/').replace(/\\.html$/, '') },
-      props: { html: readFileSync(join(SITE, path), 'utf8') },
+      props: { html: readFileSync(join(site, path), 'utf8') },
     }));
 }
 
