@@ -25,7 +25,7 @@ const MOST_DIGITS = 7;
 export function typedMass(text: string, { decimalSign, units }: Voice): Typed {
   if (units === 'metric') return typedNumber(text, decimalSign);
   const [, pounds, ounces = ''] = /^(?:(\d+)\s*lb)?\s*(.*?)\s*(?:oz)?$/su.exec(text.trim()) ?? [];
-  const nothing = ounces === '' || /^0+$/.test(ounces);
+  const nothing = ounces === '' || /^0+(?:[.,]0+)?$/.test(ounces);
   const left = pounds !== undefined && nothing ? NO_OUNCES : typedNumber(ounces, decimalSign);
   if (!left.ok) return left;
   if ((pounds ?? '').length > MOST_DIGITS) return { ok: false, fault: 'too-long' };

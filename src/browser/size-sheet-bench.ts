@@ -51,7 +51,7 @@ export function benchFields(sized: Sized, data: AnySizeData): { readonly read: (
 /** Grams, or a sentence why it is no reading of this scale. */
 function readingOf(typed: string, { name, step }: ShownLine): number | string {
   // nothing on the scale is a reading too
-  if (/^0+$/.test(typed.trim())) return 0;
+  if (/^(?:0+\s*lb\s*)?0+(?:[.,]0+)?\s*(?:g|oz)?$/u.test(typed.trim())) return 0;
   const mass = typedMass(typed, voice());
   if (!mass.ok) {
     const sentence = anySizeWords.typed[mass.fault];

@@ -125,6 +125,9 @@ describe.each(['file', 'http'])('any size, opened by %s', (how) => {
   test('puts a slip right, or stops the batch', async () => {
     await page.goto(address('sizes/QY-014.html#listed=pilot'));
     const olive = page.getByLabel('Olive oil: scale showed');
+    // an empty cup, as the scale shows it
+    await olive.fill('0.0');
+    expect(await page.locator('#correction-todo').textContent()).toContain('Add 450');
     // alone in its cup: what is too much is taken back
     await olive.fill('460');
     const todo = page.locator('#correction-todo');

@@ -43,6 +43,8 @@ describe('what is typed', () => {
     // an avoirdupois pound is 453.59237 g by definition, NIST Handbook 44, appendix C; from memory
     ['2 lb', 907.18474],
     ['2lb 0', 907.18474],
+    ['2 lb 0.0 oz', 907.18474],
+    ['2 lb 0.00', 907.18474],
     ['2 lb 8 oz', 1133.980925],
     ['35.5', 1006.40807],
     ['35.5 oz', 1006.40807],
