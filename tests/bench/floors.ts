@@ -37,7 +37,8 @@ export function getStaticPaths() {
   return readdirSync(site, { recursive: true, encoding: 'utf8' })
     .filter((path) => path.endsWith('.html') && path !== 'print.html')
     .map((path) => ({
-      params: { path: path.replaceAll('\\\\', '/').replace(/\\.html$/, '') },
+      // an index would stand for its folder
+      params: { path: path.replaceAll('\\\\', '/').replace(/\\.html$/, '-page') },
       props: { html: readFileSync(join(site, path), 'utf8') },
     }));
 }
