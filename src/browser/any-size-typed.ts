@@ -12,6 +12,7 @@ export type TypedFault =
   | 'not-a-number'
   | 'not-whole'
   | 'zero'
+  | 'ounces'
   | 'too-long';
 
 /** More digits than this before the sign are a slip; a tonne in grams has seven. */
@@ -29,6 +30,7 @@ export function typedMass(text: string, { decimalSign, units }: Voice): Typed {
   const left = pounds !== undefined && nothing ? NO_OUNCES : typedNumber(ounces, decimalSign);
   if (!left.ok) return left;
   if ((pounds ?? '').length > MOST_DIGITS) return { ok: false, fault: 'too-long' };
+  if (pounds !== undefined && left.value >= 16) return { ok: false, fault: 'ounces' };
   const mass = Number(pounds ?? 0) * POUND + left.value * OUNCE;
   return mass > 0 ? { ok: true, value: mass } : { ok: false, fault: 'zero' };
 }

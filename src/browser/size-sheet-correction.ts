@@ -34,7 +34,8 @@ export function correctionForm(data: AnySizeData, redraw: Redraw): (planned: Siz
     const read = fields?.read();
     if (!planned || !read) return;
     if (!read.ok) {
-      redraw(planned, 'asked');
+      // with a reading that cannot be read, no weights are sure
+      redraw(null, 'stopped');
       say(read.sentence);
       return;
     }

@@ -10,8 +10,12 @@ import { weightsTable } from './any-size-weights.ts';
 import { element, part } from './find-dom.ts';
 import { correctionForm } from './size-sheet-correction.ts';
 
-/** A listed size is made from its own sheet, unless it had to be put right. */
-const mark = (listed: boolean) => document.documentElement.classList.toggle('is-listed', listed);
+/** A listed size is made from its own sheet, unless it had to be put right; a stopped one has none. */
+function mark(listed: boolean, stopped = false): void {
+  const { classList } = document.documentElement;
+  classList.toggle('is-listed', listed);
+  classList.toggle('is-stopped', stopped);
+}
 
 function put(sized: Sized | null, name: string, data: AnySizeData): void {
   part('any-size-weights').replaceChildren(
@@ -35,7 +39,7 @@ withData((data) => {
   const ask = correctionForm(data, (sized, state) => {
     const name = asked?.name ?? '';
     put(sized, state === 'corrected' ? text.corrected(name) : name, data);
-    mark(state === 'asked' && asked?.listed === true);
+    mark(state === 'asked' && asked?.listed === true, state === 'stopped');
   });
   askForSize(data, (size) => {
     asked = size;

@@ -50,6 +50,9 @@ describe('what is typed', () => {
     ['35.5 oz', 1006.40807],
     ['2 kg', 'not-a-number'],
     ['2 lb 3 lb', 'not-a-number'],
+    ['2 lb 20', 'ounces'],
+    ['2 lb 16 oz', 'ounces'],
+    ['2 lb 15.9', 1357.9421576875002],
     ['', 'empty'],
     ['0', 'zero'],
   ])('%j in pounds and ounces', (text, expected) => {

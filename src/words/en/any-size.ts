@@ -59,6 +59,7 @@ export const anySizeWords = {
       `Write the decimals after “${sign}”, and nothing between the thousands.`,
     'not-a-number': 'That is not a number. Use digits only.',
     'not-whole': 'Bars are counted: type a whole number.',
+    ounces: 'Ounces after pounds stay below 16.',
     zero: 'That is nothing to make. Type a number above zero.',
     'too-long': 'That is too large for any size of this shop.',
   },

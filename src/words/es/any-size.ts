@@ -60,6 +60,7 @@ export const anySizeWords: SameShape<typeof english.anySizeWords> = {
     'other-sign': (sign) => `Escriba los decimales tras «${sign}», y nada entre los millares.`,
     'not-a-number': 'Eso no es un número. Use solo cifras.',
     'not-whole': 'Las pastillas se cuentan: escriba un número entero.',
+    ounces: 'Después de las libras, las onzas son menos de 16.',
     zero: 'Con eso no hay nada que elaborar. Escriba un número mayor que cero.',
     'too-long': 'Es demasiado para cualquier tamaño de este taller.',
   },
