@@ -141,6 +141,11 @@ describe.each(['under a sub-path', 'opened as a file'])('the finder %s', (where)
     await page.waitForURL(/formulas\/.*\.html$/);
     await page.close();
   });
+});
+
+// how it answers is the same wherever it lies
+describe('the finder', () => {
+  const where = 'opened as a file';
 
   test('nothing left: says which limits to drop, and what each would leave', async () => {
     const page = await open(where, '#superfat=9..&iodine-value=..10&kind=paste');
