@@ -22,7 +22,7 @@ export function languageFile(language: Language): string {
 }
 
 /** Read from every folder, a later one over an earlier one. */
-export const PACKAGED_FILES = [
+const PACKAGED_FILES = [
   'sources.yaml',
   'elements.yaml',
   'acids.yaml',

@@ -1,5 +1,5 @@
 import { COMMON_PRACTICE } from '../../reference/caution-thresholds.ts';
-import { words } from '../../words/catalogue.ts';
+import { allergenName } from '../../words/allergen-name.ts';
 import { materialNames } from '../material-names.ts';
 import type { CautionContext, CautionRule } from '../rule.ts';
 
@@ -17,8 +17,7 @@ export const rule: CautionRule<'allergen-sources'> = {
     }
     if (bySource.size === 0) return [];
     const sources = [...bySource].map(
-      ([source, ids]) =>
-        `${words.frame.allergens[source] ?? source} (${materialNames(context.reference, ids)})`,
+      ([source, ids]) => `${allergenName(source)} (${materialNames(context.reference, ids)})`,
     );
     return [{ sources: sources.join('; ') }];
   },

@@ -1,7 +1,7 @@
 import type { ComputedFormula, Formulary } from '../../formulary/formulary.ts';
-import { allergenName } from '../../handbook/materials/allergen-name.ts';
 import { nameOf } from '../../handbook/names.ts';
 import type { Trait } from '../../search/finder/finder-data.ts';
+import { allergenName } from '../../words/allergen-name.ts';
 import { words } from '../../words/catalogue.ts';
 import type { CautionId } from '../../words/en/cautions.ts';
 
